@@ -1,0 +1,25 @@
+/** One project in plain Node: the app is tested where people meet it, in a real browser. */
+module.exports = {
+  testEnvironment: 'node',
+  roots: ['<rootDir>/tests'],
+  testMatch: ['**/*.test.ts'],
+  transform: {
+    '\\.(ts|tsx|mjs)$': [
+      '@swc/jest',
+      {
+        module: { type: 'commonjs' },
+        jsc: {
+          target: 'es2022',
+          parser: { syntax: 'typescript', tsx: true, decorators: true },
+          transform: {
+            legacyDecorator: true,
+            decoratorMetadata: true,
+            useDefineForClassFields: false,
+            react: { runtime: 'automatic' },
+          },
+        },
+      },
+    ],
+  },
+  transformIgnorePatterns: ['/node_modules/(?!(d3-[a-z]+|internmap)/)'],
+};

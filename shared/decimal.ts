@@ -1,0 +1,56 @@
+import Decimal from 'decimal.js';
+import { z } from 'zod';
+
+/**
+ * Wide enough that sums and differences of contract decimals are exact (80 characters, at most
+ * 60 decimals where arithmetic is done).
+ */
+export const Exact = Decimal.clone({ precision: 200 });
+
+/** How a decimal is written in JSON: a string, so that no digit is lost to a binary float. */
+export const decimalPattern = /^-?(0|[1-9]\d*)(\.\d+)?([eE][+-]?\d+)?$/;
+export const decimalLongest = 80;
+export const decimalExponent = 400;
+
+const exponentWithin = (value: string) => {
+  const exponent = /[eE]([+-]?\d+)$/.exec(value)?.[1];
+  return exponent === undefined || Math.abs(Number(exponent)) <= decimalExponent;
+};
+
+const form = `Write a decimal string such as "7.40" or "1.5e-3", at most ${decimalLongest} characters.`;
+
+/** A decimal as callers send it. Codes: `decimal-must-be-string`, `not-a-decimal`. */
+export const decimalString = z
+  .string({
+    error: (issue) =>
+      typeof issue.input === 'number'
+        ? 'Write this decimal as a string: a JSON number would lose digits silently.'
+        : form,
+  })
+  .max(decimalLongest, form)
+  .regex(decimalPattern, form)
+  .refine(
+    exponentWithin,
+    `The exponent must lie between −${decimalExponent} and ${decimalExponent}.`,
+  );
+
+interface Range {
+  readonly from: string;
+  readonly to: string;
+  readonly decimals: number;
+}
+
+/** A decimal within a closed range and with a bounded number of places. Code: `out-of-range`. */
+export const decimalWithin = ({ from, to, decimals }: Range) =>
+  decimalString.superRefine((value, context) => {
+    if (!decimalPattern.test(value) || value.length > decimalLongest || !exponentWithin(value))
+      return;
+    const number = new Exact(value);
+    if (number.lessThan(from) || number.greaterThan(to) || number.decimalPlaces() > decimals) {
+      context.addIssue({
+        code: 'custom',
+        params: { code: 'out-of-range' },
+        message: `Must lie between ${from} and ${to} and have at most ${decimals} decimals.`,
+      });
+    }
+  });

@@ -1,0 +1,53 @@
+import { z } from 'zod';
+import { decimalWithin } from './decimal';
+import { limits } from './limits';
+import { text } from './text';
+
+/** A stepwise acid dissociation constant. */
+export const pKaValue = decimalWithin(limits.pKa).brand<'PKa'>().meta({
+  id: 'PKa',
+  description: 'Stepwise constant pKₐ, from −50 to 70, as a decimal string.',
+  example: '7.198',
+  'x-unit': '1',
+});
+
+/**
+ * A polyprotic system given in full: n constants, n + 1 species, charge z₀ − j after j protons.
+ * Equal and inverted neighbours are allowed; inversion is answered with a warning.
+ */
+export const systemInFull = z
+  .strictObject({
+    name: text(200).optional().meta({
+      description: 'A name for the system, repeated in the answer.',
+      example: 'phosphoric acid',
+    }),
+    fullyProtonatedCharge: z
+      .int()
+      .min(limits.fullyProtonatedCharge.from)
+      .max(limits.fullyProtonatedCharge.to)
+      .meta({
+        description: 'Charge number of the fully protonated species.',
+        example: 0,
+        'x-unit': 'e',
+      }),
+    pKa: z
+      .array(pKaValue)
+      .min(1)
+      .max(limits.protons)
+      .meta({
+        description: 'Stepwise constants in the order in which protons leave.',
+        example: ['2.148', '7.198', '12.35'],
+        'x-unit': '1',
+      }),
+  })
+  .meta({
+    id: 'System',
+    description: 'A polyprotic acid–base system given by its stepwise constants.',
+    example: {
+      name: 'phosphoric acid',
+      fullyProtonatedCharge: 0,
+      pKa: ['2.148', '7.198', '12.35'],
+    },
+  });
+
+export type SystemInFull = z.infer<typeof systemInFull>;
