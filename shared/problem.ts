@@ -16,7 +16,7 @@ export const problemTypes = {
   'over-limit': [422, 'The call asks for more than one call may'],
   'too-many-requests': [429, 'Too many calls'],
   internal: [500, 'Something went wrong here'],
-  overloaded: [503, 'Too busy at the moment'],
+  unavailable: [503, 'The service cannot answer at the moment'],
 } as const satisfies Record<string, readonly [status: number, title: string]>;
 
 export type ProblemName = keyof typeof problemTypes;

@@ -1,0 +1,42 @@
+import compression from 'compression';
+import express, { type Express } from 'express';
+import type { Logger } from 'pino';
+import { openApiDocument } from '../openapi/document';
+import type { Config } from './config';
+import { requestLog } from './http/logging';
+import { problemHandler } from './http/problem-response';
+import { operationsRouter } from './http/router';
+import { securityHeaders, styleHashes } from './http/security-headers';
+import { readIndex, webApp } from './http/web-app';
+import { Refusal } from './refusal';
+import { operations } from './routes';
+import { apiDescription } from './routes/api-description';
+import { problemPages } from './routes/problem-pages';
+import type { Services } from './services';
+
+interface Parts {
+  readonly config: Config;
+  readonly services: Services;
+  readonly logger: Logger;
+}
+
+/** The Express app from its parts. */
+export function createApp({ config, services, logger }: Parts): Express {
+  const { publicUrl, webRoot } = config;
+  const https = publicUrl.startsWith('https:');
+  const index = webRoot === undefined ? '' : readIndex(webRoot);
+  const app = express();
+  app.disable('x-powered-by').disable('etag').set('query parser', 'simple');
+  app.use(requestLog(logger));
+  app.use(securityHeaders({ styles: styleHashes(index), https }));
+  app.use(compression());
+  app.use(operationsRouter(operations, services));
+  app.use(apiDescription({ document: openApiDocument(operations), https }));
+  app.use(problemPages());
+  if (webRoot !== undefined) app.use(webApp(webRoot, index));
+  app.use(() => {
+    throw new Refusal('not-found', 'Look at /openapi.json for the addresses there are.');
+  });
+  app.use(problemHandler(publicUrl));
+  return app;
+}

@@ -1,0 +1,88 @@
+import { z } from 'zod';
+
+const pepper = /^[1-9]\d*:[A-Za-z0-9_-]{43,}$/;
+
+const peppers = z
+  .string()
+  .refine((value) => value.split(',').every((entry) => pepper.test(entry)), {
+    message:
+      'write version:secret pairs, comma-separated, each secret 32 bytes or more in base64url',
+  })
+  .transform(
+    (value) =>
+      new Map(
+        value.split(',').map((entry) => {
+          const [version = '', secret = ''] = entry.split(':');
+          return [Number(version), Buffer.from(secret, 'base64url')] as const;
+        }),
+      ),
+  );
+
+const environment = z
+  .object({
+    NODE_ENV: z.enum(['development', 'test', 'production']).default('development'),
+    HOST: z.string().default('127.0.0.1'),
+    PORT: z.coerce.number('must be a whole number').int().min(0).max(65_535).default(8080),
+    PUBLIC_URL: z
+      .url({ protocol: /^https?$/, error: 'must be an http or https address' })
+      .optional(),
+    DATABASE_URL: z.url({
+      protocol: /^postgres(ql)?$/,
+      error: 'must be a postgresql:// address',
+    }),
+    KEY_PEPPERS: peppers,
+    WEB_ROOT: z.string().optional(),
+    LOG_LEVEL: z.enum(['debug', 'info', 'warn', 'error', 'silent']).default('info'),
+    COMPUTE_THREADS: z.coerce.number().int().min(1).max(64).optional(),
+  })
+  .superRefine((values, context) => {
+    const refuse = (name: string, message: string) =>
+      context.addIssue({ code: 'custom', path: [name], message });
+    if (values.NODE_ENV === 'production') {
+      if (values.PUBLIC_URL === undefined) refuse('PUBLIC_URL', 'is required in production');
+    } else if (values.HOST !== '127.0.0.1') {
+      refuse('HOST', 'may be other than 127.0.0.1 only in production: demo accounts exist here');
+    }
+  });
+
+export interface Config {
+  readonly environment: 'development' | 'test' | 'production';
+  readonly host: string;
+  readonly port: number;
+  /** Origin of links and problem types, without a trailing slash. */
+  readonly publicUrl: string;
+  readonly databaseUrl: string;
+  /** Peppers of API keys by version; the highest version makes new digests. */
+  readonly keyPeppers: ReadonlyMap<number, Buffer>;
+  readonly webRoot: string | undefined;
+  readonly logLevel: 'debug' | 'info' | 'warn' | 'error' | 'silent';
+  readonly computeThreads: number | undefined;
+}
+
+/** The environment is wrong; the message names each variable and its reason. */
+export class ConfigError extends Error {}
+
+/** Reads the environment once, at start. Throws a ConfigError that names what is wrong. */
+export function readConfig(source: Readonly<Record<string, string | undefined>>): Config {
+  const given = Object.fromEntries(Object.entries(source).filter(([, value]) => value !== ''));
+  const parsed = environment.safeParse(given);
+  if (!parsed.success) {
+    const lines = parsed.error.issues.map(({ path, message }) => {
+      const name = String(path[0]);
+      return given[name] === undefined ? `${name} is missing (${message})` : `${name}: ${message}`;
+    });
+    throw new ConfigError(`The environment is not as it must be:\n  ${lines.join('\n  ')}`);
+  }
+  const values = parsed.data;
+  return {
+    environment: values.NODE_ENV,
+    host: values.HOST,
+    port: values.PORT,
+    publicUrl: (values.PUBLIC_URL ?? `http://localhost:${values.PORT}`).replace(/\/+$/, ''),
+    databaseUrl: values.DATABASE_URL,
+    keyPeppers: values.KEY_PEPPERS,
+    webRoot: values.WEB_ROOT,
+    logLevel: values.LOG_LEVEL,
+    computeThreads: values.COMPUTE_THREADS,
+  };
+}

@@ -1,0 +1,23 @@
+import 'reflect-metadata';
+import { DataSource } from 'typeorm';
+import { ApiKey } from './entities/api-key';
+import { Membership } from './entities/membership';
+import { Organization } from './entities/organization';
+import { Person } from './entities/person';
+import { OrganizationsAndKeys1764547200000 } from './migrations/1764547200000-organizations-and-keys';
+
+/** The database, not yet connected. The schema is made by migrations alone. */
+export const createDataSource = (url: string): DataSource =>
+  new DataSource({
+    type: 'postgres',
+    url,
+    applicationName: 'stepwell',
+    entities: [Organization, Person, Membership, ApiKey],
+    migrations: [OrganizationsAndKeys1764547200000],
+    migrationsTableName: 'schema_migrations',
+    migrationsTransactionMode: 'each',
+    synchronize: false,
+    poolSize: 10,
+    connectTimeoutMS: 5_000,
+    extra: { statement_timeout: 10_000, idle_in_transaction_session_timeout: 10_000 },
+  });

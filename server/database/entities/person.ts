@@ -1,0 +1,18 @@
+import { Column, CreateDateColumn, Entity, PrimaryColumn } from 'typeorm';
+
+/** Somebody who signs in; belongs to organizations by memberships. */
+@Entity('people')
+export class Person {
+  @PrimaryColumn('uuid')
+  id!: string;
+
+  /** Unique without regard to case. */
+  @Column('text')
+  email!: string;
+
+  @Column('text')
+  name!: string;
+
+  @CreateDateColumn({ name: 'created_at', type: 'timestamptz' })
+  createdAt!: Date;
+}

@@ -1,0 +1,53 @@
+import type { z } from 'zod';
+import type { Fault } from '../../shared/problem';
+
+type Issue = z.core.$ZodIssue;
+type Path = readonly PropertyKey[];
+
+/** RFC 6901. */
+const pointerOf = (path: Path) =>
+  path.map((part) => `/${String(part).replaceAll('~', '~0').replaceAll('/', '~1')}`).join('');
+
+const ownCode = (issue: Issue): string | undefined => {
+  const code: unknown = issue.code === 'custom' ? issue.params?.code : undefined;
+  return typeof code === 'string' ? code : undefined;
+};
+
+const codeOf = (issue: Issue): string => {
+  if (issue.code === 'invalid_type') {
+    if (issue.message.startsWith('Write this decimal as a string')) return 'decimal-must-be-string';
+    return issue.input === undefined && / undefined$/.test(issue.message)
+      ? 'missing'
+      : 'wrong-type';
+  }
+  if (issue.code === 'too_big' || issue.code === 'too_small') return 'out-of-range';
+  return ownCode(issue) ?? 'invalid-value';
+};
+
+/** The branch of a union that the caller meant: the one that got past the outermost type. */
+const meantBranch = (branches: readonly (readonly Issue[])[]) =>
+  branches.find(
+    ([first]) => first && !(first.code === 'invalid_type' && first.path.length === 0),
+  ) ?? branches.find(([first]) => first && codeOf(first) === 'decimal-must-be-string');
+
+function faultsOfIssue(issue: Issue, parents: Path): Fault[] {
+  const path = [...parents, ...issue.path];
+  if (issue.code === 'invalid_union') {
+    const branch = meantBranch(issue.errors);
+    if (branch) return branch.flatMap((inner) => faultsOfIssue(inner, path));
+  }
+  if (issue.code === 'unrecognized_keys') {
+    return issue.keys.map((key) => ({
+      pointer: pointerOf([...path, key]),
+      code: 'unknown-field',
+      detail: 'This operation does not take this field.',
+    }));
+  }
+  return [{ pointer: pointerOf(path), code: codeOf(issue), detail: issue.message }];
+}
+
+const faultsAtMost = 50;
+
+/** What is wrong with a request, field by field, with RFC 6901 pointers; at most 50 faults. */
+export const faultsOf = (error: z.ZodError): Fault[] =>
+  error.issues.flatMap((issue) => faultsOfIssue(issue, [])).slice(0, faultsAtMost);

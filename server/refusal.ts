@@ -1,0 +1,16 @@
+import type { Fault, ProblemName } from '../shared/problem';
+
+/**
+ * A call that is refused for a reason the caller can act on. Services throw it; what it is in HTTP
+ * is known to the edge alone.
+ */
+export class Refusal extends Error {
+  constructor(
+    readonly code: ProblemName,
+    readonly detail?: string,
+    readonly errors?: readonly Fault[],
+  ) {
+    super(detail ?? code);
+    this.name = 'Refusal';
+  }
+}

@@ -1,0 +1,76 @@
+import { z } from 'zod';
+import { limits } from './limits';
+
+const costFormula = 'cost = sum over systems of points × (protons + 1) × digits';
+const unitFormula = `computeUnits = ceil(cost / ${limits.costOfOneUnit})`;
+
+const count = (description: string, example: number) => z.int().meta({ description, example });
+const decimal = (description: string, example: string) =>
+  z.string().meta({ description, example, 'x-unit': '1' });
+
+const decimalRange = (
+  id: string,
+  description: string,
+  { from, to, decimals }: typeof limits.pKa | typeof limits.pH,
+) =>
+  z
+    .strictObject({
+      from: decimal('Smallest value.', from),
+      to: decimal('Greatest value.', to),
+      decimals: count('Decimals at most.', decimals),
+    })
+    .meta({ id, description });
+
+/** Answer of GET /v1/limits. */
+export const limitsAnswer = z
+  .strictObject({
+    bodyBytes: count('Bytes of a request body.', limits.bodyBytes),
+    systems: count('Systems in one call.', limits.systems),
+    protons: count('Protons of one system.', limits.protons),
+    pHPoints: count('pH points in one call.', limits.pHPoints),
+    digits: z
+      .strictObject({
+        from: count('Fewest digits.', limits.digits.from),
+        to: count('Most digits.', limits.digits.to),
+        default: count('Digits where none are asked for.', limits.digits.default),
+      })
+      .meta({ id: 'DigitLimits', description: 'Digits of an answer.' }),
+    pKa: decimalRange('PKaLimits', 'Stepwise constants.', limits.pKa),
+    pH: decimalRange('PHLimits', 'pH values.', limits.pH),
+    cost: z
+      .strictObject({
+        formula: z.string().meta({ description: 'How cost is counted.', example: costFormula }),
+        most: count('Cost of one call with a key.', limits.cost),
+        mostPublic: count('Cost of one public call.', limits.publicCost),
+      })
+      .meta({ id: 'CostLimits', description: 'Work of one call.' }),
+    computeUnits: z
+      .strictObject({
+        formula: z.string().meta({ description: 'How units are counted.', example: unitFormula }),
+        costOfOneUnit: count('Cost of one unit.', limits.costOfOneUnit),
+      })
+      .meta({ id: 'ComputeUnits', description: 'What a call counts.' }),
+    callsPerMinute: z
+      .strictObject({
+        key: count('Calls a minute for each key.', limits.keyedCallsPerMinute),
+        address: count('Public calls a minute from each address.', limits.publicCallsPerMinute),
+      })
+      .meta({ id: 'RateLimits', description: 'How often.' }),
+  })
+  .meta({ id: 'Limits', description: 'What one call may ask for.' });
+
+export type LimitsAnswer = z.infer<typeof limitsAnswer>;
+
+/** The limits as they stand. */
+export const limitsInForce: LimitsAnswer = {
+  bodyBytes: limits.bodyBytes,
+  systems: limits.systems,
+  protons: limits.protons,
+  pHPoints: limits.pHPoints,
+  digits: limits.digits,
+  pKa: limits.pKa,
+  pH: limits.pH,
+  cost: { formula: costFormula, most: limits.cost, mostPublic: limits.publicCost },
+  computeUnits: { formula: unitFormula, costOfOneUnit: limits.costOfOneUnit },
+  callsPerMinute: { key: limits.keyedCallsPerMinute, address: limits.publicCallsPerMinute },
+};
