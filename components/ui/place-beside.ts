@@ -1,0 +1,30 @@
+/** Where a list lies in the window, in px. */
+export interface Placement {
+  readonly left: number;
+  readonly width: number;
+  readonly maxHeight: number;
+  readonly top: number | 'auto';
+  readonly bottom: number | 'auto';
+}
+
+const gap = 4;
+const margin = 8;
+const comfortable = 240;
+
+/** Under the anchor, or over it where there is more room; never out of the window. */
+export function placeBeside(
+  anchor: {
+    readonly left: number;
+    readonly top: number;
+    readonly bottom: number;
+    readonly width: number;
+  },
+  { innerHeight }: { readonly innerHeight: number },
+): Placement {
+  const below = innerHeight - anchor.bottom - gap - margin;
+  const above = anchor.top - gap - margin;
+  const { left, width } = anchor;
+  return below >= Math.min(comfortable, above)
+    ? { left, width, maxHeight: below, top: anchor.bottom + gap, bottom: 'auto' }
+    : { left, width, maxHeight: above, top: 'auto', bottom: innerHeight - anchor.top + gap };
+}
