@@ -1,0 +1,107 @@
+import { spawnSync } from 'node:child_process';
+import { readFileSync } from 'node:fs';
+import path from 'node:path';
+import request from 'supertest';
+import { openApiDocument } from '../../openapi/document';
+import { operations } from '../../server/routes';
+import { startTestServer, type TestServer } from '../support/server';
+
+const root = path.join(__dirname, '../..');
+const committed = readFileSync(path.join(root, 'openapi/openapi.json'), 'utf8');
+
+interface Schema {
+  $ref?: string;
+  type?: string | string[];
+  description?: string;
+  example?: unknown;
+  pattern?: string;
+  properties?: Record<string, Schema>;
+  'x-unit'?: string;
+}
+const document = JSON.parse(committed) as {
+  components: { schemas: Record<string, Schema> };
+};
+
+let server: TestServer;
+beforeAll(async () => {
+  server = await startTestServer();
+});
+afterAll(() => server.close());
+
+test('the committed document is what the operations say', () => {
+  expect(committed).toBe(`${JSON.stringify(openApiDocument(operations), null, 2)}\n`);
+});
+
+test('the service serves the committed document', async () => {
+  const answer = await request(server.url).get('/openapi.json');
+  expect(answer.body).toEqual(document);
+});
+
+test('the document is valid OpenAPI 3.1', () => {
+  const cli = path.join(root, 'node_modules/@redocly/cli/bin/cli.js');
+  const lint = spawnSync(
+    process.execPath,
+    [cli, 'lint', 'openapi/openapi.json', '--extends=spec', '--format=json'],
+    {
+      cwd: root,
+      encoding: 'utf8',
+      env: { ...process.env, REDOCLY_TELEMETRY: 'off', REDOCLY_SUPPRESS_UPDATE_NOTICE: 'true' },
+    },
+  );
+  expect(JSON.parse(lint.stdout)).toMatchObject({ totals: { errors: 0, warnings: 0 } });
+});
+
+const examples = operations.flatMap((operation) =>
+  Object.entries(operation.examples).map(
+    ([name, example]) => [`${operation.operationId} ${name}`, operation, example] as const,
+  ),
+);
+
+test.each(examples)('example %s is what the service answers', async (_name, operation, example) => {
+  const call = request(server.url)[operation.method](operation.path);
+  if (operation.access !== 'public') void call.set('Authorization', `Bearer ${server.key}`);
+  const answer = example.body === undefined ? await call : await call.send(example.body);
+  expect(answer.status).toBe(200);
+  expect(answer.body).toEqual(example.answer);
+  expect(operation.answer.safeParse(answer.body).error).toBeUndefined();
+});
+
+const schemaOf = (schema: Schema): Schema =>
+  schema.$ref === undefined
+    ? schema
+    : { ...document.components.schemas[schema.$ref.split('/').pop() ?? ''], ...schema };
+
+const properties = Object.entries(document.components.schemas).flatMap(
+  ([name, { properties = {} }]) =>
+    Object.entries(properties).map(
+      ([key, property]) => [`${name}.${key}`, schemaOf(property)] as const,
+    ),
+);
+
+test('there are properties to look at', () => {
+  expect(properties.length).toBeGreaterThan(50);
+});
+
+test.each(properties)('%s is described', (_name, schema) => {
+  expect(schema.description).toMatch(/\.$/);
+});
+
+const isPlain = ({ type = [] }: Schema) =>
+  [type].flat().some((one) => ['string', 'integer', 'number', 'boolean'].includes(one));
+
+test.each(properties.filter(([, schema]) => isPlain(schema)))(
+  '%s has an example',
+  (_name, schema) => {
+    expect(schema.example).toBeDefined();
+  },
+);
+
+test('every decimal property names its unit', () => {
+  const decimal = /^-?\d+(\.\d+)?(e[+-]\d+)?$/;
+  const missing = properties.filter(
+    ([, { example, 'x-unit': unit }]) =>
+      unit === undefined &&
+      [example].flat().some((one) => typeof one === 'string' && decimal.test(one)),
+  );
+  expect(missing.map(([name]) => name)).toEqual(['Model.engineVersion']);
+});

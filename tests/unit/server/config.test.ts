@@ -1,0 +1,41 @@
+import { ConfigError, readConfig } from '../../../server/config';
+
+const right = {
+  DATABASE_URL: 'postgresql://stepwell@127.0.0.1/stepwell',
+  KEY_PEPPERS: `1:${'a'.repeat(43)}`,
+};
+
+test('an environment with the least there must be is read with its defaults', () => {
+  expect(readConfig(right)).toMatchObject({
+    environment: 'development',
+    host: '127.0.0.1',
+    port: 8080,
+    publicUrl: 'http://localhost:8080',
+  });
+});
+
+test('an empty variable counts as missing', () => {
+  expect(readConfig({ ...right, PORT: '' }).port).toBe(8080);
+});
+
+test('peppers keep their versions', () => {
+  const pair = `1:${'a'.repeat(43)},2:${'b'.repeat(43)}`;
+  expect([...readConfig({ ...right, KEY_PEPPERS: pair }).keyPeppers.keys()]).toEqual([1, 2]);
+});
+
+const rows: [string, Record<string, string | undefined>, RegExp][] = [
+  ['no database', { DATABASE_URL: undefined }, /DATABASE_URL is missing/],
+  ['a database of another kind', { DATABASE_URL: 'mysql://x' }, /DATABASE_URL: .*postgresql/],
+  ['no pepper', { KEY_PEPPERS: undefined }, /KEY_PEPPERS is missing/],
+  ['a short pepper', { KEY_PEPPERS: '1:abc' }, /KEY_PEPPERS: .*32 bytes/],
+  ['a port in words', { PORT: 'abc' }, /PORT: must be a whole number/],
+  ['a port too high', { PORT: '70000' }, /PORT/],
+  ['another host outside production', { HOST: '0.0.0.0' }, /HOST: .*only in production/],
+  ['production without its address', { NODE_ENV: 'production' }, /PUBLIC_URL is missing.*required/],
+  ['an unknown kind of environment', { NODE_ENV: 'staging' }, /NODE_ENV/],
+];
+test.each(rows)('%s is refused by name and reason', (_name, change, message) => {
+  const read = () => readConfig({ ...right, ...change });
+  expect(read).toThrow(ConfigError);
+  expect(read).toThrow(message);
+});
