@@ -36,9 +36,12 @@ export async function makeDatabase(cluster, secrets) {
   };
 }
 
-/** For tests: a role that may create databases and roles' grants in them, nothing else. */
-export async function makeTestRole(cluster, password) {
+/**
+ * For tests: a role that may create databases, whose address is answered, and beside it the
+ * running server's role with the same password, so that what it may not do can be shown.
+ */
+export async function makeTestRoles(cluster, password) {
   const tester = 'stepwell_test';
-  await cluster.sql(role(tester, password, 'CREATEDB'));
+  await cluster.sql(role(tester, password, 'CREATEDB') + role(appRole, password));
   return cluster.url(tester, password, 'postgres');
 }

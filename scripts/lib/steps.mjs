@@ -24,7 +24,7 @@ export async function step(title, work) {
   let outcome = 'failed';
   try {
     const found = await work();
-    outcome = found ?? 'done';
+    outcome = found || 'done';
     return found;
   } catch (fault) {
     if (stopping.aborted) outcome = 'stopped';

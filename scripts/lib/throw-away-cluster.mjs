@@ -5,7 +5,7 @@ import { join } from 'node:path';
 import { openCluster } from './cluster.mjs';
 import { removePlace } from './cluster-place.mjs';
 import { owns } from './lifetime.mjs';
-import { makeTestRole } from './roles.mjs';
+import { makeTestRoles } from './roles.mjs';
 
 /**
  * A cluster for the tests of one run, on a free port, in a folder that is removed at the end.
@@ -17,5 +17,5 @@ export async function throwAwayCluster() {
   owns({ stop: remove });
   const password = randomBytes(24).toString('base64url');
   const cluster = await openCluster({ place: folder, password, throwAway: true });
-  return { ...cluster, url: await makeTestRole(cluster, password) };
+  return { ...cluster, url: await makeTestRoles(cluster, password) };
 }
