@@ -5,6 +5,7 @@ import type {
   ManyFractionsAnswer,
   PublicFractionsRequestInput,
 } from '../fractions';
+import type { LimitsAnswer } from '../limits-answer';
 import { ProblemError, unreachable } from './problem-error';
 
 export { ProblemError } from './problem-error';
@@ -30,23 +31,24 @@ type FractionsResult<Body> = Body extends { dryRun: true }
  * reach the service is thrown as a `ProblemError`.
  */
 export function createClient({ baseUrl, key }: ClientOptions) {
-  const post = async <Answer>(path: string, body: unknown, { signal }: CallOptions = {}) => {
-    const headers: Record<string, string> = {
-      'Content-Type': 'application/json',
-      Accept: 'application/json',
-    };
-    if (key !== undefined) headers.Authorization = `Bearer ${key}`;
+  const call = async <Answer>(path: string, request: RequestInit, { signal }: CallOptions = {}) => {
+    const headers = new Headers({ Accept: 'application/json' });
+    if (request.body !== undefined) headers.set('Content-Type', 'application/json');
+    if (key !== undefined) headers.set('Authorization', `Bearer ${key}`);
     const response = await fetch(`${baseUrl}${path}`, {
-      method: 'POST',
+      ...request,
       headers,
-      body: JSON.stringify(body),
       signal: signal ?? null,
     }).catch(unreachable);
     if (!response.ok) throw await ProblemError.from(response);
     return (await response.json()) as Answer;
   };
+  const post = <Answer>(path: string, body: unknown, options?: CallOptions) =>
+    call<Answer>(path, { method: 'POST', body: JSON.stringify(body) }, options);
 
   return {
+    /** GET /v1/limits; needs no key. */
+    limits: (options?: CallOptions) => call<LimitsAnswer>('/v1/limits', { method: 'GET' }, options),
     /** POST /v1/fractions; needs a key with scope `compute`. */
     fractions: <Body extends FractionsRequestInput>(body: Body, options?: CallOptions) =>
       post<FractionsResult<Body>>('/v1/fractions', body, options),

@@ -1,0 +1,1 @@
+export { PlacesLayout as default } from '../../components/shell/places-layout';

@@ -1,0 +1,2 @@
+export { ApiScreen as default } from '../../components/notes/api-screen';
+export { RouteError as ErrorBoundary } from '../../components/shell/route-error';

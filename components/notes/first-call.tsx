@@ -1,0 +1,42 @@
+import { View } from 'react-native';
+import * as Clipboard from 'expo-clipboard';
+import { Section } from '../shell/prose';
+import { Button } from '../ui/button';
+import { CodeBlock } from '../ui/code-block';
+import { Numerals } from '../ui/numerals';
+import { useToast } from '../ui/toast';
+import { Words } from '../ui/words';
+
+const call = (origin: string) => `curl ${origin}/v1/fractions \\
+  -H "Authorization: Bearer $STEPWELL_KEY" \\
+  -H "Content-Type: application/json" \\
+  -d '{"system": {"name": "phosphoric acid",
+                  "fullyProtonatedCharge": 0,
+                  "pKa": ["2.148", "7.198", "12.35"]},
+       "pH": "7.4", "digits": 12}'`;
+
+/** A call that works as it is copied, against the service that shows it. */
+export function FirstCall() {
+  const say = useToast();
+  const code = call(window.location.origin);
+  const copy = async () => {
+    await Clipboard.setStringAsync(code);
+    say({ text: 'Call copied' });
+  };
+  return (
+    <Section heading="A first call">
+      <Words>
+        Which forms of phosphate are there at pH <Numerals>7.4</Numerals>? Decimals are strings, in
+        and out: a JSON number would lose digits.
+      </Words>
+      <CodeBlock label="A first call with curl" code={code} />
+      <View style={{ flexDirection: 'row' }}>
+        <Button icon="copy" label="Copy the call" onPress={() => void copy()} />
+      </View>
+      <Words>
+        The answer holds each form’s fraction, the ratios of neighbours, the mean charge, the ranges
+        of predominance, and the model behind them: constants, conditions and engine version.
+      </Words>
+    </Section>
+  );
+}

@@ -1,0 +1,24 @@
+import { Link } from 'expo-router';
+import { Words } from '../ui/words';
+import { Page } from './page';
+import { places } from './places';
+import { Prose } from './prose';
+
+/** An address that leads nowhere. */
+export function NotFound() {
+  return (
+    <Page title="No page at this address">
+      <Prose>
+        <Words>The address may be mistyped, or the page has moved. These are the places:</Words>
+        {places.map((place) => (
+          <Link key={place.href} href={place.href}>
+            <Words kind="button" tone="well">
+              {place.label}
+            </Words>
+            <Words>{` ${place.question}`}</Words>
+          </Link>
+        ))}
+      </Prose>
+    </Page>
+  );
+}
