@@ -1,0 +1,106 @@
+import { useMemo, useState } from 'react';
+import type { Ref } from 'react';
+import { StyleSheet, View } from 'react-native';
+import Svg from 'react-native-svg';
+import type { CursorMove } from '../chart/cursor-keys';
+import { CursorSlider } from '../chart/cursor-slider';
+import { FigureCursor } from '../chart/figure-cursor';
+import { PhAxis } from '../chart/ph-axis';
+import { linearScale } from '../chart/scale';
+import { usePlotDrag } from '../chart/use-plot-drag';
+import { webStyle } from '../ui/web-style';
+import { ChargeLine } from './charge-line';
+import { CursorMarks } from './cursor-marks';
+import type { Layer } from './curves-state';
+import { describeCurve, describeReading } from './describe';
+import type { DrawnCurve } from './drawn-curve';
+import { figureLayout } from './figure-layout';
+import type { Reading } from './follow-curve';
+import { FractionLines } from './fraction-lines';
+import { pHAt, pHEnd, pHStep } from './ph-steps';
+import { PredominanceStair } from './predominance-stair';
+
+interface CurvesFigureProps {
+  readonly drawn: DrawnCurve;
+  readonly reading: Reading;
+  readonly layers: readonly Layer[];
+  readonly width: number;
+  readonly height: number;
+  readonly compact: boolean;
+  /** Conditions, printed under the axis. */
+  readonly caption: string;
+  readonly onMove: (pH: string) => void;
+  readonly ref?: Ref<View>;
+}
+
+/** The layers on one pH axis, with the cursor over all of them. */
+export function CurvesFigure(props: CurvesFigureProps) {
+  const { drawn, reading, layers, width, height, compact, caption, onMove, ref } = props;
+  const { range } = drawn;
+  const layout = useMemo(
+    () => figureLayout({ width, height, layers, compact }),
+    [width, height, layers, compact],
+  );
+  const x = useMemo(() => linearScale(range, [layout.left, layout.right]), [range, layout]);
+  const cursor = x(Number(reading.pH));
+  const placing = useCursorWhenDrawn(drawn, cursor);
+  const drag = usePlotDrag((px) => onMove(pHAt(x.invert(px), range)));
+  const step = (move: CursorMove) =>
+    onMove(
+      'to' in move ? pHEnd(move.to, range) : pHStep(reading.pH, move.by, move.sign, range),
+    );
+  const line = { x: cursor, top: 4, axis: layout.axis, width, text: reading.pH };
+  const shared = { drawn, x, compact, strong: reading.predominant };
+  return (
+    <View style={{ width, height: layout.height }}>
+      <View ref={ref} role="img" aria-label={describeCurve(drawn, reading)}>
+        <Svg width={width} height={layout.height} aria-hidden>
+          {layout.stair && (
+            <PredominanceStair part="stone" rect={layout.stair} reading={reading} drawn={drawn} x={x} />
+          )}
+          {layout.charge && <ChargeLine {...shared} rect={layout.charge} />}
+          {layout.fractions && (
+            <FractionLines {...shared} rect={layout.fractions} cursor={placing} />
+          )}
+          <PhAxis
+            x={x}
+            domain={range}
+            y={layout.axis}
+            titled={!compact}
+            caption={compact ? undefined : caption}
+          />
+          <FigureCursor {...line} part="line" />
+          {layout.stair && (
+            <PredominanceStair part="text" rect={layout.stair} reading={reading} drawn={drawn} x={x} />
+          )}
+          <CursorMarks layout={layout} drawn={drawn} reading={reading} cursor={cursor} />
+          <FigureCursor {...line} part="tab" />
+        </Svg>
+      </View>
+      <View {...drag} style={[StyleSheet.absoluteFill, styles.plot]} />
+      <CursorSlider
+        label="pH cursor"
+        x={cursor}
+        axis={layout.axis}
+        width={width}
+        min={range[0]}
+        max={range[1]}
+        now={Number(reading.pH)}
+        text={describeReading(drawn, reading)}
+        onKey={step}
+      />
+    </View>
+  );
+}
+
+/** Where the cursor stood when this curve first came. */
+function useCursorWhenDrawn(drawn: DrawnCurve, cursor: number): number {
+  const [placed, setPlaced] = useState({ drawn, cursor });
+  if (placed.drawn === drawn) return placed.cursor;
+  setPlaced({ drawn, cursor });
+  return cursor;
+}
+
+const styles = StyleSheet.create({
+  plot: webStyle({ touchAction: 'pan-y', cursor: 'ew-resize', userSelect: 'none' }),
+});

@@ -1,0 +1,85 @@
+import { memo, useMemo } from 'react';
+import { CurveNames, nameHeight, nameSize } from '../chart/curve-names';
+import type { Rect } from '../chart/geometry';
+import { bottom } from '../chart/geometry';
+import { linePath } from '../chart/line-path';
+import { PanelFrame } from '../chart/panel-frame';
+import { placeNames } from '../chart/place-names';
+import type { Scale } from '../chart/scale';
+import { linearScale } from '../chart/scale';
+import { SeriesLine } from '../chart/series-line';
+import { alphaSign } from '../chart/symbols';
+import { formulaWidth } from '../chart/text-width';
+import { useTheme } from '../ui/theme';
+import type { DrawnCurve } from './drawn-curve';
+
+export const alphaScale = (rect: Rect) => linearScale([0, 1], [bottom(rect), rect.y]);
+
+/** Below this the pen is lifted: no bundle of dashes on the zero line. */
+const penDown = 0.003;
+/** Room above the line α = 1 where names may stand, px. */
+const headroom = 24;
+
+interface FractionLinesProps {
+  readonly drawn: DrawnCurve;
+  readonly rect: Rect;
+  readonly x: Scale;
+  readonly strong: number;
+  /** Where the cursor stood when the curve came, px: names keep out of its way. */
+  readonly cursor: number;
+  readonly compact: boolean;
+}
+
+/** The fraction of each form over pH, with its name at the curve. */
+export const FractionLines = memo(function FractionLines(props: FractionLinesProps) {
+  const { drawn, rect, x, strong, cursor, compact } = props;
+  const { series } = useTheme();
+  const lines = useMemo(() => {
+    const y = alphaScale(rect);
+    return drawn.shown.map((index) => {
+      const points = (drawn.curve.fractions[index] ?? []).map((alpha, i) => ({
+        x: x(drawn.curve.pH[i] ?? 0),
+        y: y(alpha),
+        drawn: alpha >= penDown,
+      }));
+      return { index, points, d: linePath(points) };
+    });
+  }, [drawn, rect, x]);
+  const names = useMemo(
+    () =>
+      placeNames(
+        lines.map(({ index, points }) => ({
+          key: index,
+          width: formulaWidth(drawn.formulas[index] ?? '', nameSize),
+          height: nameHeight,
+          points,
+        })),
+        {
+          bounds: { ...rect, y: rect.y - headroom, height: rect.height + headroom },
+          zero: bottom(rect),
+          cursor,
+        },
+      ),
+    [lines, drawn, rect, cursor],
+  );
+  return (
+    <>
+      <PanelFrame
+        rect={rect}
+        y={alphaScale(rect)}
+        inside={compact}
+        headRise={30}
+        head={compact ? undefined : <>{alphaSign} fraction of each form</>}
+        lines={(compact ? [0, 0.5, 1] : [0, 0.25, 0.5, 0.75, 1]).map((value) => ({
+          value,
+          label: String(value),
+          kind: value === 0 ? 'axis' : value === 1 ? 'bound' : 'grid',
+        }))}
+      />
+      {lines.map(({ index, d }) => (
+        <SeriesLine key={index} d={d} style={series(index)} strong={index === strong} />
+      ))}
+      <CurveNames names={names} formulas={drawn.formulas} strong={strong} />
+    </>
+  );
+});

@@ -1,0 +1,109 @@
+import { systemInFull } from '../../shared/system';
+import type { Choice, CurvesState, Layer } from './curves-state';
+import { exampleOf, firstState, layers, systemOf, views } from './curves-state';
+import { rangeOf } from './curve-grid';
+import { pHWithin, typedPH } from './ph-steps';
+import { wellFormed } from './well-formed';
+
+/** Form encoding, with the commas of lists left readable. */
+const encode = (text: string) =>
+  encodeURIComponent(wellFormed(text)).replace(/%20/g, '+').replace(/%2C/g, ',');
+
+const choicePairs = (choice: Choice): [string, string | undefined][] =>
+  choice.kind === 'example'
+    ? [['system', choice.id]]
+    : [
+        ['name', choice.system.name],
+        ['charge', String(choice.system.fullyProtonatedCharge)],
+        ['pKa', choice.system.pKa.join(',')],
+      ];
+
+/** The state as an address's fragment, without the `#`; what is as on a first visit is left out. */
+export function formatFragment({ choice, pH, layers: shown, view }: CurvesState): string {
+  const pairs = [
+    ...choicePairs(choice),
+    ['pH', pH],
+    ['layers', shown.length < layers.length ? shown.join(',') : undefined],
+    ['view', view === firstState.view ? undefined : view],
+  ] as const;
+  return pairs
+    .flatMap(([key, value]) => (value === undefined ? [] : [`${key}=${encode(value)}`]))
+    .join('&');
+}
+
+/** What a fragment asks for. `faulty` where a part of it could not be used. */
+export interface ReadFragment {
+  readonly state: CurvesState;
+  readonly faulty: boolean;
+}
+
+/**
+ * Reads a fragment. What it leaves out is as on a first visit; so is, part by part, whatever in it
+ * cannot be used, and `faulty` says so: an address is never a reason to show nothing.
+ */
+export function parseFragment(fragment: string): ReadFragment {
+  const { values, faulty: broken } = readPairs(fragment.replace(/^#/, ''));
+  const choice = readChoice(values);
+  const drawn = choice === 'unusable' ? firstState.choice : choice;
+  const range = rangeOf(systemOf(drawn).pKa);
+  const typed = typedPH(values.get('pH') ?? pHWithin(firstState.pH, range), range);
+  const shown = readLayers(values.get('layers'));
+  const view = views.find((name) => name === (values.get('view') ?? firstState.view));
+  return {
+    state: {
+      choice: drawn,
+      pH: typed.ok ? typed.pH : pHWithin(firstState.pH, range),
+      layers: shown ?? layers,
+      view: view ?? firstState.view,
+    },
+    faulty: broken || choice === 'unusable' || !typed.ok || !shown || !view,
+  };
+}
+
+const keys = new Set(['system', 'name', 'charge', 'pKa', 'pH', 'layers', 'view']);
+
+function readPairs(text: string) {
+  const values = new Map<string, string>();
+  let faulty = false;
+  for (const pair of text === '' ? [] : text.split('&')) {
+    const [key = '', ...rest] = pair.split('=');
+    const value = decode(rest.join('='));
+    if (value === undefined || !keys.has(key) || values.has(key)) faulty = true;
+    else values.set(key, value);
+  }
+  return { values, faulty };
+}
+
+/** Undoes `encode`; undefined for a broken escape. */
+function decode(text: string): string | undefined {
+  try {
+    return decodeURIComponent(text.replace(/\+/g, '%20'));
+  } catch {
+    return undefined;
+  }
+}
+
+function readChoice(values: ReadonlyMap<string, string>): Choice | 'unusable' {
+  const id = values.get('system');
+  const charge = values.get('charge');
+  const pKa = values.get('pKa');
+  const typed = charge !== undefined || pKa !== undefined || values.has('name');
+  if (id !== undefined) {
+    const choice = { kind: 'example', id } as const;
+    return typed || !exampleOf(choice) ? 'unusable' : choice;
+  }
+  if (!typed) return firstState.choice;
+  const system = systemInFull.safeParse({
+    name: values.get('name'),
+    fullyProtonatedCharge: /^-?\d+$/.test(charge ?? '') ? Number(charge) : undefined,
+    pKa: pKa?.split(','),
+  });
+  return system.success ? { kind: 'typed', system: system.data } : 'unusable';
+}
+
+function readLayers(text: string | undefined): readonly Layer[] | undefined {
+  if (text === undefined) return layers;
+  const asked = text === '' ? [] : text.split(',');
+  const known = layers.filter((layer) => asked.includes(layer));
+  return known.length === asked.length ? known : undefined;
+}

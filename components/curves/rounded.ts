@@ -1,0 +1,41 @@
+import { Exact } from '../../shared/decimal';
+
+const decimals = 3;
+const smallest = new Exact(10).pow(-decimals);
+const rareDigits = 2;
+
+/**
+ * A fraction as it is read on a screen: three decimals, below 10⁻³ two digits with an exponent
+ * (`0.614`, `2.2e-6`).
+ */
+export function shownFraction(fraction: string): string {
+  const value = new Exact(fraction);
+  return value.isZero() || value.greaterThanOrEqualTo(smallest)
+    ? value.toFixed(decimals)
+    : value.toExponential(rareDigits - 1);
+}
+
+/** A charge to two decimals, without a negative zero. */
+export function shownCharge(charge: string): string {
+  const text = new Exact(charge).toFixed(2);
+  return Number(text) === 0 ? text.replace('-', '') : text;
+}
+
+/** A ratio to three digits, with an exponent from 10⁴ on and below 10⁻³. */
+export function shownRatio(ratio: string): string {
+  const value = new Exact(ratio).toSignificantDigits(3);
+  return value.isZero() || (value.lessThan(10_000) && value.greaterThanOrEqualTo(smallest))
+    ? value.toPrecision(3)
+    : value.toExponential(2);
+}
+
+/** A constant as given where it has up to three decimals, else to three. */
+export function shownConstant(pKa: string): string {
+  const value = new Exact(pKa);
+  return value.decimalPlaces() <= decimals && !/e/i.test(pKa) && pKa.length <= 8
+    ? pKa
+    : value.toFixed(decimals);
+}
+
+/** A number with a true minus, for words and drawings. */
+export const trueMinus = (text: string) => text.replace(/-(?=\d)/g, '\u2212');
