@@ -10,10 +10,15 @@ import { Words } from '../ui/words';
 const call = (origin: string) => `curl ${origin}/v1/fractions \\
   -H "Authorization: Bearer $STEPWELL_KEY" \\
   -H "Content-Type: application/json" \\
-  -d '{"system": {"name": "phosphoric acid",
-                  "fullyProtonatedCharge": 0,
-                  "pKa": ["2.148", "7.198", "12.35"]},
-       "pH": "7.4", "digits": 12}'`;
+  -d '{
+    "system": {
+      "name": "phosphoric acid",
+      "fullyProtonatedCharge": 0,
+      "pKa": ["2.148", "7.198", "12.35"]
+    },
+    "pH": "7.4",
+    "digits": 12
+  }'`;
 
 /** A call that works as it is copied, against the service that shows it. */
 export function FirstCall() {

@@ -1,4 +1,4 @@
-import { scopes, type Scope } from '../../shared/scopes';
+import type { Scope } from '../../shared/scopes';
 import { Section } from '../shell/prose';
 import { DataTable } from '../ui/data-table';
 import { Numerals } from '../ui/numerals';
@@ -30,9 +30,9 @@ export function Keys() {
           { key: 'scope', head: 'Scope' },
           { key: 'opens', head: 'Opens' },
         ]}
-        rows={scopes.map((scope) => ({
+        rows={Object.entries(opens).map(([scope, what]) => ({
           scope: <Numerals size={14}>{scope}</Numerals>,
-          opens: opens[scope],
+          opens: what,
         }))}
       />
     </Section>

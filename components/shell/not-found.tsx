@@ -1,4 +1,6 @@
 import { Link } from 'expo-router';
+import { View } from 'react-native';
+import { space } from '../ui/theme';
 import { Words } from '../ui/words';
 import { Page } from './page';
 import { places } from './places';
@@ -9,15 +11,17 @@ export function NotFound() {
   return (
     <Page title="No page at this address">
       <Prose>
-        <Words>The address may be mistyped, or the page has moved. These are the places:</Words>
-        {places.map((place) => (
-          <Link key={place.href} href={place.href}>
-            <Words kind="button" tone="well">
-              {place.label}
-            </Words>
-            <Words>{` ${place.question}`}</Words>
-          </Link>
-        ))}
+        <View style={{ gap: space[3] }}>
+          <Words>The address may be mistyped, or the page has moved. These are the places:</Words>
+          {places.map((place) => (
+            <Link key={place.href} href={place.href}>
+              <Words kind="button" tone="well">
+                {place.label}
+              </Words>
+              <Words>{` ${place.question}`}</Words>
+            </Link>
+          ))}
+        </View>
       </Prose>
     </Page>
   );

@@ -1,6 +1,6 @@
 import { Link, usePathname } from 'expo-router';
-import type { ReactNode } from 'react';
-import { Pressable, type StyleProp, type ViewStyle } from 'react-native';
+import { useState, type ReactNode } from 'react';
+import { Pressable, StyleSheet, type StyleProp, type ViewStyle } from 'react-native';
 import { softColour } from '../ui/web-style';
 import type { Place } from './places';
 
@@ -13,12 +13,16 @@ interface PlaceLinkProps {
 /** The way to a place; says when it is the one on screen. */
 export function PlaceLink({ place, style, children }: PlaceLinkProps) {
   const current = usePathname() === place.href;
+  const [hovered, setHovered] = useState(false);
   return (
     <Link href={place.href} asChild>
       <Pressable
         role="link"
         aria-current={current ? 'page' : undefined}
-        style={({ hovered }) => [softColour, style({ current, hovered })]}
+        onHoverIn={() => setHovered(true)}
+        onHoverOut={() => setHovered(false)}
+        // Link merges styles as plain objects: a function or a list would be lost.
+        style={StyleSheet.flatten([softColour, style({ current, hovered })])}
       >
         {children(current)}
       </Pressable>

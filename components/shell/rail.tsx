@@ -16,6 +16,8 @@ export function Rail() {
   const { readOutAside: wide } = useLayout();
   return (
     <View
+      role="navigation"
+      aria-label="Places"
       style={[
         styles.rail,
         { width: wide ? widths.wide : widths.narrow, borderRightColor: colours.rule },
@@ -25,33 +27,31 @@ export function Rail() {
         <Mark size={28} />
         {wide && <Words kind="section">Stepwell</Words>}
       </View>
-      <View role="navigation" aria-label="Places">
-        {places.map((place) => (
-          <PlaceLink
-            key={place.href}
-            place={place}
-            style={({ current, hovered }) => [
-              styles.place,
-              wide ? styles.placeWide : styles.placeNarrow,
-              { borderBottomColor: current ? colours.well : 'transparent' },
-              hovered && !current && { backgroundColor: colours.raised },
-            ]}
-          >
-            {(current) =>
-              wide ? (
-                <WidePlace place={place} current={current} />
-              ) : (
-                <>
-                  <Icon name={place.icon} size={24} tone={current ? 'well' : 'inkSoft'} />
-                  <Words kind="help" tone={current ? 'well' : 'inkSoft'}>
-                    {place.label}
-                  </Words>
-                </>
-              )
-            }
-          </PlaceLink>
-        ))}
-      </View>
+      {places.map((place) => (
+        <PlaceLink
+          key={place.href}
+          place={place}
+          style={({ current, hovered }) => [
+            styles.place,
+            wide ? styles.placeWide : styles.placeNarrow,
+            { borderBottomColor: current ? colours.well : 'transparent' },
+            hovered && !current && { backgroundColor: colours.raised },
+          ]}
+        >
+          {(current) =>
+            wide ? (
+              <WidePlace place={place} current={current} />
+            ) : (
+              <>
+                <Icon name={place.icon} size={24} tone={current ? 'well' : 'inkSoft'} />
+                <Words kind="help" tone={current ? 'well' : 'inkSoft'}>
+                  {place.label}
+                </Words>
+              </>
+            )
+          }
+        </PlaceLink>
+      ))}
     </View>
   );
 }

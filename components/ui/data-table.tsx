@@ -32,10 +32,13 @@ interface DataTableProps {
 export function DataTable({ caption, columns, rows, maxHeight, hideCaption }: DataTableProps) {
   const { colours } = useTheme();
   const { rail } = useLayout();
+  // The outer cells end where the table ends: figures stand on the edge of their column of text.
   const cell = (column: Column): React.CSSProperties => ({
     textAlign: column.numeric ? 'right' : 'left',
-    height: rail ? 29 : 40,
-    paddingInline: space[2],
+    height: rail ? 32 : 40,
+    paddingBlock: 0,
+    paddingLeft: column === columns[0] ? 0 : space[2],
+    paddingRight: column === columns.at(-1) ? 0 : space[2],
     borderBottom: `1px solid ${colours.rule}`,
     whiteSpace: column.numeric ? 'nowrap' : undefined,
   });
@@ -50,7 +53,10 @@ export function DataTable({ caption, columns, rows, maxHeight, hideCaption }: Da
   return (
     <ScrollBox label={caption} maxHeight={maxHeight}>
       <table style={{ borderCollapse: 'separate', borderSpacing: 0, width: '100%' }}>
-        <caption className={hideCaption ? 'only-said' : undefined} style={{ textAlign: 'left' }}>
+        <caption
+          className={hideCaption ? 'only-said' : undefined}
+          style={{ textAlign: 'left', paddingBottom: space[1] }}
+        >
           <Words kind="help">{caption}</Words>
         </caption>
         <thead>

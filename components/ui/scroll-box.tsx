@@ -33,7 +33,8 @@ export function ScrollBox({ label, maxHeight, children }: ScrollBoxProps) {
   return (
     <View
       ref={box}
-      role={overflows ? 'region' : undefined}
+      // Not region: react-native-web would make another element of it and lose the one observed.
+      role={overflows ? 'group' : undefined}
       aria-label={overflows ? label : undefined}
       tabIndex={overflows ? 0 : undefined}
       style={webStyle({ overflow: 'auto', maxWidth: '100%', maxHeight })}

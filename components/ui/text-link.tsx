@@ -1,5 +1,6 @@
 import { StyleSheet, Text } from 'react-native';
 import { fonts, useTheme } from './theme';
+import { webStyle } from './web-style';
 
 interface TextLinkProps {
   /** An address outside the app's own places, such as `/docs`. */
@@ -18,5 +19,10 @@ export function TextLink({ href, children }: TextLinkProps) {
 }
 
 const styles = StyleSheet.create({
-  link: { fontFamily: fonts.words, textDecorationLine: 'underline' },
+  link: {
+    fontFamily: fonts.words,
+    textDecorationLine: 'underline',
+    // A space that ends a line is not underlined.
+    ...webStyle({ whiteSpace: 'normal' }),
+  },
 });
