@@ -2,7 +2,8 @@ import { existsSync } from 'node:fs';
 import { mkdir, readdir, rename, rm } from 'node:fs/promises';
 import { join } from 'node:path';
 import { precompress } from './compress.mjs';
-import { inLocal, inRoot } from './paths.mjs';
+import { expoCli, expoEnvironment } from './expo.mjs';
+import { inRoot } from './paths.mjs';
 import { runNode } from './run.mjs';
 import { contentHash, stamp } from './stamp.mjs';
 
@@ -12,20 +13,9 @@ const serverInputs = ['server', 'shared', 'openapi', 'package-lock.json', 'scrip
 const webInputs = [
   ...['app', 'components', 'shared', 'assets', 'public', 'scripts/fonts.mjs', 'package-lock.json'],
   ...['app.json', 'babel.config.js', 'metro.config.js', 'tsconfig.json'],
-  ...['scripts/lib/build.mjs', 'scripts/lib/compress.mjs'],
+  ...['scripts/lib/build.mjs', 'scripts/lib/compress.mjs', 'scripts/lib/expo.mjs'],
 ];
 const generated = ['public/fonts'];
-
-/** Metro's and Expo's caches in /tmp and $HOME would be one user's and lock the next one out. */
-const exportEnvironment = () => ({
-  ...process.env,
-  NODE_ENV: 'production',
-  CI: '1',
-  EXPO_OFFLINE: '1',
-  EXPO_NO_TELEMETRY: '1',
-  TMPDIR: inLocal('cache'),
-  __UNSAFE_EXPO_HOME_DIRECTORY: inLocal('cache', 'expo'),
-});
 
 /**
  * Builds beside what is there and then puts it in its place, so that a build that fails or is cut
@@ -69,12 +59,10 @@ export const buildServer = () =>
 /** The web app to `dist/web`: fonts, Metro's bundle, and both compressed forms of every text. */
 export const buildWeb = () =>
   built('web', contentHash(webInputs, generated), async (next) => {
-    const env = exportEnvironment();
-    await mkdir(env.TMPDIR, { recursive: true });
+    const env = { ...expoEnvironment('production'), CI: '1' };
     if (existsSync(inRoot('scripts/fonts.mjs'))) await runNode(['scripts/fonts.mjs'], { env });
     const output = join(next, 'web');
-    const expo = inRoot('node_modules/expo/bin/cli');
-    await runNode([expo, 'export', '--platform', 'web', '--output-dir', output], {
+    await runNode([expoCli, 'export', '--platform', 'web', '--output-dir', output], {
       env,
       title: 'expo export',
     });

@@ -9,9 +9,10 @@ const started = [];
 
 /**
  * Notes something that was started: `stop` ends it cleanly, `kill` ends it this instant and
- * synchronously. What was started last is stopped first. Answers a function that forgets it.
+ * synchronously; either may be missing. What was started last is stopped first. Answers a
+ * function that forgets it.
  */
-export function owns({ stop, kill }) {
+export function owns({ stop = async () => {}, kill = () => {} }) {
   const entry = { stop, kill };
   started.push(entry);
   return () => {
@@ -41,7 +42,7 @@ function listenForSignals() {
       first = Date.now();
       controller.abort(new Interrupted());
     } else if (Date.now() - first > sameKeyPress) {
-      for (const { kill } of started.reverse()) kill?.();
+      for (const { kill } of started.reverse()) kill();
       process.exit(130);
     }
   };

@@ -1,6 +1,5 @@
 import { inRoot } from './paths.mjs';
 import { runNode } from './run.mjs';
-import { demoKeyFile } from './server-environment.mjs';
 import { step } from './steps.mjs';
 
 const lastLine = (output) => output.trim().split('\n').at(-1);
