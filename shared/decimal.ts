@@ -17,22 +17,21 @@ const exponentWithin = (value: string) => {
   return exponent === undefined || Math.abs(Number(exponent)) <= decimalExponent;
 };
 
-const form = `Write a decimal string such as "7.40" or "1.5e-3", at most ${decimalLongest} characters.`;
+const form = `Write a decimal string such as "7.40" or "1.5e-3": at most ${decimalLongest} characters, the exponent within ±${decimalExponent}.`;
+const asString = 'Write this decimal as a string: a JSON number would lose digits silently.';
+
+/** Our codes for what zod finds wrong with a decimal, by its message. */
+export const decimalFaults: ReadonlyMap<string, string> = new Map([
+  [form, 'not-a-decimal'],
+  [asString, 'decimal-must-be-string'],
+]);
 
 /** A decimal as callers send it. Codes: `decimal-must-be-string`, `not-a-decimal`. */
 export const decimalString = z
-  .string({
-    error: (issue) =>
-      typeof issue.input === 'number'
-        ? 'Write this decimal as a string: a JSON number would lose digits silently.'
-        : form,
-  })
-  .max(decimalLongest, form)
-  .regex(decimalPattern, form)
-  .refine(
-    exponentWithin,
-    `The exponent must lie between −${decimalExponent} and ${decimalExponent}.`,
-  );
+  .string({ error: ({ input }) => (typeof input === 'number' ? asString : form) })
+  .max(decimalLongest, { error: form, abort: true })
+  .regex(decimalPattern, { error: form, abort: true })
+  .refine(exponentWithin, { error: form, abort: true });
 
 interface Range {
   readonly from: string;
@@ -43,8 +42,6 @@ interface Range {
 /** A decimal within a closed range and with a bounded number of places. Code: `out-of-range`. */
 export const decimalWithin = ({ from, to, decimals }: Range) =>
   decimalString.superRefine((value, context) => {
-    if (!decimalPattern.test(value) || value.length > decimalLongest || !exponentWithin(value))
-      return;
     const number = new Exact(value);
     if (number.lessThan(from) || number.greaterThan(to) || number.decimalPlaces() > decimals) {
       context.addIssue({

@@ -20,7 +20,10 @@ const dryRun = z.boolean().default(false).meta({
   example: false,
 });
 
-const pH = pHInput.meta({ description: 'Where to answer: one pH, a list, or an even grid.' });
+const pH = pHInput.meta({
+  description: 'Where to answer: one pH, a list, or an even grid.',
+  'x-unit': '1',
+});
 
 /** Body of POST /v1/fractions: one system or up to 100, never both. */
 export const fractionsRequest = z

@@ -50,7 +50,7 @@ export async function bearerOf(
   if (!found.ok) {
     throw challenge(response, ', error="invalid_token"', new Refusal(...refused[found.reason]));
   }
-  request.log.setBindings({ key: found.caller.publicId });
+  response.log.setBindings({ key: found.caller.publicId });
   if (!found.caller.scopes.has(scope)) {
     throw challenge(
       response,

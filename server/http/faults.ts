@@ -1,4 +1,5 @@
 import type { z } from 'zod';
+import { decimalFaults } from '../../shared/decimal';
 import type { Fault } from '../../shared/problem';
 
 type Issue = z.core.$ZodIssue;
@@ -13,15 +14,16 @@ const ownCode = (issue: Issue): string | undefined => {
   return typeof code === 'string' ? code : undefined;
 };
 
+const isMissing = ({ code, input }: Issue) =>
+  input === undefined && (code === 'invalid_type' || code === 'invalid_union');
+
 const codeOf = (issue: Issue): string => {
-  if (issue.code === 'invalid_type') {
-    if (issue.message.startsWith('Write this decimal as a string')) return 'decimal-must-be-string';
-    return issue.input === undefined && / undefined$/.test(issue.message)
-      ? 'missing'
-      : 'wrong-type';
-  }
   if (issue.code === 'too_big' || issue.code === 'too_small') return 'out-of-range';
-  return ownCode(issue) ?? 'invalid-value';
+  return (
+    decimalFaults.get(issue.message) ??
+    ownCode(issue) ??
+    (issue.code === 'invalid_type' ? 'wrong-type' : 'invalid-value')
+  );
 };
 
 /** The branch of a union that the caller meant: the one that got past the outermost type. */
@@ -32,6 +34,9 @@ const meantBranch = (branches: readonly (readonly Issue[])[]) =>
 
 function faultsOfIssue(issue: Issue, parents: Path): Fault[] {
   const path = [...parents, ...issue.path];
+  if (isMissing(issue)) {
+    return [{ pointer: pointerOf(path), code: 'missing', detail: 'This field is needed.' }];
+  }
   if (issue.code === 'invalid_union') {
     const branch = meantBranch(issue.errors);
     if (branch) return branch.flatMap((inner) => faultsOfIssue(inner, path));
@@ -48,6 +53,9 @@ function faultsOfIssue(issue: Issue, parents: Path): Fault[] {
 
 const faultsAtMost = 50;
 
-/** What is wrong with a request, field by field, with RFC 6901 pointers; at most 50 faults. */
+/**
+ * What is wrong with a request, field by field, with RFC 6901 pointers; at most 50 faults. The error
+ * must have been made with `reportInput`.
+ */
 export const faultsOf = (error: z.ZodError): Fault[] =>
   error.issues.flatMap((issue) => faultsOfIssue(issue, [])).slice(0, faultsAtMost);

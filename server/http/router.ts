@@ -41,7 +41,7 @@ function readBody(operation: Operation, request: Request): unknown {
     throw new Refusal('invalid-request', `This takes no query parameter ${unknown.slice(0, 80)}.`);
   }
   if (operation.body === undefined) return undefined;
-  const parsed = operation.body.safeParse(request.body);
+  const parsed = operation.body.safeParse(request.body, { reportInput: true });
   if (parsed.success) return parsed.data;
   const errors = faultsOf(parsed.error);
   const detail =

@@ -25,7 +25,7 @@ const wrongBodies: [name: string, body: unknown, fault: string][] = [
     { system, pH: { from: '0', to: '1', step: 0.1 } },
     '/pH/step decimal-must-be-string',
   ],
-  ['a decimal comma', { system, pH: '7,4' }, '/pH invalid-value'],
+  ['a decimal comma', { system, pH: '7,4' }, '/pH not-a-decimal'],
   ['a pH out of range', { system, pH: '41' }, '/pH out-of-range'],
   [
     'a constant out of range',

@@ -1,4 +1,5 @@
 import { spawnSync } from 'node:child_process';
+import path from 'node:path';
 import request from 'supertest';
 import { problemTypes } from '../../shared/problem';
 import { limitsInForce } from '../../shared/limits-answer';
@@ -31,16 +32,19 @@ test('while the database is away the process lives, is not ready, calls are a 50
     ]);
     return [livez.status, readyz.status, fractions.status];
   };
-  await hand.query(`ALTER DATABASE ${name} CONNECTION LIMIT 0`);
-  await hand.query(
-    `SELECT pg_terminate_backend(pid) FROM pg_stat_activity
-     WHERE datname = current_database() AND pid <> pg_backend_pid()`,
-  );
-  expect(await statuses()).toEqual([200, 503, 503]);
-  await hand.query(`ALTER DATABASE ${name} CONNECTION LIMIT -1`);
-  expect(await statuses()).toEqual([200, 200, 200]);
-  await hand.release();
-  await away.close();
+  try {
+    await hand.query(`ALTER DATABASE ${name} CONNECTION LIMIT 0`);
+    await hand.query(
+      `SELECT pg_terminate_backend(pid) FROM pg_stat_activity
+       WHERE datname = current_database() AND pid <> pg_backend_pid()`,
+    );
+    expect(await statuses()).toEqual([200, 503, 503]);
+    await hand.query(`ALTER DATABASE ${name} CONNECTION LIMIT -1`);
+    expect(await statuses()).toEqual([200, 200, 200]);
+  } finally {
+    await hand.release();
+    await away.close();
+  }
 });
 
 test('the limits published are those in force', async () => {
@@ -120,8 +124,14 @@ test('two processes share the count of calls', async () => {
 
 test('a wrong environment stops the start with its name and reason', () => {
   const started = spawnSync(process.execPath, ['--import', 'tsx', 'server/index.ts'], {
+    cwd: path.join(__dirname, '../..'),
     encoding: 'utf8',
-    env: { PATH: process.env.PATH, PORT: 'eighty', DATABASE_URL: 'postgresql://x' },
+    env: {
+      PATH: process.env.PATH,
+      PORT: 'eighty',
+      TSX_TSCONFIG_PATH: 'server/tsconfig.json',
+      DATABASE_URL: 'postgresql://x',
+    },
   });
   expect(started.status).toBe(1);
   expect(started.stderr).toMatch(/PORT: must be a whole number/);

@@ -15,6 +15,7 @@ export interface TestServer {
   /** A good key with the scope `compute`. */
   readonly key: string;
   readonly keys: KeyService;
+  /** The database, as its owner. */
   readonly database: DataSource;
   /** Every log line so far. */
   readonly logs: readonly string[];
@@ -27,13 +28,13 @@ export const testPublicUrl = 'http://stepwell.test';
 
 /** A migrated and seeded database of its own, and a real server on a free port. */
 export async function startTestServer({ withApp = false } = {}): Promise<TestServer> {
-  const { url: databaseUrl, drop } = await createTestDatabase();
+  const { url, appUrl, appRole, drop } = await createTestDatabase();
   const config: Config = {
     environment: 'test',
     host: '127.0.0.1',
     port: 0,
     publicUrl: testPublicUrl,
-    databaseUrl,
+    databaseUrl: appUrl,
     keyPeppers: new Map([[1, randomBytes(32)]]),
     webRoot: withApp ? process.env.WEB_ROOT : undefined,
     logLevel: 'info',
@@ -46,8 +47,8 @@ export async function startTestServer({ withApp = false } = {}): Promise<TestSer
       done();
     },
   });
-  const database = await createDataSource(databaseUrl).initialize();
-  await migrate(database);
+  const database = await createDataSource(url).initialize();
+  await migrate(database, appRole);
   await seedDemo(database);
   const keys = new KeyService(database, config.keyPeppers);
   const key = await demoKeyFor(keys, undefined);
