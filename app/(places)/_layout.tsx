@@ -1,1 +1,4 @@
-export { PlacesLayout as default } from '../../components/shell/places-layout';
+export {
+  PlacesLayout as default,
+  placesSettings as unstable_settings,
+} from '../../components/shell/places-layout';

@@ -1,2 +1,1 @@
 export { CurvesScreen as default } from '../../components/curves/curves-screen';
-export { RouteError as ErrorBoundary } from '../../components/shell/route-error';

@@ -16,8 +16,8 @@ export function Digits() {
       </Words>
       <Words>
         A constant known to ±<Numerals>0.01</Numerals> leaves a ratio of neighbouring forms
-        uncertain by <Numerals>2.3</Numerals> %, one known to ±<Numerals>0.05</Numerals> by{' '}
-        <Numerals>12</Numerals> %. So the screen shows three digits or so of a fraction{' '}
+        uncertain by <Numerals>2.3</Numerals>&nbsp;%, one known to ±<Numerals>0.05</Numerals> by{' '}
+        <Numerals>12</Numerals>&nbsp;%. So the screen shows three digits or so of a fraction{' '}
         <Quantity of="alpha" />, and copying gives them all.
       </Words>
     </Section>

@@ -1,6 +1,6 @@
 import { Link, usePathname } from 'expo-router';
 import { useState, type ReactNode } from 'react';
-import { Pressable, StyleSheet, type StyleProp, type ViewStyle } from 'react-native';
+import { StyleSheet, View, type StyleProp, type ViewStyle } from 'react-native';
 import { softColour } from '../ui/web-style';
 import type { Place } from './places';
 
@@ -10,22 +10,22 @@ interface PlaceLinkProps {
   readonly children: (current: boolean) => ReactNode;
 }
 
-/** The way to a place; says when it is the one on screen. */
+/** The way to the top of a place; says when it is the one on screen. */
 export function PlaceLink({ place, style, children }: PlaceLinkProps) {
   const current = usePathname() === place.href;
   const [hovered, setHovered] = useState(false);
   return (
-    <Link href={place.href} asChild>
-      <Pressable
-        role="link"
+    <Link href={place.href} asChild onPress={() => window.scrollTo(0, 0)}>
+      {/* A view, not a Pressable, whose own onClick would take the place of the link's. */}
+      <View
         aria-current={current ? 'page' : undefined}
-        onHoverIn={() => setHovered(true)}
-        onHoverOut={() => setHovered(false)}
-        // Link merges styles as plain objects: a function or a list would be lost.
+        onMouseEnter={() => setHovered(true)}
+        onMouseLeave={() => setHovered(false)}
+        // Link merges styles as plain objects: a list would be lost.
         style={StyleSheet.flatten([softColour, style({ current, hovered })])}
       >
         {children(current)}
-      </Pressable>
+      </View>
     </Link>
   );
 }

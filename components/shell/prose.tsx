@@ -31,7 +31,7 @@ const styles = StyleSheet.create({
     gap: space[8],
     flexGrow: 1,
     flexShrink: 1,
-    ...webStyle({ flexBasis: 400, maxWidth: 520, minWidth: 0 }),
+    ...webStyle({ flexBasis: 400, maxWidth: 480, minWidth: 0 }),
   },
   section: { gap: space[3] },
 });

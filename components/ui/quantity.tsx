@@ -2,6 +2,7 @@ import { StyleSheet, Text } from 'react-native';
 import { Raised } from './raised';
 import { useSurroundingText } from './text-context';
 import { fonts, useTheme, type Colours } from './theme';
+import { webStyle } from './web-style';
 
 /** How a symbol is set: upright and italic runs, and how it is said. */
 const quantities = {
@@ -63,5 +64,6 @@ const styles = StyleSheet.create({
   symbol: { fontFamily: fonts.numbers },
   bold: { fontWeight: '700' },
   italic: { fontStyle: 'italic' },
-  prime: { marginLeft: -3 },
+  // The glyph stands in the middle of a full cell: drawn to the letter, and its index to it.
+  prime: webStyle({ marginLeft: '-0.12em', marginRight: '-0.24em' }),
 });

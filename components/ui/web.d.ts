@@ -24,6 +24,8 @@ declare module 'react-native' {
     onClick?: ((event: MouseEvent) => void) | undefined;
     onKeyDown?: ((event: KeyboardEvent) => void) | undefined;
     onMouseDown?: ((event: MouseEvent) => void) | undefined;
+    onMouseEnter?: (() => void) | undefined;
+    onMouseLeave?: (() => void) | undefined;
     ref?: Ref<View> | undefined;
   }
 
