@@ -4,16 +4,28 @@ import {
   type ResponseConfig,
 } from '@asteasolutions/zod-to-openapi';
 import { problem, problemTypes, type ProblemName } from '../shared/problem';
-import type { Operation } from '../server/http/operation';
+import type { Access, Operation } from '../server/http/operation';
+
+function refusalsOfAccess(access: Access): readonly ProblemName[] {
+  if (access === 'public') return [];
+  if (access === 'own-pages') return ['origin-refused'];
+  if (access === 'session') return ['sign-in-needed', 'origin-refused'];
+  return ['credential-missing', 'credential-invalid', 'sign-in-needed', 'scope-insufficient'];
+}
+
+function securityOf(access: Access): Record<string, string[]>[] {
+  if (access === 'public' || access === 'own-pages') return [];
+  return access === 'session' ? [{ session: [] }] : [{ key: [access.scope] }, { session: [] }];
+}
 
 /** Refusals that any operation of a kind may give. */
-function refusalsOf({ body, access, callsPerMinute, refuses = [] }: Operation): ProblemName[] {
+function refusalsOf(operation: Operation): ProblemName[] {
+  const { body, query, access, callsPerMinute, refuses = [] } = operation;
   return [
+    ...(query ? (['invalid-request'] as const) : []),
     ...(body ? (['malformed-json', 'invalid-request', 'body-too-large'] as const) : []),
     ...(body ? (['unsupported-media-type'] as const) : []),
-    ...(access === 'public'
-      ? []
-      : (['credential-missing', 'credential-invalid', 'scope-insufficient'] as const)),
+    ...refusalsOfAccess(access),
     ...(callsPerMinute ? (['too-many-requests', 'unavailable'] as const) : []),
     'not-acceptable',
     ...refuses,
@@ -25,25 +37,28 @@ const problemResponse = (names: readonly ProblemName[]): ResponseConfig => ({
   content: { 'application/problem+json': { schema: problem } },
 });
 
+const valuesOf = (operation: Operation, part: 'body' | 'answer') =>
+  Object.fromEntries(
+    Object.entries(operation.examples).map(([name, example]) => [
+      name,
+      { summary: example.summary, value: example[part] },
+    ]),
+  );
+
+function contentOf(operation: Operation) {
+  const { produces, answer } = operation;
+  if (!answer) return {};
+  const json = { schema: answer, examples: valuesOf(operation, 'answer') };
+  const text = { schema: { type: 'string' as const } };
+  const content = produces.map((type) => [type, type === 'application/json' ? json : text]);
+  return { content: Object.fromEntries(content) };
+}
+
 function responsesOf(operation: Operation) {
   const names = refusalsOf(operation);
   const statuses = [...new Set(names.map((name) => problemTypes[name][0]))].sort();
-  const examples = Object.fromEntries(
-    Object.entries(operation.examples).map(([name, { summary, answer }]) => [
-      name,
-      { summary, value: answer },
-    ]),
-  );
-  const content = Object.fromEntries(
-    operation.produces.map((type) => [
-      type,
-      type === 'application/json'
-        ? { schema: operation.answer, examples }
-        : { schema: { type: 'string' as const } },
-    ]),
-  );
   return {
-    200: { description: 'The answer', content },
+    [operation.status ?? 200]: { description: 'The answer', ...contentOf(operation) },
     ...Object.fromEntries(
       statuses.map((status) => [
         status,
@@ -53,18 +68,14 @@ function responsesOf(operation: Operation) {
   };
 }
 
-function requestOf({ body, examples }: Operation) {
-  if (!body) return {};
-  const bodies = Object.entries(examples).map(([name, { summary, body: value }]) => [
-    name,
-    { summary, value },
-  ]);
+function requestOf(operation: Operation) {
+  const { body, params, query } = operation;
+  const json = { schema: body, examples: valuesOf(operation, 'body') };
   return {
     request: {
-      body: {
-        required: true,
-        content: { 'application/json': { schema: body, examples: Object.fromEntries(bodies) } },
-      },
+      ...(params && { params }),
+      ...(query && { query }),
+      ...(body && { body: { required: true, content: { 'application/json': json } } }),
     },
   };
 }
@@ -77,6 +88,14 @@ export function openApiDocument(operations: readonly Operation[]) {
     scheme: 'bearer',
     description: 'An API key: `Authorization: Bearer stepwell_…`.',
   });
+  registry.registerComponent('securitySchemes', 'session', {
+    type: 'apiKey',
+    in: 'cookie',
+    name: 'stepwell_access',
+    description:
+      'A session of our own pages; `__Host-stepwell_access` under HTTPS. Where an Authorization ' +
+      'header is sent, cookies are ignored.',
+  });
   for (const operation of operations) {
     const { method, path, operationId, summary, description, tag, access } = operation;
     registry.registerPath({
@@ -86,7 +105,7 @@ export function openApiDocument(operations: readonly Operation[]) {
       summary,
       description,
       tags: [tag],
-      security: access === 'public' ? [] : [{ key: [access.scope] }],
+      security: securityOf(access),
       ...requestOf(operation),
       responses: responsesOf(operation),
     });
@@ -103,6 +122,8 @@ export function openApiDocument(operations: readonly Operation[]) {
     servers: [{ url: '/' }],
     tags: [
       { name: 'Compute', description: 'Answers about systems and mixtures.' },
+      { name: 'People', description: 'Who is signed in, and where.' },
+      { name: 'Keys', description: 'API keys of the organization.' },
       { name: 'Service', description: 'The service itself.' },
     ],
   });

@@ -1,13 +1,16 @@
 import compression from 'compression';
+import cookieParser from 'cookie-parser';
 import express, { type Express } from 'express';
 import type { Logger } from 'pino';
 import { openApiDocument } from '../openapi/document';
 import type { Config } from './config';
 import { requestLog } from './http/logging';
+import { ownOrigins } from './http/origin';
 import { problemHandler } from './http/problem-response';
 import { operationsRouter } from './http/router';
 import { securityHeaders, styleHashes } from './http/security-headers';
 import { readIndex, webApp } from './http/web-app';
+import { SessionCookies } from './http/session-cookies';
 import { Refusal } from './refusal';
 import { operations } from './routes';
 import { apiDescription } from './routes/api-description';
@@ -16,21 +19,27 @@ import type { Services } from './services';
 
 interface Parts {
   readonly config: Config;
+  readonly publicUrl: string;
   readonly services: Services;
   readonly logger: Logger;
 }
 
 /** The Express app from its parts. */
-export function createApp({ config, services, logger }: Parts): Express {
-  const { publicUrl, webRoot } = config;
+export function createApp({ config, publicUrl, services, logger }: Parts): Express {
+  const { webRoot, environment } = config;
   const https = publicUrl.startsWith('https:');
   const index = webRoot === undefined ? '' : readIndex(webRoot);
+  const pages = {
+    cookies: new SessionCookies(https),
+    origins: ownOrigins(publicUrl, environment === 'production'),
+  };
   const app = express();
   app.disable('x-powered-by').disable('etag').set('query parser', 'simple');
   app.use(requestLog(logger));
   app.use(securityHeaders({ styles: styleHashes(index), https }));
   app.use(compression());
-  app.use(operationsRouter(operations, services));
+  app.use(cookieParser());
+  app.use(operationsRouter(operations, services, pages));
   app.use(apiDescription({ document: openApiDocument(operations), https }));
   app.use(problemPages());
   if (webRoot !== undefined) app.use(webApp(webRoot, index));

@@ -18,6 +18,11 @@ const peppers = z
       ),
   );
 
+const secret = z
+  .string()
+  .regex(/^[A-Za-z0-9_-]{43,}$/, 'must be 32 bytes or more in base64url')
+  .transform((value) => Buffer.from(value, 'base64url'));
+
 const environment = z
   .object({
     NODE_ENV: z.enum(['development', 'test', 'production']).default('development'),
@@ -31,6 +36,7 @@ const environment = z
       error: 'must be a postgresql:// address',
     }),
     KEY_PEPPERS: peppers,
+    SESSION_SECRET: secret,
     WEB_ROOT: z.string().optional(),
     LOG_LEVEL: z.enum(['debug', 'info', 'warn', 'error', 'silent']).default('info'),
     COMPUTE_THREADS: z.coerce.number().int().min(1).max(64).optional(),
@@ -49,11 +55,13 @@ export interface Config {
   readonly environment: 'development' | 'test' | 'production';
   readonly host: string;
   readonly port: number;
-  /** Origin of links and problem types, without a trailing slash. */
-  readonly publicUrl: string;
+  /** Origin of links and problem types, without a trailing slash; this machine's where not given. */
+  readonly publicUrl: string | undefined;
   readonly databaseUrl: string;
   /** Peppers of API keys by version; the highest version makes new digests. */
   readonly keyPeppers: ReadonlyMap<number, Buffer>;
+  /** Signs the access tokens of sessions. */
+  readonly sessionSecret: Buffer;
   readonly webRoot: string | undefined;
   readonly logLevel: 'debug' | 'info' | 'warn' | 'error' | 'silent';
   readonly computeThreads: number | undefined;
@@ -78,9 +86,10 @@ export function readConfig(source: Readonly<Record<string, string | undefined>>)
     environment: values.NODE_ENV,
     host: values.HOST,
     port: values.PORT,
-    publicUrl: (values.PUBLIC_URL ?? `http://localhost:${values.PORT}`).replace(/\/+$/, ''),
+    publicUrl: values.PUBLIC_URL?.replace(/\/+$/, ''),
     databaseUrl: values.DATABASE_URL,
     keyPeppers: values.KEY_PEPPERS,
+    sessionSecret: values.SESSION_SECRET,
     webRoot: values.WEB_ROOT,
     logLevel: values.LOG_LEVEL,
     computeThreads: values.COMPUTE_THREADS,

@@ -1,8 +1,10 @@
 import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import { readConfig } from './config';
 import { createDataSource } from './database/data-source';
-import { demoKeyFor, seedDemo } from './database/seed';
-import { KeyService } from './services/keys/key-service';
+import { demoKeyFor, seedDemo } from './services/demo/seed-demo';
+import { KeyConsole } from './services/keys/key-console';
+import { KeyDigests } from './services/keys/key-digest';
+import { KeyGuard } from './services/keys/key-guard';
 
 /**
  * `node dist/server/seed.js`: the demo organizations, and a key for the first call in
@@ -17,7 +19,12 @@ async function main(): Promise<void> {
     await seedDemo(database);
     if (!file) return;
     const held = existsSync(file) ? readFileSync(file, 'utf8').trim() : undefined;
-    const key = await demoKeyFor(new KeyService(database, config.keyPeppers), held);
+    const digests = new KeyDigests(config.keyPeppers);
+    const parts = {
+      keys: new KeyGuard(database, digests),
+      keyConsole: new KeyConsole(database, digests),
+    };
+    const key = await demoKeyFor(parts, held);
     if (key !== held) writeFileSync(file, `${key}\n`, { mode: 0o600 });
   } finally {
     await database.destroy();

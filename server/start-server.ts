@@ -4,11 +4,12 @@ import type { Logger } from 'pino';
 import { createApp } from './app';
 import type { Config } from './config';
 import { createDataSource } from './database/data-source';
-import { ComputePool } from './services/compute/compute-pool';
-import { KeyService } from './services/keys/key-service';
+import { createServices } from './services';
 
 export interface RunningServer {
   readonly port: number;
+  /** Origin of links, as configured or else this machine's. */
+  readonly publicUrl: string;
   /** Answers what is under way, then lets go of workers and database. */
   readonly close: () => Promise<void>;
 }
@@ -16,20 +17,21 @@ export interface RunningServer {
 /** Connects, listens, and answers how to stop. */
 export async function startServer(config: Config, logger: Logger): Promise<RunningServer> {
   const database = await createDataSource(config.databaseUrl).initialize();
-  const compute = new ComputePool(config.computeThreads);
-  const keys = new KeyService(database, config.keyPeppers);
-  const app = createApp({ config, services: { compute, keys, database }, logger });
-  const server = createServer({ requestTimeout: 30_000, headersTimeout: 15_000 }, app);
+  const server = createServer({ requestTimeout: 30_000, headersTimeout: 15_000 });
   await new Promise<void>((resolve, reject) => {
     server.once('error', reject).listen(config.port, config.host, resolve);
   });
+  const { port } = server.address() as AddressInfo;
+  const publicUrl = config.publicUrl ?? `http://localhost:${port}`;
+  const services = createServices(database, config, publicUrl);
+  server.on('request', createApp({ config, publicUrl, services, logger }));
   const close = async () => {
     await new Promise((resolve) => {
       server.close(resolve);
       server.closeIdleConnections();
     });
-    await compute.close();
+    await services.compute.close();
     await database.destroy();
   };
-  return { port: (server.address() as AddressInfo).port, close };
+  return { port, publicUrl, close };
 }

@@ -7,6 +7,10 @@ export const problemTypes = {
   'credential-missing': [401, 'A key is needed'],
   'credential-malformed': [401, 'The key is not written as one of ours'],
   'credential-invalid': [401, 'The key is not valid'],
+  'sign-in-needed': [401, 'Nobody is signed in'],
+  'sign-in-refused': [401, 'Signing in did not work'],
+  'origin-refused': [403, 'The request did not come from our own pages'],
+  'role-insufficient': [403, 'Your role may not do this'],
   'scope-insufficient': [403, 'The key may not do this'],
   'not-found': [404, 'There is nothing at this address'],
   'method-not-allowed': [405, 'This address does not take that method'],
@@ -25,7 +29,8 @@ export type ProblemName = keyof typeof problemTypes;
 export const fault = z
   .strictObject({
     pointer: z.string().meta({
-      description: 'JSON Pointer to the fault; empty for the whole body.',
+      description:
+        'JSON Pointer to the fault in the body, empty for the whole of it; `?name` for a query parameter.',
       example: '/system/pKa/1',
     }),
     code: z.string().meta({ description: 'Stable name.', example: 'decimal-must-be-string' }),

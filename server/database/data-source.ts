@@ -4,7 +4,9 @@ import { ApiKey } from './entities/api-key';
 import { Membership } from './entities/membership';
 import { Organization } from './entities/organization';
 import { Person } from './entities/person';
+import { Session } from './entities/session';
 import { OrganizationsAndKeys1764547200000 } from './migrations/1764547200000-organizations-and-keys';
+import { Sessions1764547400000 } from './migrations/1764547400000-sessions';
 
 /** The database, not yet connected. The schema is made by migrations alone. */
 export const createDataSource = (url: string): DataSource =>
@@ -12,8 +14,8 @@ export const createDataSource = (url: string): DataSource =>
     type: 'postgres',
     url,
     applicationName: 'stepwell',
-    entities: [Organization, Person, Membership, ApiKey],
-    migrations: [OrganizationsAndKeys1764547200000],
+    entities: [Organization, Person, Membership, ApiKey, Session],
+    migrations: [OrganizationsAndKeys1764547200000, Sessions1764547400000],
     migrationsTableName: 'schema_migrations',
     migrationsTransactionMode: 'each',
     synchronize: false,

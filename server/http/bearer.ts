@@ -1,7 +1,8 @@
 import type { Request, Response } from 'express';
 import type { Scope } from '../../shared/scopes';
 import { Refusal } from '../refusal';
-import type { Authentication, Caller, KeyService } from '../services/keys/key-service';
+import type { Caller } from '../services/caller';
+import type { Authentication, KeyGuard } from '../services/keys/key-guard';
 
 const realm = 'Bearer realm="stepwell"';
 const credentials = /^Bearer +([A-Za-z0-9._~+/-]+=*) *$/i;
@@ -17,7 +18,8 @@ const refused: Readonly<
   'issuer-left': ['credential-invalid', 'Whoever issued the key no longer belongs here.'],
 };
 
-function challenge(response: Response, parameters: string, refusal: Refusal): Refusal {
+/** A refusal with the challenge of RFC 6750 beside it. */
+export function challenge(response: Response, parameters: string, refusal: Refusal): Refusal {
   response.setHeader('WWW-Authenticate', realm + parameters);
   return refusal;
 }
@@ -30,7 +32,7 @@ function challenge(response: Response, parameters: string, refusal: Refusal): Re
 export async function bearerOf(
   request: Request,
   response: Response,
-  keys: KeyService,
+  keys: KeyGuard,
   scope: Scope,
 ): Promise<Caller> {
   const header = request.headers.authorization;
@@ -50,7 +52,7 @@ export async function bearerOf(
   if (!found.ok) {
     throw challenge(response, ', error="invalid_token"', new Refusal(...refused[found.reason]));
   }
-  response.log.setBindings({ key: found.caller.publicId });
+  response.log.setBindings({ caller: found.caller.name });
   if (!found.caller.scopes.has(scope)) {
     throw challenge(
       response,

@@ -59,3 +59,7 @@ const faultsAtMost = 50;
  */
 export const faultsOf = (error: z.ZodError): Fault[] =>
   error.issues.flatMap((issue) => faultsOfIssue(issue, [])).slice(0, faultsAtMost);
+
+/** The same for query parameters: `?name` in place of a pointer. */
+export const queryFaultsOf = (error: z.ZodError): Fault[] =>
+  faultsOf(error).map((fault) => ({ ...fault, pointer: fault.pointer.replace('/', '?') }));

@@ -1,58 +1,103 @@
-import type { ZodType, z } from 'zod';
+import type { ZodObject, ZodType, z } from 'zod';
 import type { ProblemName } from '../../shared/problem';
 import type { Scope } from '../../shared/scopes';
 import type { Services } from '../services';
-import type { Caller } from '../services/keys/key-service';
+import type { Caller, SessionCaller } from '../services/caller';
+import type { Tokens } from '../services/sessions/session-service';
 
-/** Who may call: anybody, or the bearer of a key with a scope. */
-export type Access = 'public' | { readonly scope: Scope };
+/**
+ * Who may call: anybody; anybody on our own pages; whoever has a scope, by key or by session; or
+ * only a person who is signed in.
+ */
+export type Access = 'public' | 'own-pages' | 'session' | { readonly scope: Scope };
 
 export interface Reply {
   readonly status?: number;
-  readonly type: string;
-  readonly body: Uint8Array | string;
+  readonly type?: string;
+  readonly body?: Uint8Array | string;
   readonly headers?: Readonly<Record<string, string>>;
+  /** Opens a session with these tokens, or ends it, in the caller's cookies. */
+  readonly session?: Tokens | 'ended';
 }
 
-interface Call<Body> {
+interface Call<A extends Access, Body, Params, Query> {
   readonly body: Body;
+  readonly params: Params;
+  readonly query: Query;
   readonly services: Services;
   /** The media type agreed upon, one of `produces`. */
   readonly accepted: string;
-  /** Present exactly where the operation asks for a scope. */
-  readonly caller: Caller | undefined;
+  /** Whoever calls, where the access asks who it is. */
+  readonly caller: A extends 'session'
+    ? SessionCaller
+    : A extends 'public' | 'own-pages'
+      ? undefined
+      : Caller;
+  /** The peer's network address. */
+  readonly address: string;
+  /** The refresh token of the caller's cookie. */
+  readonly refreshToken: string | undefined;
 }
 
 interface Example {
   readonly summary: string;
   readonly body?: unknown;
-  readonly answer: unknown;
+  readonly params?: Readonly<Record<string, string>>;
+  readonly query?: Readonly<Record<string, string>>;
+  readonly answer?: unknown;
 }
+
+type Nothing = ZodType<undefined>;
 
 /**
  * One path and method, whole: what it is for, who may call it, what it takes and gives, and how it
  * is answered. The router and the OpenAPI document are both made from it.
  */
-export interface Operation<Schema extends ZodType = ZodType> {
-  readonly method: 'get' | 'post';
+interface Declared<
+  A extends Access,
+  Body extends ZodType,
+  Params extends ZodType,
+  Query extends ZodType,
+> {
+  readonly method: 'get' | 'post' | 'put' | 'delete';
+  /** As OpenAPI writes it, with parameters in braces. */
   readonly path: string;
   readonly operationId: string;
   readonly summary: string;
   readonly description: string;
-  readonly tag: string;
-  readonly access: Access;
-  /** Calls a minute for each caller: an address where public, a key otherwise. */
+  readonly tag: 'Compute' | 'Systems' | 'People' | 'Keys' | 'Service';
+  readonly access: A;
+  /** Calls a minute for each caller: an address where nobody is known, else a key or a person. */
   readonly callsPerMinute?: number;
-  readonly body?: Schema;
-  readonly answer: ZodType;
+  readonly body?: Body;
+  /** Parts of the path in braces; one that does not fit is a 404. */
+  readonly params?: Params;
+  /** Query parameters; others are a 400. */
+  readonly query?: Query;
+  /** Status of success; 200 where none is named. */
+  readonly status?: 200 | 201 | 204;
+  readonly answer?: ZodType;
   /** Media types in order of preference; JSON first. */
   readonly produces: readonly string[];
   /** Refusals of its own, beside those of every operation. */
   readonly refuses?: readonly ProblemName[];
   readonly examples: Readonly<Record<string, Example>>;
-  readonly handle: (call: Call<z.output<Schema>>) => Promise<Reply> | Reply;
+  readonly handle: (
+    call: Call<A, z.output<Body>, z.output<Params>, z.output<Query>>,
+  ) => Promise<Reply> | Reply;
 }
 
-/** Declares an operation with its body's type kept for the handler. */
-export const operation = <Schema extends ZodType>(declared: Operation<Schema>): Operation =>
-  declared as unknown as Operation;
+/** An operation, whatever its types. */
+export interface Operation extends Omit<Declared<Access, ZodType, ZodObject, ZodObject>, 'handle'> {
+  readonly handle: (call: never) => Promise<Reply> | Reply;
+}
+
+/** Declares an operation; body, parameters and caller reach the handler with their types. */
+export const operation = <
+  A extends Access,
+  Body extends ZodType = Nothing,
+  Params extends ZodObject = ZodObject,
+  Query extends ZodObject = ZodObject,
+>(
+  declared: Declared<A, Body, Params, Query>,
+): Operation => declared;

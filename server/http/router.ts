@@ -1,25 +1,25 @@
 import { Router, type Request, type RequestHandler, type Response } from 'express';
+import { z, type ZodType } from 'zod';
+import type { Fault } from '../../shared/problem';
 import { Refusal } from '../refusal';
 import type { Services } from '../services';
-import type { Caller } from '../services/keys/key-service';
-import { bearerOf } from './bearer';
+import type { Caller } from '../services/caller';
 import { jsonBody } from './body';
-import { faultsOf } from './faults';
-import type { Operation } from './operation';
+import { callerOf, type OwnPages } from './caller';
+import { faultsOf, queryFaultsOf } from './faults';
+import type { Operation, Reply } from './operation';
 import { rateLimiter } from './rate-limit';
 
 declare module 'express-serve-static-core' {
   interface Locals {
-    caller?: Caller;
+    caller?: Caller | undefined;
   }
 }
 
 const guard =
-  (access: Operation['access'], services: Services): RequestHandler =>
+  ({ access }: Operation, services: Services, pages: OwnPages): RequestHandler =>
   async (request, response, next) => {
-    if (access !== 'public') {
-      response.locals.caller = await bearerOf(request, response, services.keys, access.scope);
-    }
+    response.locals.caller = await callerOf(request, response, access, services, pages);
     next();
   };
 
@@ -35,15 +35,10 @@ const agree =
     next();
   };
 
-function readBody(operation: Operation, request: Request): unknown {
-  const [unknown] = Object.keys(request.query);
-  if (unknown !== undefined) {
-    throw new Refusal('invalid-request', `This takes no query parameter ${unknown.slice(0, 80)}.`);
-  }
-  if (operation.body === undefined) return undefined;
-  const parsed = operation.body.safeParse(request.body, { reportInput: true });
-  if (parsed.success) return parsed.data;
-  const errors = faultsOf(parsed.error);
+function parsed(schema: ZodType, value: unknown, faults: (error: z.ZodError) => Fault[]): unknown {
+  const result = schema.safeParse(value, { reportInput: true });
+  if (result.success) return result.data;
+  const errors = faults(result.error);
   const detail =
     errors.length === 1
       ? 'One field is not as the contract has it.'
@@ -51,20 +46,42 @@ function readBody(operation: Operation, request: Request): unknown {
   throw new Refusal('invalid-request', detail, errors);
 }
 
+const noQuery = z.strictObject({});
+
+function read({ params, query, body }: Operation, request: Request) {
+  const path = params?.safeParse(request.params);
+  if (path?.success === false) throw new Refusal('not-found');
+  return {
+    params: path?.data,
+    query: parsed(query ?? noQuery, request.query, queryFaultsOf),
+    body: body && parsed(body, request.body, faultsOf),
+  };
+}
+
+function send(response: Response, reply: Reply, status: number, pages: OwnPages): void {
+  response.status(reply.status ?? status);
+  if (reply.type !== undefined) response.setHeader('Content-Type', reply.type);
+  response.setHeader('Cache-Control', 'no-store');
+  for (const [name, value] of Object.entries(reply.headers ?? {})) response.setHeader(name, value);
+  if (reply.session === 'ended') pages.cookies.clear(response);
+  else if (reply.session) pages.cookies.set(response, reply.session);
+  response.end(reply.body);
+}
+
 const answer =
-  (operation: Operation, services: Services) =>
+  (operation: Operation, services: Services, pages: OwnPages) =>
   async (request: Request, response: Response): Promise<void> => {
-    const reply = await operation.handle({
-      body: readBody(operation, request),
+    const call = {
+      ...read(operation, request),
       services,
       accepted: String(response.locals.accepted),
       caller: response.locals.caller,
-    });
-    response.status(reply.status ?? 200).setHeader('Content-Type', reply.type);
-    if (!response.hasHeader('Cache-Control')) response.setHeader('Cache-Control', 'no-store');
-    for (const [name, value] of Object.entries(reply.headers ?? {}))
-      response.setHeader(name, value);
-    response.end(reply.body);
+      address: request.ip ?? '',
+      refreshToken: pages.cookies.read(request).refresh,
+    };
+    // Its own declaration gave the handler its types; the guard and `read` have made them true.
+    const reply = await operation.handle(call as never);
+    send(response, reply, operation.status ?? 200, pages);
   };
 
 const otherMethods = (methods: readonly string[]): RequestHandler => {
@@ -76,28 +93,34 @@ const otherMethods = (methods: readonly string[]): RequestHandler => {
   };
 };
 
-/** Mounts the operations: guard, limit, negotiation, body, answer; other methods are a 405. */
-export function operationsRouter(operations: readonly Operation[], services: Services): Router {
+const expressPath = (path: string) => path.replace(/\{(\w+)\}/g, ':$1');
+
+/** Mounts the operations: guard, limit, negotiation, reading, answer; other methods are a 405. */
+export function operationsRouter(
+  operations: readonly Operation[],
+  services: Services,
+  pages: OwnPages,
+): Router {
   const router = Router({ caseSensitive: true, strict: true });
   for (const operation of operations) {
-    const { method, path, access, callsPerMinute, produces, body, operationId } = operation;
+    const { method, path, callsPerMinute, produces, body, operationId } = operation;
     const limit = callsPerMinute && {
       name: operationId,
       callsPerMinute,
       database: services.database,
     };
     router[method](
-      path,
-      guard(access, services),
+      expressPath(path),
+      guard(operation, services, pages),
       ...(limit ? [rateLimiter(limit)] : []),
       agree(produces),
       ...(body ? [jsonBody] : []),
-      answer(operation, services),
+      answer(operation, services, pages),
     );
   }
   for (const path of new Set(operations.map((operation) => operation.path))) {
     const here = operations.filter((operation) => operation.path === path);
-    router.all(path, otherMethods(here.map(({ method }) => method.toUpperCase())));
+    router.all(expressPath(path), otherMethods(here.map(({ method }) => method.toUpperCase())));
   }
   return router;
 }

@@ -12,6 +12,12 @@ const advice: Readonly<Record<ProblemName, string>> = {
   'credential-malformed':
     'The key was cut or mistyped: its checksum does not fit. Paste it whole, in lower case.',
   'credential-invalid': 'The key is unknown, has expired or was revoked. Ask an admin for another.',
+  'sign-in-needed': 'Sign in on the page, or POST /v1/sessions, and send the cookies it gives.',
+  'sign-in-refused':
+    'Look at both once more. Unknown people and wrong passwords get the same answer.',
+  'origin-refused':
+    'Requests with a session must carry Origin (or Sec-Fetch-Site) of this service. Pipelines use a key.',
+  'role-insufficient': 'Ask an admin of your organization.',
   'scope-insufficient':
     'The WWW-Authenticate header names the scope that the operation needs. Issue a key that has it.',
   'not-found': 'Look at /openapi.json for the addresses there are.',

@@ -3,11 +3,10 @@ import type { DataSource } from 'typeorm';
 
 /** Counts of calls a window, one row a caller, shared by every process on the database. */
 export class RateWindows implements Store {
-  private windowMs = 60_000;
-
   constructor(
     private readonly database: DataSource,
     readonly prefix: string,
+    private windowMs = 60_000,
   ) {}
 
   init({ windowMs }: Options): void {
@@ -27,6 +26,15 @@ export class RateWindows implements Store {
     );
     if (row.hits === 1) await this.clear();
     return { totalHits: row.hits, resetTime: row.resets_at };
+  }
+
+  /** Calls counted in the window under way. */
+  async hitsOf(caller: string): Promise<number> {
+    const [row] = await this.database.query<[{ hits: number }?]>(
+      'SELECT hits FROM rate_windows WHERE caller = $1 AND resets_at > now()',
+      [this.row(caller)],
+    );
+    return row?.hits ?? 0;
   }
 
   async decrement(caller: string): Promise<void> {

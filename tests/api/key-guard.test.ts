@@ -1,6 +1,7 @@
 import request from 'supertest';
 import type { Scope } from '../../shared/scopes';
-import { demoKey, demoPeople } from '../../server/database/demo-data';
+import type { Member } from '../../server/services/caller';
+import { demoKey, demoPeople } from '../../server/services/demo/demo-data';
 import { makeKey } from '../../server/services/keys/key-format';
 import { phosphoric } from '../support/calls';
 import { startTestServer, type TestServer } from '../support/server';
@@ -11,16 +12,12 @@ beforeAll(async () => {
 });
 afterAll(() => server.close());
 
-const inAnHour = () => new Date(Date.now() + 3_600_000);
-const issue = (change: { scopes?: Scope[]; expiresAt?: Date; issuerId?: string } = {}) =>
-  server.keys.issue({
-    issuerId: demoKey.issuerId,
-    organizationId: demoKey.organizationId,
-    name: 'test',
-    scopes: ['compute'],
-    expiresAt: inAnHour(),
-    ...change,
-  });
+interface Wanted {
+  readonly scopes?: Scope[];
+  readonly issuer?: Member;
+}
+const issue = ({ scopes = ['compute'], issuer = demoKey.issuer }: Wanted = {}) =>
+  server.services.keyConsole.issue(issuer, { name: 'test', scopes, expiresInDays: 1 });
 
 const call = (authorization?: string) => {
   const post = request(server.url).post('/v1/fractions');
@@ -77,7 +74,8 @@ test('the public part of a good key with another secret is invalid, and is not t
 });
 
 test('an expired key is invalid', async () => {
-  const { key } = await issue({ expiresAt: new Date(Date.now() - 1) });
+  const { key, id } = await issue();
+  await server.database.query('UPDATE api_keys SET expires_at = now() WHERE id = $1', [id]);
   expect((await call(bearer(key))).body.detail).toBe('The key has expired.');
 });
 
@@ -98,19 +96,29 @@ test('a key without the scope is forbidden and told which one it needs', async (
 });
 
 test('a key is worth no more than its issuer’s present role, at each call', async () => {
-  const [admin] = demoPeople;
-  const { key } = await issue({ scopes: ['compute', 'usage:read'], issuerId: admin?.id ?? '' });
+  const admin = demoPeople[0];
+  const issuer = { ...demoKey.issuer, personId: admin.id, role: admin.role };
+  const { key } = await issue({ scopes: ['compute', 'usage:read'], issuer });
   const scopes = async () => {
-    const found = await server.keys.authenticate(key);
+    const found = await server.services.keys.authenticate(key);
     return found.ok ? [...found.caller.scopes] : found.reason;
   };
+  const query = (statement: string) => server.database.query(statement, [admin.id]);
   expect(await scopes()).toEqual(['compute', 'usage:read']);
-  await server.database.query(`UPDATE memberships SET role = 'scientist' WHERE person_id = $1`, [
-    admin?.id,
-  ]);
+  await query(`UPDATE memberships SET role = 'scientist' WHERE person_id = $1`);
   expect(await scopes()).toEqual(['compute']);
-  await server.database.query('DELETE FROM memberships WHERE person_id = $1', [admin?.id]);
+  await query('DELETE FROM memberships WHERE person_id = $1');
   expect(await scopes()).toBe('issuer-left');
+});
+
+test('the use of a key is noted', async () => {
+  const { key, id } = await issue();
+  await call(bearer(key));
+  const rows = await server.database.query<[{ last_used_at: Date }]>(
+    'SELECT last_used_at FROM api_keys WHERE id = $1',
+    [id],
+  );
+  expect(rows[0].last_used_at).toBeInstanceOf(Date);
 });
 
 test('the key itself is nowhere in the database', async () => {

@@ -4,6 +4,7 @@ import path from 'node:path';
 import request from 'supertest';
 import { openApiDocument } from '../../openapi/document';
 import { operations } from '../../server/routes';
+import { signedIn } from '../support/people';
 import { startTestServer, type TestServer } from '../support/server';
 
 const root = path.join(__dirname, '../..');
@@ -57,13 +58,22 @@ const examples = operations.flatMap((operation) =>
   ),
 );
 
+const fill = (path: string, params: Readonly<Record<string, string>> = {}) =>
+  path.replace(/\{(\w+)\}/g, (_whole, name: string) => encodeURIComponent(params[name] ?? ''));
+
 test.each(examples)('example %s is what the service answers', async (_name, operation, example) => {
-  const call = request(server.url)[operation.method](operation.path);
-  if (operation.access !== 'public') void call.set('Authorization', `Bearer ${server.key}`);
-  const answer = example.body === undefined ? await call : await call.send(example.body);
-  expect(answer.status).toBe(200);
-  expect(answer.body).toEqual(example.answer);
-  expect(operation.answer.safeParse(answer.body).error).toBeUndefined();
+  const { access, method, path, status = 200, answer } = operation;
+  const caller =
+    access === 'session'
+      ? await signedIn(server, 'developer@larkmoor.example')
+      : request(server.url);
+  const call = caller[method](fill(path, example.params)).query(example.query ?? {});
+  if (access === 'own-pages') void call.set('Origin', server.url);
+  if (typeof access === 'object') void call.set('Authorization', `Bearer ${server.key}`);
+  const got = example.body === undefined ? await call : await call.send(example.body as object);
+  expect(got.status).toBe(status);
+  expect(got.body).toEqual(example.answer);
+  expect(answer?.safeParse(got.body).error).toBeUndefined();
 });
 
 const schemaOf = (schema: Schema): Schema =>

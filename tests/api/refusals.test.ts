@@ -1,6 +1,6 @@
 import request from 'supertest';
 import { faultsIn, phosphoric, postWithKey } from '../support/calls';
-import { startTestServer, testPublicUrl, type TestServer } from '../support/server';
+import { startTestServer, type TestServer } from '../support/server';
 
 let server: TestServer;
 beforeAll(async () => {
@@ -133,7 +133,7 @@ test('deep nesting is refused, not followed', async () => {
 
 test('a problem names a page that opens and says what to do', async () => {
   const { body } = await send('{');
-  expect(body.type).toBe(`${testPublicUrl}/problems/malformed-json`);
+  expect(body.type).toBe(`${server.url}/problems/malformed-json`);
   const page = await request(server.url).get(new URL(body.type).pathname);
   expect(page.text).toContain(body.title);
   expect((await request(server.url).get('/problems/constructor')).status).toBe(404);

@@ -22,7 +22,7 @@ test('alive and ready are told apart', async () => {
 test('while the database is away the process lives, is not ready, calls are a 503; then all is well again', async () => {
   const away = await startTestServer();
   const hand = away.database.createQueryRunner();
-  const [{ name }] = await hand.query<[{ name: string }]>('SELECT current_database() AS name');
+  const [{ name }] = (await hand.query('SELECT current_database() AS name')) as [{ name: string }];
   const statuses = async () => {
     const call = postWithKey(away, '/v1/fractions').send({ system: phosphoric, pH: '7' });
     const [livez, readyz, fractions] = await Promise.all([

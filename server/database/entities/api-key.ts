@@ -37,4 +37,8 @@ export class ApiKey {
 
   @Column('timestamptz', { name: 'revoked_at', nullable: true })
   revokedAt!: Date | null;
+
+  /** To the minute. */
+  @Column('timestamptz', { name: 'last_used_at', nullable: true })
+  lastUsedAt!: Date | null;
 }

@@ -13,6 +13,10 @@ export class Person {
   @Column('text')
   name!: string;
 
+  /** Argon2id; null for somebody who cannot sign in. Read only where it is asked for. */
+  @Column('text', { name: 'password_hash', nullable: true, select: false })
+  passwordHash!: string | null;
+
   @CreateDateColumn({ name: 'created_at', type: 'timestamptz' })
   createdAt!: Date;
 }

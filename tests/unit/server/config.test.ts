@@ -3,6 +3,7 @@ import { ConfigError, readConfig } from '../../../server/config';
 const right = {
   DATABASE_URL: 'postgresql://stepwell@127.0.0.1/stepwell',
   KEY_PEPPERS: `1:${'a'.repeat(43)}`,
+  SESSION_SECRET: 's'.repeat(43),
 };
 
 test('an environment with the least there must be is read with its defaults', () => {
@@ -10,7 +11,7 @@ test('an environment with the least there must be is read with its defaults', ()
     environment: 'development',
     host: '127.0.0.1',
     port: 8080,
-    publicUrl: 'http://localhost:8080',
+    publicUrl: undefined,
   });
 });
 
@@ -28,6 +29,7 @@ const rows: [string, Record<string, string | undefined>, RegExp][] = [
   ['a database of another kind', { DATABASE_URL: 'mysql://x' }, /DATABASE_URL: .*postgresql/],
   ['no pepper', { KEY_PEPPERS: undefined }, /KEY_PEPPERS is missing/],
   ['a short pepper', { KEY_PEPPERS: '1:abc' }, /KEY_PEPPERS: .*32 bytes/],
+  ['a short session secret', { SESSION_SECRET: 'abc' }, /SESSION_SECRET: must be 32 bytes/],
   ['a port in words', { PORT: 'abc' }, /PORT: must be a whole number/],
   ['a port too high', { PORT: '70000' }, /PORT/],
   ['another host outside production', { HOST: '0.0.0.0' }, /HOST: .*only in production/],

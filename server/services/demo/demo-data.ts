@@ -1,4 +1,4 @@
-import type { Role } from '../../shared/scopes';
+import type { Role } from '../../../shared/scopes';
 
 /** Invented organizations and people; nobody's data, and no check value. */
 export const demoOrganizations = [
@@ -26,18 +26,24 @@ const person = (end: string, email: string, name: string, organizationId: string
     role,
   }) satisfies DemoPerson;
 
-export const demoPeople: readonly DemoPerson[] = [
+export const demoPeople = [
   person('01', 'admin@larkmoor.example', 'Demo admin', larkmoor, 'admin'),
   person('02', 'developer@larkmoor.example', 'Demo developer', larkmoor, 'developer'),
   person('03', 'scientist@larkmoor.example', 'Demo scientist', larkmoor, 'scientist'),
   person('04', 'admin@tarnstreet.example', 'Demo admin', tarn, 'admin'),
-];
+] as const;
 
-/** Who issues the key that the first call of the README uses. */
+/** Everybody's password; made only outside production, where the server binds 127.0.0.1 alone. */
+export const demoPassword = 'three steps down to water';
+
+/** The key that the first call of the README uses. */
 export const demoKey = {
-  issuerId: '8c1f2a34-0b7d-4c55-8f43-0d2e9b7a6c02',
-  organizationId: larkmoor,
+  issuer: {
+    personId: '8c1f2a34-0b7d-4c55-8f43-0d2e9b7a6c02',
+    organizationId: larkmoor,
+    role: 'developer',
+  },
   name: 'first-call',
-  scopes: ['compute'],
-  days: 90,
+  scopes: ['compute', 'systems:read'],
+  expiresInDays: 90,
 } as const;

@@ -1,12 +1,14 @@
 import type { DataSource } from 'typeorm';
-import type { KeyService } from '../services/keys/key-service';
-import { demoKey, demoOrganizations, demoPeople } from './demo-data';
-import { Membership } from './entities/membership';
-import { Organization } from './entities/organization';
-import { Person } from './entities/person';
+import type { Services } from '..';
+import { hashPassword } from '../sessions/passwords';
+import { demoKey, demoOrganizations, demoPassword, demoPeople } from './demo-data';
+import { Membership } from '../../database/entities/membership';
+import { Organization } from '../../database/entities/organization';
+import { Person } from '../../database/entities/person';
 
 /** Puts the demo organizations and people in, once; running it again changes nothing. */
 export async function seedDemo(database: DataSource): Promise<void> {
+  const passwordHash = await hashPassword(demoPassword);
   await database.transaction(async (manager) => {
     const insert = (
       entity: typeof Organization | typeof Person | typeof Membership,
@@ -15,7 +17,7 @@ export async function seedDemo(database: DataSource): Promise<void> {
     await insert(Organization, [...demoOrganizations]);
     await insert(
       Person,
-      demoPeople.map(({ id, email, name }) => ({ id, email, name })),
+      demoPeople.map(({ id, email, name }) => ({ id, email, name, passwordHash })),
     );
     await insert(
       Membership,
@@ -25,9 +27,11 @@ export async function seedDemo(database: DataSource): Promise<void> {
 }
 
 /** A key for the first call: the one held, where it is still good, else a new one. */
-export async function demoKeyFor(keys: KeyService, held: string | undefined): Promise<string> {
+export async function demoKeyFor(
+  { keys, keyConsole }: Pick<Services, 'keys' | 'keyConsole'>,
+  held: string | undefined,
+): Promise<string> {
   if (held !== undefined && (await keys.authenticate(held)).ok) return held;
-  const { issuerId, organizationId, name, scopes, days } = demoKey;
-  const expiresAt = new Date(Date.now() + days * 86_400_000);
-  return (await keys.issue({ issuerId, organizationId, name, scopes, expiresAt })).key;
+  const { issuer, name, scopes, expiresInDays } = demoKey;
+  return (await keyConsole.issue(issuer, { name, scopes: [...scopes], expiresInDays })).key;
 }

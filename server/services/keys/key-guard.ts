@@ -1,17 +1,10 @@
-import { randomUUID } from 'node:crypto';
 import type { DataSource } from 'typeorm';
-import { scopesOfRole, type Role, type Scope } from '../../../shared/scopes';
+import { scopesOfRole, type Role } from '../../../shared/scopes';
 import { ApiKey } from '../../database/entities/api-key';
 import { Membership } from '../../database/entities/membership';
-import { KeyDigests } from './key-digest';
-import { makeKey, readKey } from './key-format';
-
-/** Who a valid key speaks for, and what it may do now. */
-export interface Caller {
-  readonly publicId: string;
-  readonly organizationId: string;
-  readonly scopes: ReadonlySet<Scope>;
-}
+import type { Caller } from '../caller';
+import type { KeyDigests } from './key-digest';
+import { readKey } from './key-format';
 
 export type Authentication =
   | { ok: true; caller: Caller }
@@ -20,39 +13,13 @@ export type Authentication =
       reason: 'malformed' | 'checksum' | 'unknown' | 'expired' | 'revoked' | 'issuer-left';
     };
 
-interface NewKey {
-  readonly organizationId: string;
-  readonly issuerId: string;
-  readonly name: string;
-  readonly scopes: readonly Scope[];
-  readonly expiresAt: Date;
-}
-
-export class KeyService {
-  private readonly digests: KeyDigests;
-
+/** Tells good keys from bad ones, at each call. */
+export class KeyGuard {
   constructor(
     private readonly database: DataSource,
-    peppers: ReadonlyMap<number, Buffer>,
+    private readonly digests: KeyDigests,
     private readonly now: () => Date = () => new Date(),
-  ) {
-    this.digests = new KeyDigests(peppers);
-  }
-
-  /** Issues a key. The key itself is in the answer and nowhere else. */
-  async issue(wanted: NewKey): Promise<{ id: string; key: string; publicId: string }> {
-    const { key, publicId } = makeKey();
-    const id = randomUUID();
-    await this.database.getRepository(ApiKey).insert({
-      ...wanted,
-      scopes: [...wanted.scopes],
-      id,
-      publicId,
-      ...this.digests.of(key),
-      revokedAt: null,
-    });
-    return { id, key, publicId };
-  }
+  ) {}
 
   /**
    * Whether a presented key is good: form and checksum first, then its row by the public part,
@@ -68,15 +35,24 @@ export class KeyService {
     if (found.revokedAt !== null) return { ok: false, reason: 'revoked' };
     if (found.expiresAt <= this.now()) return { ok: false, reason: 'expired' };
     if (found.role === null) return { ok: false, reason: 'issuer-left' };
+    await this.touch(found);
     const allowed = scopesOfRole[found.role];
     return {
       ok: true,
       caller: {
-        publicId: found.publicId,
+        kind: 'key',
+        name: `key:${found.publicId}`,
         organizationId: found.organizationId,
         scopes: new Set(found.scopes.filter((scope) => allowed.includes(scope))),
       },
     };
+  }
+
+  /** Notes the use of a key, once a minute at most. */
+  private async touch({ id, lastUsedAt }: ApiKey): Promise<void> {
+    const now = this.now();
+    if (lastUsedAt !== null && now.getTime() - lastUsedAt.getTime() < 60_000) return;
+    await this.database.getRepository(ApiKey).update(id, { lastUsedAt: now });
   }
 
   private async find(publicId: string): Promise<(ApiKey & { role: Role | null }) | null> {

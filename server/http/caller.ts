@@ -1,0 +1,58 @@
+import type { Request, Response } from 'express';
+import { Refusal } from '../refusal';
+import type { Services } from '../services';
+import type { Caller } from '../services/caller';
+import { bearerOf, challenge } from './bearer';
+import type { Access } from './operation';
+import { requireOwnOrigin } from './origin';
+import type { SessionCookies } from './session-cookies';
+
+/** What tells our own pages and their cookies from others'. */
+export interface OwnPages {
+  readonly cookies: SessionCookies;
+  readonly origins: ReadonlySet<string>;
+}
+
+const signIn = () => new Refusal('sign-in-needed', 'Sign in, then try again.');
+
+async function sessionOf(request: Request, services: Services, pages: OwnPages) {
+  const { access } = pages.cookies.read(request);
+  if (access === undefined) return undefined;
+  requireOwnOrigin(request, pages.origins);
+  const caller = await services.sessions.callerOf(access);
+  if (!caller) throw signIn();
+  return caller;
+}
+
+/**
+ * Who calls, as the operation asks for it. Where an Authorization header is sent, cookies are
+ * ignored.
+ */
+export async function callerOf(
+  request: Request,
+  response: Response,
+  access: Access,
+  services: Services,
+  pages: OwnPages,
+): Promise<Caller | undefined> {
+  if (access === 'public') return undefined;
+  if (access === 'own-pages') {
+    requireOwnOrigin(request, pages.origins);
+    return undefined;
+  }
+  const hasCredential = request.headers.authorization !== undefined;
+  if (access === 'session') {
+    if (hasCredential) {
+      throw new Refusal('sign-in-needed', 'Keys cannot do this: it takes a person, signed in.');
+    }
+    const person = await sessionOf(request, services, pages);
+    if (!person) throw signIn();
+    return person;
+  }
+  const person = hasCredential ? undefined : await sessionOf(request, services, pages);
+  if (!person) return bearerOf(request, response, services.keys, access.scope);
+  if (!person.scopes.has(access.scope)) {
+    throw challenge(response, '', new Refusal('role-insufficient', 'Your role may not do this.'));
+  }
+  return person;
+}

@@ -1,0 +1,100 @@
+import { z } from 'zod';
+import { issuedKey, keyAnswer, keyList, keyRequest } from '../../shared/keys';
+import { pageQuery } from '../../shared/page';
+import { nextLink, readCursor, writeCursor } from '../http/cursor';
+import { operation } from '../http/operation';
+
+const json = 'application/json';
+const position = z.tuple([z.iso.datetime(), z.uuid()]);
+const params = z.strictObject({
+  id: z.uuid().meta({
+    description: 'Identifier of the key’s row.',
+    example: '0d2d7a0e-5a43-4f0f-9c7e-2f1f3c1f7d10',
+  }),
+});
+
+export const issueKey = operation({
+  method: 'post',
+  path: '/v1/keys',
+  operationId: 'issueKey',
+  summary: 'Issue an API key',
+  description: 'The answer shows the key once. Developers and admins issue keys.',
+  tag: 'Keys',
+  access: 'session',
+  status: 201,
+  body: keyRequest,
+  answer: issuedKey,
+  produces: [json],
+  refuses: ['role-insufficient'],
+  examples: {},
+  handle: async ({ body, caller, services }) => {
+    const issued = await services.keyConsole.issue(caller, body);
+    const headers = { Location: `/v1/keys/${issued.id}` };
+    return { type: json, body: JSON.stringify(issued), headers };
+  },
+});
+
+export const listKeys = operation({
+  method: 'get',
+  path: '/v1/keys',
+  operationId: 'listKeys',
+  summary: 'The organization’s keys',
+  description: 'Newest first: an admin sees all of them, a developer their own.',
+  tag: 'Keys',
+  access: 'session',
+  query: z.strictObject(pageQuery),
+  answer: keyList,
+  produces: [json],
+  refuses: ['role-insufficient'],
+  examples: {},
+  handle: async ({ query: { limit, cursor }, caller, services }) => {
+    const [createdAt, id] = cursor === undefined ? [] : readCursor(cursor, position);
+    const after = createdAt && id ? { createdAt: new Date(createdAt), id } : undefined;
+    const list = await services.keyConsole.list(caller, { limit, after });
+    const last = list.items.at(limit - 1);
+    const next = last && writeCursor([last.createdAt, last.id]);
+    return {
+      type: json,
+      body: JSON.stringify(list),
+      ...(next && { headers: nextLink('/v1/keys', { limit: `${limit}`, cursor: next }) }),
+    };
+  },
+});
+
+export const readKey = operation({
+  method: 'get',
+  path: '/v1/keys/{id}',
+  operationId: 'readKey',
+  summary: 'One key',
+  description: 'What is known of a key: never the key itself.',
+  tag: 'Keys',
+  access: 'session',
+  params,
+  answer: keyAnswer,
+  produces: [json],
+  refuses: ['role-insufficient', 'not-found'],
+  examples: {},
+  handle: async ({ params: { id }, caller, services }) => ({
+    type: json,
+    body: JSON.stringify(await services.keyConsole.read(caller, id)),
+  }),
+});
+
+export const revokeKey = operation({
+  method: 'post',
+  path: '/v1/keys/{id}/revocation',
+  operationId: 'revokeKey',
+  summary: 'Revoke a key',
+  description: 'For good, from its next call on. Revoking twice changes nothing.',
+  tag: 'Keys',
+  access: 'session',
+  params,
+  answer: keyAnswer,
+  produces: [json],
+  refuses: ['role-insufficient', 'not-found'],
+  examples: {},
+  handle: async ({ params: { id }, caller, services }) => ({
+    type: json,
+    body: JSON.stringify(await services.keyConsole.revoke(caller, id)),
+  }),
+});
