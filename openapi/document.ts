@@ -9,13 +9,13 @@ import type { Access, Operation } from '../server/http/operation';
 function refusalsOfAccess(access: Access): readonly ProblemName[] {
   if (access === 'public') return [];
   if (access === 'own-pages') return ['origin-refused'];
-  if (access === 'session') return ['sign-in-needed', 'origin-refused'];
+  if ('roles' in access) return ['sign-in-needed', 'role-insufficient', 'origin-refused'];
   return ['credential-missing', 'credential-invalid', 'sign-in-needed', 'scope-insufficient'];
 }
 
 function securityOf(access: Access): Record<string, string[]>[] {
   if (access === 'public' || access === 'own-pages') return [];
-  return access === 'session' ? [{ session: [] }] : [{ key: [access.scope] }, { session: [] }];
+  return 'roles' in access ? [{ session: [] }] : [{ key: [access.scope] }, { session: [] }];
 }
 
 /** Refusals that any operation of a kind may give. */

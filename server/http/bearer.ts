@@ -18,8 +18,7 @@ const refused: Readonly<
   'issuer-left': ['credential-invalid', 'Whoever issued the key no longer belongs here.'],
 };
 
-/** A refusal with the challenge of RFC 6750 beside it. */
-export function challenge(response: Response, parameters: string, refusal: Refusal): Refusal {
+function challenge(response: Response, parameters: string, refusal: Refusal): Refusal {
   response.setHeader('WWW-Authenticate', realm + parameters);
   return refusal;
 }

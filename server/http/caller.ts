@@ -1,8 +1,9 @@
 import type { Request, Response } from 'express';
+import { roles, scopesOfRole, type Role } from '../../shared/scopes';
 import { Refusal } from '../refusal';
 import type { Services } from '../services';
 import type { Caller } from '../services/caller';
-import { bearerOf, challenge } from './bearer';
+import { bearerOf } from './bearer';
 import type { Access } from './operation';
 import { requireOwnOrigin } from './origin';
 import type { SessionCookies } from './session-cookies';
@@ -12,6 +13,9 @@ export interface OwnPages {
   readonly cookies: SessionCookies;
   readonly origins: ReadonlySet<string>;
 }
+
+const notYourRole = (allowed: readonly Role[]) =>
+  new Refusal('role-insufficient', `This is for whoever is ${allowed.join(' or ')} here.`);
 
 const signIn = () => new Refusal('sign-in-needed', 'Sign in, then try again.');
 
@@ -41,18 +45,19 @@ export async function callerOf(
     return undefined;
   }
   const hasCredential = request.headers.authorization !== undefined;
-  if (access === 'session') {
+  if ('roles' in access) {
     if (hasCredential) {
       throw new Refusal('sign-in-needed', 'Keys cannot do this: it takes a person, signed in.');
     }
     const person = await sessionOf(request, services, pages);
     if (!person) throw signIn();
+    if (!access.roles.includes(person.role)) throw notYourRole(access.roles);
     return person;
   }
   const person = hasCredential ? undefined : await sessionOf(request, services, pages);
   if (!person) return bearerOf(request, response, services.keys, access.scope);
   if (!person.scopes.has(access.scope)) {
-    throw challenge(response, '', new Refusal('role-insufficient', 'Your role may not do this.'));
+    throw notYourRole(roles.filter((role) => scopesOfRole[role].includes(access.scope)));
   }
   return person;
 }

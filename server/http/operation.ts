@@ -1,15 +1,16 @@
 import type { ZodObject, ZodType, z } from 'zod';
 import type { ProblemName } from '../../shared/problem';
-import type { Scope } from '../../shared/scopes';
+import type { Role, Scope } from '../../shared/scopes';
 import type { Services } from '../services';
 import type { Caller, SessionCaller } from '../services/caller';
 import type { Tokens } from '../services/sessions/session-service';
 
 /**
  * Who may call: anybody; anybody on our own pages; whoever has a scope, by key or by session; or
- * only a person who is signed in.
+ * only a person, signed in and in one of these roles.
  */
-export type Access = 'public' | 'own-pages' | 'session' | { readonly scope: Scope };
+export type Access =
+  'public' | 'own-pages' | { readonly scope: Scope } | { readonly roles: readonly Role[] };
 
 export interface Reply {
   readonly status?: number;
@@ -28,7 +29,7 @@ interface Call<A extends Access, Body, Params, Query> {
   /** The media type agreed upon, one of `produces`. */
   readonly accepted: string;
   /** Whoever calls, where the access asks who it is. */
-  readonly caller: A extends 'session'
+  readonly caller: A extends { roles: unknown }
     ? SessionCaller
     : A extends 'public' | 'own-pages'
       ? undefined

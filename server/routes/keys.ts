@@ -4,6 +4,9 @@ import { pageQuery } from '../../shared/page';
 import { nextLink, readCursor, writeCursor } from '../http/cursor';
 import { operation } from '../http/operation';
 
+/** A scientist computes and has no keys. */
+const keepers = { roles: ['admin', 'developer'] } as const;
+
 const json = 'application/json';
 const position = z.tuple([z.iso.datetime(), z.uuid()]);
 const params = z.strictObject({
@@ -20,7 +23,7 @@ export const issueKey = operation({
   summary: 'Issue an API key',
   description: 'The answer shows the key once. Developers and admins issue keys.',
   tag: 'Keys',
-  access: 'session',
+  access: keepers,
   status: 201,
   body: keyRequest,
   answer: issuedKey,
@@ -41,11 +44,10 @@ export const listKeys = operation({
   summary: 'The organization’s keys',
   description: 'Newest first: an admin sees all of them, a developer their own.',
   tag: 'Keys',
-  access: 'session',
+  access: keepers,
   query: z.strictObject(pageQuery),
   answer: keyList,
   produces: [json],
-  refuses: ['role-insufficient'],
   examples: {},
   handle: async ({ query: { limit, cursor }, caller, services }) => {
     const [createdAt, id] = cursor === undefined ? [] : readCursor(cursor, position);
@@ -68,11 +70,11 @@ export const readKey = operation({
   summary: 'One key',
   description: 'What is known of a key: never the key itself.',
   tag: 'Keys',
-  access: 'session',
+  access: keepers,
   params,
   answer: keyAnswer,
   produces: [json],
-  refuses: ['role-insufficient', 'not-found'],
+  refuses: ['not-found'],
   examples: {},
   handle: async ({ params: { id }, caller, services }) => ({
     type: json,
@@ -87,11 +89,11 @@ export const revokeKey = operation({
   summary: 'Revoke a key',
   description: 'For good, from its next call on. Revoking twice changes nothing.',
   tag: 'Keys',
-  access: 'session',
+  access: keepers,
   params,
   answer: keyAnswer,
   produces: [json],
-  refuses: ['role-insufficient', 'not-found'],
+  refuses: ['not-found'],
   examples: {},
   handle: async ({ params: { id }, caller, services }) => ({
     type: json,

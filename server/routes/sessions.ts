@@ -1,4 +1,5 @@
 import { accountAnswer, organizationChoice, signInRequest } from '../../shared/account';
+import { roles } from '../../shared/scopes';
 import { operation } from '../http/operation';
 import { Refusal } from '../refusal';
 
@@ -79,7 +80,7 @@ export const signOut = operation({
   summary: 'Sign out',
   description: 'Ends the session; its cookies are dead at their next use.',
   tag: 'People',
-  access: 'session',
+  access: { roles },
   status: 204,
   produces: [json],
   examples: {},
@@ -96,7 +97,7 @@ export const chooseOrganization = operation({
   summary: 'Work in another organization',
   description: 'The session speaks for this organization from the next call on.',
   tag: 'People',
-  access: 'session',
+  access: { roles },
   body: organizationChoice,
   answer: accountAnswer,
   produces: [json],
@@ -115,7 +116,7 @@ export const account = operation({
   summary: 'Who is signed in, and where',
   description: 'The person, their organizations, and their role in the present one.',
   tag: 'People',
-  access: 'session',
+  access: { roles },
   answer: accountAnswer,
   produces: [json],
   examples: { developer: { summary: 'A developer', answer: exampleAccount } },

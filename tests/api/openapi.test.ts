@@ -64,12 +64,13 @@ const fill = (path: string, params: Readonly<Record<string, string>> = {}) =>
 test.each(examples)('example %s is what the service answers', async (_name, operation, example) => {
   const { access, method, path, status = 200, answer } = operation;
   const caller =
-    access === 'session'
+    typeof access === 'object' && 'roles' in access
       ? await signedIn(server, 'developer@larkmoor.example')
       : request(server.url);
   const call = caller[method](fill(path, example.params)).query(example.query ?? {});
   if (access === 'own-pages') void call.set('Origin', server.url);
-  if (typeof access === 'object') void call.set('Authorization', `Bearer ${server.key}`);
+  if (typeof access === 'object' && 'scope' in access)
+    void call.set('Authorization', `Bearer ${server.key}`);
   const got = example.body === undefined ? await call : await call.send(example.body as object);
   expect(got.status).toBe(status);
   expect(got.body).toEqual(example.answer);

@@ -14,7 +14,10 @@ export async function seedDemo(database: DataSource): Promise<void> {
       entity: typeof Organization | typeof Person | typeof Membership,
       rows: object[],
     ) => manager.createQueryBuilder().insert().into(entity).values(rows).orIgnore().execute();
-    await insert(Organization, [...demoOrganizations]);
+    await insert(
+      Organization,
+      demoOrganizations.map(({ id, name }) => ({ id, name })),
+    );
     await insert(
       Person,
       demoPeople.map(({ id, email, name }) => ({ id, email, name, passwordHash })),
