@@ -93,6 +93,7 @@ export const keyList = z
   .meta({ id: 'KeyList', description: 'API keys, newest first.' });
 
 export type KeyRequest = z.infer<typeof keyRequest>;
+export type KeyRequestInput = z.input<typeof keyRequest>;
 export type IssuedKey = z.infer<typeof issuedKey>;
 export type KeyAnswer = z.infer<typeof keyAnswer>;
 export type KeyList = z.infer<typeof keyList>;

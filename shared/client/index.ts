@@ -1,3 +1,4 @@
+import type { AccountAnswer, SignInRequest } from '../account';
 import type {
   DryRunAnswer,
   FractionsAnswer,
@@ -5,20 +6,13 @@ import type {
   ManyFractionsAnswer,
   PublicFractionsRequestInput,
 } from '../fractions';
+import type { IssuedKey, KeyAnswer, KeyList, KeyRequestInput } from '../keys';
 import type { LimitsAnswer } from '../limits-answer';
-import { ProblemError, unreachable } from './problem-error';
+import { readPage, type Page } from './page';
+import { createSend, type CallOptions, type ClientOptions } from './send';
 
 export { ProblemError } from './problem-error';
-
-interface ClientOptions {
-  /** Origin of the service, e.g. `http://localhost:8080`; empty in the app, which is served by it. */
-  readonly baseUrl: string;
-  readonly key?: string;
-}
-
-interface CallOptions {
-  readonly signal?: AbortSignal | undefined;
-}
+export type { Page } from './page';
 
 type FractionsResult<Body> = Body extends { dryRun: true }
   ? DryRunAnswer
@@ -30,31 +24,40 @@ type FractionsResult<Body> = Body extends { dryRun: true }
  * The typed client that the app, the tests and pipelines use. Every refusal and every failure to
  * reach the service is thrown as a `ProblemError`.
  */
-export function createClient({ baseUrl, key }: ClientOptions) {
-  const call = async <Answer>(path: string, request: RequestInit, { signal }: CallOptions = {}) => {
-    const headers = new Headers({ Accept: 'application/json' });
-    if (request.body !== undefined) headers.set('Content-Type', 'application/json');
-    if (key !== undefined) headers.set('Authorization', `Bearer ${key}`);
-    const response = await fetch(`${baseUrl}${path}`, {
-      ...request,
-      headers,
-      signal: signal ?? null,
-    }).catch(unreachable);
-    if (!response.ok) throw await ProblemError.from(response);
-    return (await response.json()) as Answer;
-  };
-  const post = <Answer>(path: string, body: unknown, options?: CallOptions) =>
-    call<Answer>(path, { method: 'POST', body: JSON.stringify(body) }, options);
+export function createClient(options: ClientOptions) {
+  const send = createSend(options);
+  const get = async <Answer>(path: string, { signal }: CallOptions = {}) =>
+    (await (await send({ method: 'GET', path, signal })).json()) as Answer;
+  const post = async <Answer>(path: string, body?: unknown, { signal }: CallOptions = {}) =>
+    (await (await send({ method: 'POST', path, body, signal })).json()) as Answer;
 
   return {
-    /** GET /v1/limits; needs no key. */
-    limits: (options?: CallOptions) => call<LimitsAnswer>('/v1/limits', { method: 'GET' }, options),
-    /** POST /v1/fractions; needs a key with scope `compute`. */
-    fractions: <Body extends FractionsRequestInput>(body: Body, options?: CallOptions) =>
-      post<FractionsResult<Body>>('/v1/fractions', body, options),
+    /** POST /v1/fractions; needs the scope `compute`. */
+    fractions: <Body extends FractionsRequestInput>(body: Body, call?: CallOptions) =>
+      post<FractionsResult<Body>>('/v1/fractions', body, call),
     /** POST /v1/public/fractions; no key, one system, rate-limited. */
-    publicFractions: (body: PublicFractionsRequestInput, options?: CallOptions) =>
-      post<FractionsAnswer>('/v1/public/fractions', body, options),
+    publicFractions: (body: PublicFractionsRequestInput, call?: CallOptions) =>
+      post<FractionsAnswer>('/v1/public/fractions', body, call),
+    limits: (call?: CallOptions) => get<LimitsAnswer>('/v1/limits', call),
+
+    signIn: (body: SignInRequest) => post<AccountAnswer>('/v1/sessions', body),
+    signOut: async () => {
+      await send({ method: 'DELETE', path: '/v1/sessions/current' });
+    },
+    account: (call?: CallOptions) => get<AccountAnswer>('/v1/account', call),
+    chooseOrganization: async (organizationId: string) => {
+      const path = '/v1/sessions/current/organization';
+      const answer = await send({ method: 'PUT', path, body: { organizationId } });
+      return (await answer.json()) as AccountAnswer;
+    },
+
+    /** A page of keys, newest first; `next` is the cursor of the page after. */
+    keys: async (cursor?: string, { signal }: CallOptions = {}): Promise<Page<KeyAnswer>> => {
+      const query = cursor === undefined ? '' : `?cursor=${encodeURIComponent(cursor)}`;
+      return readPage<KeyList>(await send({ method: 'GET', path: `/v1/keys${query}`, signal }));
+    },
+    issueKey: (body: KeyRequestInput) => post<IssuedKey>('/v1/keys', body),
+    revokeKey: (id: string) => post<KeyAnswer>(`/v1/keys/${encodeURIComponent(id)}/revocation`),
   };
 }
 
