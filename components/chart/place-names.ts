@@ -28,6 +28,8 @@ interface Panel {
   readonly zero: number;
   /** x of the cursor, px. */
   readonly cursor?: number | undefined;
+  /** What is already written in the panel. */
+  readonly taken?: readonly Rect[];
 }
 
 interface Wanted extends NamedCurve {
@@ -48,6 +50,8 @@ const costs = {
 const unnamed = 220;
 const anchorRoom = 14;
 const anchorStep = 4;
+/** A marker at the very edge would be cut in half, px. */
+const edgeRoom = 8;
 
 /**
  * Writes names at their curves: edges first, then inwards, each where it costs least. A name may
@@ -83,12 +87,13 @@ function cheapest(
 ): PlacedName | undefined {
   const { peak, columns, left } = name.curve;
   const half = (panel.zero - peak.y) / 2;
+  const inside = ({ x }: Point) => x >= left + edgeRoom && x <= right(panel.bounds) - edgeRoom;
   const anchors = columns
     .map((y, i) => ({ x: left + i, y }))
     .filter(({ y }, i) => i % anchorStep === 0 && panel.zero - y >= half);
   let best: Candidate | undefined;
   let least: number = unnamed;
-  for (const anchor of [peak, ...anchors]) {
+  for (const anchor of [peak, ...anchors].filter(inside)) {
     const away = distance(anchor, peak);
     if (away >= least) continue;
     for (const candidate of candidatesAt(anchor, name)) {
@@ -110,11 +115,12 @@ function against(
   name: Wanted,
   all: readonly Wanted[],
   placed: readonly PlacedName[],
-  { bounds, cursor }: Panel,
+  { bounds, cursor, taken = [] }: Panel,
   budget: number,
 ): number {
   if (!contains(bounds, box)) return costs.outside;
-  if (placed.some((other) => overlaps(inflate(other.box, 3), box))) return costs.overlap;
+  const written = [...taken, ...placed.map((other) => other.box)];
+  if (written.some((other) => overlaps(inflate(other, 3), box))) return costs.overlap;
   const middle = centre(box);
   let cost = 0;
   if (cursor !== undefined) {
