@@ -66,11 +66,15 @@ export function placeNames(curves: readonly NamedCurve[], panel: Panel): PlacedN
     .map((curve) => ({ ...curve, curve: sampleCurve(curve.points, panel.bounds) }));
   const placed: PlacedName[] = [];
   for (const name of edgesFirst(wanted)) {
-    const best = cheapest(name, wanted, placed, panel);
+    // Neighbours are most in the way: looked at first, they end a hopeless count early.
+    const nearestFirst = [...wanted].sort((a, b) => away(a, name) - away(b, name));
+    const best = cheapest(name, nearestFirst, placed, panel);
     if (best) placed.push(best);
   }
   return placed;
 }
+
+const away = (a: Wanted, b: Wanted) => Math.abs(a.curve.peak.x - b.curve.peak.x);
 
 /** First, last, second, last but one, … */
 const edgesFirst = <T>(items: readonly T[]): T[] =>
@@ -94,10 +98,10 @@ function cheapest(
   let best: Candidate | undefined;
   let least: number = unnamed;
   for (const anchor of [peak, ...anchors].filter(inside)) {
-    const away = distance(anchor, peak);
-    if (away >= least) continue;
+    const far = distance(anchor, peak);
+    if (far >= least) continue;
     for (const candidate of candidatesAt(anchor, name)) {
-      const sure = away + candidate.cost;
+      const sure = far + candidate.cost;
       if (sure >= least) continue;
       const cost = sure + against(candidate, name, all, placed, panel, least - sure);
       if (cost < least) {
