@@ -3,6 +3,8 @@ module.exports = {
   testEnvironment: 'node',
   roots: ['<rootDir>/tests'],
   testMatch: ['**/*.test.ts'],
+  // Browsers and servers start inside tests; two cores are shared by all of them.
+  testTimeout: 60_000,
   transform: {
     '\\.(ts|tsx|mjs)$': [
       '@swc/jest',

@@ -2,7 +2,7 @@ import { createHash } from 'node:crypto';
 import { existsSync } from 'node:fs';
 import { copyFile, mkdir, readFile, rm, writeFile } from 'node:fs/promises';
 import { createRequire } from 'node:module';
-import { join } from 'node:path';
+import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 
 /**
@@ -25,10 +25,16 @@ const signs =
 const marks = '\u0304\u2032';
 const letters = range(0x41, 0x5a) + range(0x61, 0x7a);
 
-const words = { family: 'Hanken Grotesk', package: 'hanken-grotesk', text: latin + signs };
+const words = {
+  family: 'Hanken Grotesk',
+  name: 'hanken-grotesk',
+  home: dirname(require.resolve('@expo-google-fonts/hanken-grotesk/package.json')),
+  text: latin + signs,
+};
 const numbers = {
   family: 'JetBrains Mono',
-  package: 'jetbrains-mono',
+  name: 'jetbrains-mono',
+  home: dirname(require.resolve('@expo-google-fonts/jetbrains-mono/package.json')),
   text: latin + greek + signs + marks,
 };
 const faces = [
@@ -46,10 +52,9 @@ const faces = [
   },
 ].map((face) => ({ style: 'normal', ...face }));
 
-const packageOf = (face) => `@expo-google-fonts/${face.package}`;
-const fileOf = ({ package: name, weight, style }) =>
+const fileOf = ({ name, weight, style }) =>
   `${name}-${weight}${style === 'italic' ? '-italic' : ''}.woff2`;
-const licenceOf = (face) => `${face.package}-licence.txt`;
+const licenceOf = ({ name }) => `${name}-licence.txt`;
 
 const rule = (face) => `@font-face {
   font-family: '${face.family}';
@@ -62,7 +67,7 @@ const rule = (face) => `@font-face {
 
 const stamp = createHash('sha256')
   .update(await readFile(fileURLToPath(import.meta.url)))
-  .update(faces.map((face) => require(`${packageOf(face)}/package.json`).version).join())
+  .update([words, numbers].map(({ home }) => require(join(home, 'package.json')).version).join())
   .digest('hex');
 const sheet = join(target, 'fonts.css');
 const head = `/* Made by scripts/fonts.mjs from ${stamp} */\n`;
@@ -74,7 +79,7 @@ const isMade = async () =>
 
 async function cut(face) {
   const { default: subsetFont } = await import('subset-font');
-  const whole = await readFile(require.resolve(`${packageOf(face)}/${face.source}`));
+  const whole = await readFile(join(face.home, face.source));
   const part = await subsetFont(whole, face.text, { targetFormat: 'woff2' });
   await writeFile(join(target, fileOf(face)), part);
 }
@@ -85,10 +90,7 @@ if (!(await isMade())) {
   await rm(sheet, { force: true });
   for (const face of faces) await cut(face);
   for (const face of [words, numbers]) {
-    await copyFile(
-      require.resolve(`${packageOf(face)}/LICENSE_FONT`),
-      join(target, licenceOf(face)),
-    );
+    await copyFile(join(face.home, 'LICENSE_FONT'), join(target, licenceOf(face)));
   }
   await writeFile(sheet, head + faces.map(rule).join(''));
 }

@@ -1,5 +1,6 @@
 /** How far a key moves the pH cursor, or to which end. */
-export type CursorMove = { readonly by: '0.01' | '0.1' | '0.5'; readonly sign: 1 | -1 } | { readonly to: 'start' | 'end' };
+export type CursorMove =
+  { readonly by: '0.01' | '0.1' | '0.5'; readonly sign: 1 | -1 } | { readonly to: 'start' | 'end' };
 
 /** What a key press asks of the cursor; undefined for a key that is not its own. */
 export function cursorMove(key: string, shift: boolean): CursorMove | undefined {

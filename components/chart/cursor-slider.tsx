@@ -18,8 +18,6 @@ interface CursorSliderProps {
   readonly onKey: (move: CursorMove) => void;
 }
 
-const hitHeight = 48;
-
 /** The tab as a control: one Tab stop that the keys move. The pointer drags the whole plot. */
 export function CursorSlider(props: CursorSliderProps) {
   const { label, x, axis, width, min, max, now, text, onKey } = props;
@@ -41,7 +39,10 @@ export function CursorSlider(props: CursorSliderProps) {
       }}
       style={[
         styles.slider,
-        { left: tabCentre(x, width) - tab.width / 2, top: axis + tab.drop - (hitHeight - tab.height) / 2 },
+        {
+          left: tabCentre(x, width) - tab.width / 2,
+          top: axis + tab.drop,
+        },
       ]}
     />
   );
@@ -51,7 +52,7 @@ const styles = StyleSheet.create({
   slider: {
     position: 'absolute',
     width: tab.width,
-    height: hitHeight,
+    height: tab.height,
     borderRadius: radius,
     ...webStyle({ pointerEvents: 'none' }),
   },

@@ -16,6 +16,7 @@ interface Size {
 
 /** Free space between the curve's marker and a name that stands beside it, px. */
 const gap = 7;
+const cornerGap = 4;
 
 /** Directions a name may lie in, y downwards: above, right, left, corners, below. */
 const beside: readonly (readonly [number, number])[] = [
@@ -48,8 +49,8 @@ const boxAt = (tip: Point, dx: number, dy: number, { width, height }: Size): Rec
 /** Every way to write a name of this size at a point of its curve. */
 export function candidatesAt(anchor: Point, size: Size): Candidate[] {
   const near = beside.map(([dx, dy], order) => {
-    const reach = dx !== 0 && dy !== 0 ? gap * 0.7 : gap;
-    const tip = { x: anchor.x + dx * reach, y: anchor.y + dy * reach };
+    const sideways = dy === 0 ? gap : cornerGap;
+    const tip = { x: anchor.x + dx * sideways, y: anchor.y + dy * gap };
     return { anchor, box: boxAt(tip, dx, dy, size), cost: order };
   });
   const far = leaders.flatMap(({ length, cost }) =>

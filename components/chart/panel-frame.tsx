@@ -8,6 +8,7 @@ import type { Scale } from './scale';
 
 export interface GridLine {
   readonly value: number;
+  /** Empty for a line without a numeral. */
   readonly label: string;
   /** `axis` is the line values are counted from, `bound` one they never pass. */
   readonly kind: 'axis' | 'bound' | 'grid';
@@ -26,7 +27,14 @@ interface PanelFrameProps {
 }
 
 /** What a panel is drawn on: head, lines, numerals. */
-export function PanelFrame({ rect, y, lines, head, headRise = 12, inside = false }: PanelFrameProps) {
+export function PanelFrame({
+  rect,
+  y,
+  lines,
+  head,
+  headRise = 12,
+  inside = false,
+}: PanelFrameProps) {
   const { colours } = useTheme();
   const stroke = { axis: colours.edge, bound: colours.rule, grid: colours.rule };
   return (
@@ -47,7 +55,7 @@ export function PanelFrame({ rect, y, lines, head, headRise = 12, inside = false
             strokeWidth={1}
             strokeDasharray={kind === 'grid' ? '1 5' : undefined}
           />
-          {!(inside && kind === 'axis') && (
+          {label !== '' && (
             <FigureText
               x={inside ? rect.x + 1 : rect.x - 8}
               y={y(value) + (inside ? -4 : 4)}

@@ -10,16 +10,20 @@ interface PhAxisProps {
   readonly x: Scale;
   readonly domain: readonly [number, number];
   readonly y: number;
+  /** Middle of the cursor's tab, px: it replaces the numerals it would half hide. */
+  readonly tab: number;
   /** Says which pH is meant, where there is room. */
   readonly titled?: boolean;
   /** Stands at the left of the title: the conditions. */
   readonly caption?: ReactNode;
 }
 
+/** Half the tab and half a numeral, px. */
+const tabRoom = 38;
 const minus = '\u2212';
 
 /** The one pH axis under the last panel. */
-export function PhAxis({ x, domain, y, titled = false, caption }: PhAxisProps) {
+export function PhAxis({ x, domain, y, tab, titled = false, caption }: PhAxisProps) {
   const { colours } = useTheme();
   const [from, to] = domain;
   return (
@@ -35,7 +39,7 @@ export function PhAxis({ x, domain, y, titled = false, caption }: PhAxisProps) {
             stroke={colours.edge}
             strokeWidth={1}
           />
-          {numeral && (
+          {numeral && Math.abs(x(value) - tab) > tabRoom && (
             <FigureText x={x(value)} y={y + 20} anchor="middle" fill={colours.inkSoft}>
               {String(value).replace('-', minus)}
             </FigureText>

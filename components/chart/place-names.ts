@@ -28,6 +28,8 @@ interface Panel {
   readonly zero: number;
   /** x of the cursor, px. */
   readonly cursor?: number | undefined;
+  /** What is already written in the panel. */
+  readonly taken?: readonly Rect[];
 }
 
 interface Wanted extends NamedCurve {
@@ -48,6 +50,8 @@ const costs = {
 const unnamed = 220;
 const anchorRoom = 14;
 const anchorStep = 4;
+/** A marker at the very edge would be cut in half, px. */
+const edgeRoom = 8;
 
 /**
  * Writes names at their curves: edges first, then inwards, each where it costs least. A name may
@@ -62,11 +66,15 @@ export function placeNames(curves: readonly NamedCurve[], panel: Panel): PlacedN
     .map((curve) => ({ ...curve, curve: sampleCurve(curve.points, panel.bounds) }));
   const placed: PlacedName[] = [];
   for (const name of edgesFirst(wanted)) {
-    const best = cheapest(name, wanted, placed, panel);
+    // Neighbours are most in the way: looked at first, they end a hopeless count early.
+    const nearestFirst = [...wanted].sort((a, b) => away(a, name) - away(b, name));
+    const best = cheapest(name, nearestFirst, placed, panel);
     if (best) placed.push(best);
   }
   return placed;
 }
+
+const away = (a: Wanted, b: Wanted) => Math.abs(a.curve.peak.x - b.curve.peak.x);
 
 /** First, last, second, last but one, … */
 const edgesFirst = <T>(items: readonly T[]): T[] =>
@@ -83,16 +91,17 @@ function cheapest(
 ): PlacedName | undefined {
   const { peak, columns, left } = name.curve;
   const half = (panel.zero - peak.y) / 2;
+  const inside = ({ x }: Point) => x >= left + edgeRoom && x <= right(panel.bounds) - edgeRoom;
   const anchors = columns
     .map((y, i) => ({ x: left + i, y }))
     .filter(({ y }, i) => i % anchorStep === 0 && panel.zero - y >= half);
   let best: Candidate | undefined;
   let least: number = unnamed;
-  for (const anchor of [peak, ...anchors]) {
-    const away = distance(anchor, peak);
-    if (away >= least) continue;
+  for (const anchor of [peak, ...anchors].filter(inside)) {
+    const far = distance(anchor, peak);
+    if (far >= least) continue;
     for (const candidate of candidatesAt(anchor, name)) {
-      const sure = away + candidate.cost;
+      const sure = far + candidate.cost;
       if (sure >= least) continue;
       const cost = sure + against(candidate, name, all, placed, panel, least - sure);
       if (cost < least) {
@@ -110,11 +119,12 @@ function against(
   name: Wanted,
   all: readonly Wanted[],
   placed: readonly PlacedName[],
-  { bounds, cursor }: Panel,
+  { bounds, cursor, taken = [] }: Panel,
   budget: number,
 ): number {
   if (!contains(bounds, box)) return costs.outside;
-  if (placed.some((other) => overlaps(inflate(other.box, 3), box))) return costs.overlap;
+  const written = [...taken, ...placed.map((other) => other.box)];
+  if (written.some((other) => overlaps(inflate(other, 3), box))) return costs.overlap;
   const middle = centre(box);
   let cost = 0;
   if (cursor !== undefined) {

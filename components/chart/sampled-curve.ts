@@ -1,5 +1,5 @@
 import type { Point, Rect } from './geometry';
-import { bottom, clamp, distance, right } from './geometry';
+import { bottom, clamp, right } from './geometry';
 
 /** A curve known at each whole px of the panel, so that questions about it are cheap. */
 export interface SampledCurve {
@@ -26,23 +26,35 @@ export function sampleCurve(points: readonly Point[], bounds: Rect): SampledCurv
   return { left, columns, peak };
 }
 
-/** Points of the curve within `reach` px to either side of x. */
-function near({ left, columns }: SampledCurve, x: number, reach: number): Point[] {
-  const first = Math.max(0, Math.floor(x - reach) - left);
-  return columns
-    .slice(first, Math.max(first, Math.ceil(x + reach) - left + 1))
-    .map((y, i) => ({ x: left + first + i, y }));
-}
+/** Indices of the columns within `reach` px to either side of x: [first, last]. */
+const near = ({ left, columns }: SampledCurve, x: number, reach: number) =>
+  [
+    Math.max(0, Math.floor(x - reach) - left),
+    Math.min(columns.length - 1, Math.ceil(x + reach) - left),
+  ] as const;
+
+// These two are asked some hundred thousand times for one crowded figure, hence plain loops.
 
 /** Least distance of the curve from a point, looked for within `reach`; Infinity beyond it. */
-export const distanceFrom = (curve: SampledCurve, point: Point, reach: number) =>
-  near(curve, point.x, reach).reduce((least, at) => Math.min(least, distance(at, point)), Infinity);
+export function distanceFrom(curve: SampledCurve, point: Point, reach: number): number {
+  const [first, last] = near(curve, point.x, reach);
+  let least = Infinity;
+  for (let i = first; i <= last; i++) {
+    const dx = curve.left + i - point.x;
+    const dy = (curve.columns[i] ?? Infinity) - point.y;
+    least = Math.min(least, dx * dx + dy * dy);
+  }
+  return Math.sqrt(least);
+}
 
 /** Does the curve pass through the box? */
 export function crosses(curve: SampledCurve, box: Rect): boolean {
-  const within = near(curve, box.x + box.width / 2, box.width / 2);
-  return within.some(({ y }, i) => {
-    const next = within[i + 1]?.y ?? y;
-    return Math.max(y, next) > box.y - 1 && Math.min(y, next) < bottom(box) + 1;
-  });
+  const [first, last] = near(curve, box.x + box.width / 2, box.width / 2);
+  let before = curve.columns[first] ?? Infinity;
+  for (let i = first; i <= last; i++) {
+    const y = curve.columns[i] ?? Infinity;
+    if (Math.max(before, y) > box.y - 1 && Math.min(before, y) < bottom(box) + 1) return true;
+    before = y;
+  }
+  return false;
 }

@@ -9,8 +9,9 @@ export interface StairLabel {
 }
 
 const inset = 6;
+const endInset = 3;
 const cursorGap = 5;
-/** A stair with lower steps names only its first, its last and the current form, px. */
+/** With lower steps than this, a name that leaves its tread could meet another, px. */
 const namedDrop = 16;
 const nameBaseline = 15;
 
@@ -25,24 +26,22 @@ interface NameOptions {
 
 /**
  * Names in the stone under their treads: from the start of the tread if they fit, else back from
- * its end (stone always reaches left, so names cannot meet). A name that the cursor crosses moves
- * right of it if it still fits, else it is drawn over the line.
+ * its end (stone always reaches left, so names cannot meet while the steps are high enough; where
+ * they are not, only the first, the last and the current form may). A name that the cursor crosses
+ * moves right of it if it still fits, else it is drawn over the line.
  */
 export function stairNames(stair: Stair, { widthOf, current, cursor }: NameOptions): StairLabel[] {
   const { treads, drop, left } = stair;
-  const named = treads.filter(
-    ({ index }, i) =>
-      drop >= namedDrop || i === 0 || i === treads.length - 1 || index === current,
-  );
-  return named.flatMap(({ index, left: start, right: end, y }) => {
+  return treads.flatMap(({ index, left: start, right: end, y }, i) => {
     const width = widthOf(index);
-    const fits = start + inset + width <= end - 2;
-    const x = fits ? start + inset : end - inset + 2 - width;
-    if (x < left + 2) return [];
+    const fits = start + inset + width <= end - endInset;
+    const apart = drop >= namedDrop || i === 0 || i === treads.length - 1 || index === current;
+    const x = fits ? start + inset : end - endInset - width;
+    if ((!fits && !apart) || x < left + endInset) return [];
     const label = { key: index, x, y: y + nameBaseline, halo: false };
     if (!hits(cursor, x, width)) return [label];
     const moved = cursor + cursorGap;
-    return [moved + width <= end - 2 ? { ...label, x: moved } : { ...label, halo: true }];
+    return [moved + width <= end - endInset ? { ...label, x: moved } : { ...label, halo: true }];
   });
 }
 
@@ -67,10 +66,11 @@ export function stairMarks(stair: Stair, { marks, cursor, after }: MarkOptions):
     const limit = Math.min(stair.right, (marks[i + 1]?.x ?? Infinity) - 1);
     const fits = (x: number) => x >= taken + markGap && x + width <= limit;
     const free = (x: number) => fits(x) && !hits(cursor, x, width);
+    const clearOfLast = (x: number) => x > (marks[i - 1]?.x ?? -Infinity) + 1;
     const plain = tick + markGap;
     const toLeft = tick - markGap - width;
     const x = [plain, cursor + cursorGap, toLeft].find((at, k) =>
-      k === 1 ? hits(cursor, plain, width) && fits(at) : free(at),
+      k === 1 ? hits(cursor, plain, width) && fits(at) : free(at) && clearOfLast(at),
     );
     const chosen = x ?? (fits(plain) ? plain : undefined);
     if (chosen === undefined) return;

@@ -8,7 +8,13 @@ const width = 30;
 const height = 14;
 
 /** The line, dash and marker of a series, to stand beside its formula. */
-export function Swatch({ style, strong }: { readonly style: SeriesStyle; readonly strong?: boolean }) {
+export function Swatch({
+  style,
+  strong,
+}: {
+  readonly style: SeriesStyle;
+  readonly strong?: boolean;
+}) {
   const { colours } = useTheme();
   return (
     <Svg width={width} height={height} aria-hidden>

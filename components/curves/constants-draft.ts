@@ -1,7 +1,7 @@
 import { limits } from '../../shared/limits';
 import { systemInFull } from '../../shared/system';
 import type { SystemText } from './curves-state';
-import { commaAdvice, plainDecimal } from './ph-steps';
+import { plainDecimal } from './ph-steps';
 import { wellFormed } from './well-formed';
 
 /** A system while it is typed: anything may stand in its fields. */
@@ -57,7 +57,7 @@ export function checkDraft({ name, charge, pKa }: ConstantsDraft): CheckedDraft 
       faults.charge = `Write a whole number ${range(limits.fullyProtonatedCharge)}.`;
     } else if (typeof index === 'number') {
       const at = rows[index];
-      if (at) faults.pKa[at.row] ??= constantFault(at.value, code);
+      if (at) faults.pKa[at.row] ??= constantFault(code);
     } else if (rows.length === 0) faults.pKa[0] = 'Write at least one constant.';
     else {
       faults.pKa[pKa.length - 1] =
@@ -67,10 +67,7 @@ export function checkDraft({ name, charge, pKa }: ConstantsDraft): CheckedDraft 
   return { ok: false, faults };
 }
 
-function constantFault(value: string, code: string): string {
-  const comma = commaAdvice(value);
-  if (comma !== undefined) return comma;
-  return code === 'custom'
+const constantFault = (code: string) =>
+  code === 'custom'
     ? `Write a constant ${range(limits.pKa)}, with at most ${limits.pKa.decimals} decimals.`
     : 'Write a number such as 7.20.';
-}

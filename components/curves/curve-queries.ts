@@ -1,4 +1,5 @@
-import { keepPreviousData, useQuery } from '@tanstack/react-query';
+import { useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
 import { createClient, ProblemError } from '../../shared/client';
 import { curveDigits, gridOf } from './curve-grid';
 import type { Choice } from './curves-state';
@@ -29,19 +30,21 @@ const typingRest = 200;
 /** The exact answer is asked for once the cursor rests, ms. */
 const cursorRest = 150;
 
-/** The curve of a system; the last one stays until it is there. */
+/** The curve of a system; the last one stays until the new one is there, or where it is refused. */
 export function useCurve(choice: Choice) {
   const settled = useSettled(choice, choice.kind === 'typed' ? typingRest : 0);
-  return useQuery({
+  const query = useQuery({
     queryKey: ['curve', settled],
     queryFn: async ({ signal }) => {
       const system = systemOf(settled);
       const body = { system, pH: gridOf(system.pKa), digits: curveDigits };
       return drawnCurve(settled, await client.publicFractions(body, { signal }));
     },
-    placeholderData: keepPreviousData,
     ...patience,
   });
+  const [last, setLast] = useState(query.data);
+  if (query.data && query.data !== last) setLast(query.data);
+  return { ...query, drawn: query.data ?? last };
 }
 
 /** What is present at a pH: from the curve at once, exactly as soon as the cursor rests. */
@@ -51,7 +54,7 @@ export function useReading(drawn: DrawnCurve | undefined, pH: string): Reading |
     queryKey: ['reading', drawn?.choice, settled],
     enabled: drawn !== undefined,
     queryFn: async ({ signal }) => {
-      if (!drawn) return undefined;
+      if (!drawn) return null;
       const body = { system: systemOf(drawn.choice), pH: settled };
       return exactReading(await client.publicFractions(body, { signal })) ?? null;
     },

@@ -1,10 +1,10 @@
 import { useMemo, useState } from 'react';
-import type { Ref } from 'react';
+import type { ReactNode, Ref } from 'react';
 import { StyleSheet, View } from 'react-native';
 import Svg from 'react-native-svg';
 import type { CursorMove } from '../chart/cursor-keys';
 import { CursorSlider } from '../chart/cursor-slider';
-import { FigureCursor } from '../chart/figure-cursor';
+import { FigureCursor, tabCentre } from '../chart/figure-cursor';
 import { PhAxis } from '../chart/ph-axis';
 import { linearScale } from '../chart/scale';
 import { usePlotDrag } from '../chart/use-plot-drag';
@@ -28,7 +28,7 @@ interface CurvesFigureProps {
   readonly height: number;
   readonly compact: boolean;
   /** Conditions, printed under the axis. */
-  readonly caption: string;
+  readonly caption: ReactNode;
   readonly onMove: (pH: string) => void;
   readonly ref?: Ref<View>;
 }
@@ -46,9 +46,7 @@ export function CurvesFigure(props: CurvesFigureProps) {
   const placing = useCursorWhenDrawn(drawn, cursor);
   const drag = usePlotDrag((px) => onMove(pHAt(x.invert(px), range)));
   const step = (move: CursorMove) =>
-    onMove(
-      'to' in move ? pHEnd(move.to, range) : pHStep(reading.pH, move.by, move.sign, range),
-    );
+    onMove('to' in move ? pHEnd(move.to, range) : pHStep(reading.pH, move.by, move.sign, range));
   const line = { x: cursor, top: 4, axis: layout.axis, width, text: reading.pH };
   const shared = { drawn, x, compact, strong: reading.predominant };
   return (
@@ -56,7 +54,13 @@ export function CurvesFigure(props: CurvesFigureProps) {
       <View ref={ref} role="img" aria-label={describeCurve(drawn, reading)}>
         <Svg width={width} height={layout.height} aria-hidden>
           {layout.stair && (
-            <PredominanceStair part="stone" rect={layout.stair} reading={reading} drawn={drawn} x={x} />
+            <PredominanceStair
+              part="stone"
+              rect={layout.stair}
+              reading={reading}
+              drawn={drawn}
+              x={x}
+            />
           )}
           {layout.charge && <ChargeLine {...shared} rect={layout.charge} />}
           {layout.fractions && (
@@ -66,12 +70,19 @@ export function CurvesFigure(props: CurvesFigureProps) {
             x={x}
             domain={range}
             y={layout.axis}
+            tab={tabCentre(cursor, width)}
             titled={!compact}
             caption={compact ? undefined : caption}
           />
           <FigureCursor {...line} part="line" />
           {layout.stair && (
-            <PredominanceStair part="text" rect={layout.stair} reading={reading} drawn={drawn} x={x} />
+            <PredominanceStair
+              part="text"
+              rect={layout.stair}
+              reading={reading}
+              drawn={drawn}
+              x={x}
+            />
           )}
           <CursorMarks layout={layout} drawn={drawn} reading={reading} cursor={cursor} />
           <FigureCursor {...line} part="tab" />

@@ -1,6 +1,12 @@
-import { Page } from '../shell/page';
+import './no-eval';
+import { useLayout } from '../ui/use-layout';
+import { CurvesPhone } from './curves-phone';
+import { CurvesWide } from './curves-wide';
+import { useCurves } from './use-curves';
 
-/** Placeholder until the screen is here. */
+/** Curves: what forms are present at this pH. */
 export function CurvesScreen() {
-  return <Page title="Curves">{null}</Page>;
+  const curves = useCurves();
+  const { rail } = useLayout();
+  return rail ? <CurvesWide curves={curves} /> : <CurvesPhone curves={curves} />;
 }

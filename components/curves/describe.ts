@@ -23,10 +23,11 @@ export function describeReading(drawn: DrawnCurve, reading: Reading): string {
 
 /** The figure in words: what it shows, over which range, and what it says. */
 export function describeCurve(drawn: DrawnCurve, reading: Reading): string {
-  const { answer, range, formulas } = drawn;
-  const steps = answer.predominance.map(({ species, from }) =>
-    from === null ? form(drawn, species) : `from pH ${said(from)} ${form(drawn, species)}`,
-  );
+  const { answer, range, formulas, stair, meetings } = drawn;
+  const steps = [
+    form(drawn, stair[0]?.index ?? 0),
+    ...meetings.map(({ text, after }) => `from pH ${said(text)} ${form(drawn, after)}`),
+  ];
   return (
     `Fractions of the ${formulas.length} forms of ${answer.name ?? 'the system'} ` +
     `over pH ${said(String(range[0]))} to ${range[1]}. ` +

@@ -4,8 +4,9 @@ import type { Choice } from './curves-state';
 import { systemOf } from './curves-state';
 import type { Curve } from './follow-curve';
 import { curveOf } from './follow-curve';
-import type { PHRange } from './ph-steps';
 import { rangeOf } from './curve-grid';
+import { shownConstant } from './rounded';
+import type { PHRange } from './ph-steps';
 import { formulasOf } from './species-formulas';
 
 /**
@@ -19,8 +20,28 @@ export interface DrawnCurve {
   readonly formulas: readonly string[];
   readonly range: PHRange;
   readonly stair: readonly StairRange[];
+  readonly meetings: readonly Meeting[];
   /** Indices of the forms worth a line. */
   readonly shown: readonly number[];
+}
+
+/** Two forms that predominate one after the other, and the pH at which they are equal. */
+export interface Meeting {
+  readonly before: number;
+  readonly after: number;
+  readonly pH: number;
+  /** The constant as given; where a form between them never predominates, the mean of several. */
+  readonly text: string;
+}
+
+function meetingsOf({ predominance }: FractionsAnswer, pKa: readonly string[]): Meeting[] {
+  return predominance.flatMap(({ species, from }, i) => {
+    const before = predominance[i - 1]?.species;
+    if (from === null || before === undefined) return [];
+    const given = species === before + 1 ? pKa[before] : undefined;
+    const text = shownConstant(given ?? String(Number(from)));
+    return [{ before, after: species, pH: Number(from), text }];
+  });
 }
 
 /** With more forms than series colours, only those that reach this fraction are drawn. */
@@ -42,6 +63,7 @@ export function drawnCurve(choice: Choice, answer: FractionsAnswer): DrawnCurve 
       from: bound(from),
       to: bound(to),
     })),
+    meetings: meetingsOf(answer, systemOf(choice).pKa),
     shown: curve.fractions.flatMap((alpha, index) =>
       curve.fractions.length <= seriesCount || Math.max(...alpha) >= worthDrawing ? [index] : [],
     ),

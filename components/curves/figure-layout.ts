@@ -67,8 +67,8 @@ function wideShares(layers: readonly Layer[], free: number): Shares {
     const half = Math.min(free / layers.length, 260);
     return { fractions: 0, predominance: half, charge: half };
   }
-  const predominance = has('predominance') ? clamp(free * 0.22, 84, 150) : 0;
-  const charge = has('charge') ? clamp(free * 0.17, 56, 120) : 0;
+  const predominance = has('predominance') ? clamp(free * 0.22, 72, 150) : 0;
+  const charge = has('charge') ? clamp(free * 0.17, 48, 120) : 0;
   return { fractions: free - predominance - charge, predominance, charge };
 }
 

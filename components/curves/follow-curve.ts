@@ -39,7 +39,8 @@ export function followCurve(answer: FractionsAnswer, pH: string): Reading | unde
   const target = Number(pH);
   const from = Number(points[0]?.pH);
   const step = Number(points[1]?.pH) - from || 1;
-  const nearest = points[Math.min(points.length - 1, Math.max(0, Math.round((target - from) / step)))];
+  const nearest =
+    points[Math.min(points.length - 1, Math.max(0, Math.round((target - from) / step)))];
   if (!nearest) return undefined;
   const moved = target - Number(nearest.pH);
   const shift = (protonsLost: number) => protonsLost - nearest.predominant;

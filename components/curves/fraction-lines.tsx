@@ -9,7 +9,7 @@ import type { Scale } from '../chart/scale';
 import { linearScale } from '../chart/scale';
 import { SeriesLine } from '../chart/series-line';
 import { alphaSign } from '../chart/symbols';
-import { formulaWidth } from '../chart/text-width';
+import { formulaWidth, numeralsWidth } from '../chart/text-width';
 import { useTheme } from '../ui/theme';
 import type { DrawnCurve } from './drawn-curve';
 
@@ -18,7 +18,19 @@ export const alphaScale = (rect: Rect) => linearScale([0, 1], [bottom(rect), rec
 /** Below this the pen is lifted: no bundle of dashes on the zero line. */
 const penDown = 0.003;
 /** Room above the line α = 1 where names may stand, px. */
-const headroom = 24;
+const headroom = 26;
+
+/** A form that stays rarer than this has no curve to stand at. */
+const worthNaming = 0.02;
+
+/** Room of the numerals that stand inside a compact panel. */
+const numerals = (rect: Rect): Rect[] =>
+  [1, 0.5].map((value) => ({
+    x: rect.x,
+    y: alphaScale(rect)(value) - 16,
+    width: numeralsWidth(String(value), 12) + 2,
+    height: 14,
+  }));
 
 interface FractionLinesProps {
   readonly drawn: DrawnCurve;
@@ -37,30 +49,34 @@ export const FractionLines = memo(function FractionLines(props: FractionLinesPro
   const lines = useMemo(() => {
     const y = alphaScale(rect);
     return drawn.shown.map((index) => {
-      const points = (drawn.curve.fractions[index] ?? []).map((alpha, i) => ({
+      const alphas = drawn.curve.fractions[index] ?? [];
+      const points = alphas.map((alpha, i) => ({
         x: x(drawn.curve.pH[i] ?? 0),
         y: y(alpha),
         drawn: alpha >= penDown,
       }));
-      return { index, points, d: linePath(points) };
+      return { index, points, d: linePath(points), peak: Math.max(...alphas) };
     });
   }, [drawn, rect, x]);
   const names = useMemo(
     () =>
       placeNames(
-        lines.map(({ index, points }) => ({
-          key: index,
-          width: formulaWidth(drawn.formulas[index] ?? '', nameSize),
-          height: nameHeight,
-          points,
-        })),
+        lines
+          .filter(({ peak }) => peak >= worthNaming)
+          .map(({ index, points }) => ({
+            key: index,
+            width: formulaWidth(drawn.formulas[index] ?? '', nameSize),
+            height: nameHeight,
+            points,
+          })),
         {
           bounds: { ...rect, y: rect.y - headroom, height: rect.height + headroom },
           zero: bottom(rect),
           cursor,
+          taken: compact ? numerals(rect) : [],
         },
       ),
-    [lines, drawn, rect, cursor],
+    [lines, drawn, rect, cursor, compact],
   );
   return (
     <>
@@ -72,7 +88,7 @@ export const FractionLines = memo(function FractionLines(props: FractionLinesPro
         head={compact ? undefined : <>{alphaSign} fraction of each form</>}
         lines={(compact ? [0, 0.5, 1] : [0, 0.25, 0.5, 0.75, 1]).map((value) => ({
           value,
-          label: String(value),
+          label: compact && value === 0 ? '' : String(value),
           kind: value === 0 ? 'axis' : value === 1 ? 'bound' : 'grid',
         }))}
       />

@@ -17,7 +17,8 @@ export function neighbourRatio({
   predominant,
 }: Reading): NeighbourRatio | undefined {
   const share = (index: number) => Number(fractions[index] ?? -1);
-  const neighbour = share(predominant + 1) > share(predominant - 1) ? predominant + 1 : predominant - 1;
+  const neighbour =
+    share(predominant + 1) > share(predominant - 1) ? predominant + 1 : predominant - 1;
   const under = Math.min(predominant, neighbour);
   const ratio = neighbourRatios[under];
   return ratio === undefined ? undefined : { over: under + 1, under, ratio };

@@ -1,13 +1,14 @@
+const number = /^[-\u2212\u2013]?\d+(,\d+)?$/;
+
 /**
- * Splits pasted text into constants: rows, cells, semicolons or blanks part them, and commas do
- * wherever they cannot be decimal commas ("2.148, 7.198" or "2, 7"). A value that keeps its comma is
- * left for the field to point out: nothing is altered silently.
+ * Splits pasted text into constants: rows, cells, semicolons or blanks part them. Commas part them
+ * too ("2.148, 7.198", "2,7,12"), except where each piece reads as one number with a decimal comma
+ * ("2,148; 7,198").
  *
  * @returns the values as written; fewer than two mean that no list was pasted.
  */
 export function pastedConstants(text: string): string[] {
-  const commaSeparates = text.includes('.') || /,\s|,[^,]*,/.test(text);
-  const rows = text.split(/[\s;]+/);
-  const values = commaSeparates ? rows.flatMap((row) => row.split(',')) : rows;
-  return values.filter((value) => value !== '');
+  const pieces = text.split(/[\s;]+/).filter((piece) => piece !== '');
+  const decimalCommas = !text.includes('.') && pieces.every((piece) => number.test(piece));
+  return decimalCommas ? pieces : pieces.flatMap((piece) => piece.split(',').filter(Boolean));
 }

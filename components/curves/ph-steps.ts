@@ -25,21 +25,21 @@ export const pHEnd = (to: 'start' | 'end', range: PHRange) =>
   written(new Exact(range[to === 'start' ? 0 : 1]));
 
 type TypedPH =
-  | { readonly ok: true; readonly pH: string }
-  | { readonly ok: false; readonly error: string };
+  { readonly ok: true; readonly pH: string } | { readonly ok: false; readonly error: string };
 
-/** Papers print a true minus, keyboards a hyphen: both mean minus. */
-export const plainDecimal = (text: string) => text.trim().replace(/[\u2212\u2013]/g, '-');
-
-/** What to write instead of a decimal comma; undefined where there is none. */
-export const commaAdvice = (text: string) =>
-  /^-?\d+,\d+$/.test(text) ? `Write ${text.replace(',', '.')}, with a point.` : undefined;
+/**
+ * A number as the contract writes it: papers print a true minus, and many keyboards have only a
+ * comma for the point.
+ */
+export const plainDecimal = (text: string) =>
+  text
+    .trim()
+    .replace(/[\u2212\u2013]/g, '-')
+    .replace(/^(-?\d+),(\d+)$/, '$1.$2');
 
 /** A pH as somebody typed it, or what to type instead. */
 export function typedPH(text: string, range: PHRange): TypedPH {
   const plain = plainDecimal(text);
-  const comma = commaAdvice(plain);
-  if (comma !== undefined) return { ok: false, error: comma };
   if (!decimalPattern.test(plain)) return { ok: false, error: 'Write a pH such as 7.40.' };
   const valid = pHValue.safeParse(plain).success;
   if (!valid || new Exact(plain).lessThan(range[0]) || new Exact(plain).greaterThan(range[1])) {

@@ -11,7 +11,7 @@ import { WaterLabel } from '../chart/water-label';
 import type { DrawnCurve } from './drawn-curve';
 import { endCharges } from './drawn-curve';
 import type { Reading } from './follow-curve';
-import { shownCharge, shownConstant, trueMinus } from './rounded';
+import { shownCharge, trueMinus } from './rounded';
 
 interface PredominanceStairProps {
   readonly drawn: DrawnCurve;
@@ -45,9 +45,7 @@ export function PredominanceStair({ drawn, reading, rect, x, part }: Predominanc
       />
     );
   }
-  const marks = drawn.answer.predominance.flatMap(({ from }) =>
-    from === null ? [] : [{ x: x(Number(from)), text: trueMinus(shownConstant(from)) }],
-  );
+  const marks = drawn.meetings.map(({ pH, text }) => ({ x: x(pH), text: trueMinus(text) }));
   const cursor = x(Number(reading.pH));
   const water = ` ${trueMinus(shownCharge(reading.meanCharge))}`;
   return (

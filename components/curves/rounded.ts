@@ -21,10 +21,10 @@ export function shownCharge(charge: string): string {
   return Number(text) === 0 ? text.replace('-', '') : text;
 }
 
-/** A ratio to three digits, with an exponent from 10⁴ on and below 10⁻³. */
+/** A ratio to three digits, with an exponent from 10³ on and below 10⁻³. */
 export function shownRatio(ratio: string): string {
   const value = new Exact(ratio).toSignificantDigits(3);
-  return value.isZero() || (value.lessThan(10_000) && value.greaterThanOrEqualTo(smallest))
+  return value.isZero() || value.greaterThanOrEqualTo(smallest)
     ? value.toPrecision(3)
     : value.toExponential(2);
 }

@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
-import { createClient, ProblemError } from '../../shared/client';
+import { createClient, type ProblemError } from '../../shared/client';
 import type { LimitsAnswer } from '../../shared/limits-answer';
 
 const client = createClient({ baseUrl: '' });

@@ -1,5 +1,5 @@
 import { Link } from 'expo-router';
-import { View } from 'react-native';
+import { StyleSheet, View } from 'react-native';
 import { space } from '../ui/theme';
 import { Words } from '../ui/words';
 import { Page } from './page';
@@ -11,10 +11,10 @@ export function NotFound() {
   return (
     <Page title="No page at this address">
       <Prose>
-        <View style={{ gap: space[3] }}>
+        <View style={styles.places}>
           <Words>The address may be mistyped, or the page has moved. These are the places:</Words>
           {places.map((place) => (
-            <Link key={place.href} href={place.href}>
+            <Link key={place.href} href={place.href} style={styles.place}>
               <Words kind="button" tone="well">
                 {place.label}
               </Words>
@@ -26,3 +26,8 @@ export function NotFound() {
     </Page>
   );
 }
+
+const styles = StyleSheet.create({
+  places: { gap: space[2] },
+  place: { paddingVertical: space[2] },
+});

@@ -2,7 +2,7 @@ import Head from 'expo-router/head';
 import type { ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { Mark } from '../ui/mark';
-import { space, useTheme } from '../ui/theme';
+import { space } from '../ui/theme';
 import { useLayout } from '../ui/use-layout';
 import { Words } from '../ui/words';
 
@@ -20,14 +20,13 @@ interface PageProps {
 
 /** A place's page: its title, its one h1, its gutters. */
 export function Page({ title, heading = title, subtitle, actions, children }: PageProps) {
-  const { colours } = useTheme();
   const { rail } = useLayout();
   return (
     <>
       <Head>
         <title>{`${title} · Stepwell`}</title>
       </Head>
-      <View style={rail ? styles.headWide : [styles.head, { borderBottomColor: colours.rule }]}>
+      <View style={[styles.head, rail && styles.headWide]}>
         {!rail && <Mark size={28} />}
         <View style={rail ? styles.titleWide : styles.title}>
           <Words kind="title" heading={1}>
@@ -51,13 +50,7 @@ const styles = StyleSheet.create({
     paddingHorizontal: space[4],
     paddingVertical: space[2],
   },
-  headWide: {
-    flexDirection: 'row',
-    alignItems: 'center',
-    gap: space[3],
-    minHeight: 76,
-    paddingHorizontal: space[6],
-  },
+  headWide: { minHeight: 76, paddingHorizontal: space[6] },
   title: { flex: 1, minWidth: 0 },
   titleWide: {
     flex: 1,

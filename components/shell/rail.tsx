@@ -68,7 +68,7 @@ function WidePlace({ place, current }: { readonly place: Place; readonly current
 const styles = StyleSheet.create({
   rail: {
     borderRightWidth: 1,
-    ...webStyle({ position: 'sticky', top: 0, height: '100vh', overflowY: 'auto', zIndex: 1 }),
+    ...webStyle({ position: 'sticky', top: 0, height: '100dvh', overflowY: 'auto', zIndex: 1 }),
   },
   name: {
     height: 76,

@@ -4,7 +4,7 @@ import { useTheme } from '../ui/theme';
 import { ToastProvider } from '../ui/toast';
 import { useLayout } from '../ui/use-layout';
 import { webStyle } from '../ui/web-style';
-import { Bar } from './bar';
+import { Bar, barHeight } from './bar';
 import { Rail } from './rail';
 import { mainId, SkipLink } from './skip-link';
 
@@ -16,7 +16,9 @@ export function Shell({ children }: { readonly children: ReactNode }) {
   const { colours } = useTheme();
   const { rail } = useLayout();
   return (
-    <ToastProvider>
+    <ToastProvider
+      bottom={rail ? '24px' : `calc(${barHeight + 12}px + env(safe-area-inset-bottom))`}
+    >
       <View
         style={[
           styles.shell,
@@ -35,6 +37,14 @@ export function Shell({ children }: { readonly children: ReactNode }) {
 }
 
 const styles = StyleSheet.create({
-  shell: { flexGrow: 1, ...webStyle({ minHeight: '100vh' }) },
+  shell: {
+    flexGrow: 1,
+    ...webStyle({
+      minHeight: '100dvh',
+      paddingTop: 'env(safe-area-inset-top)',
+      paddingLeft: 'env(safe-area-inset-left)',
+      paddingRight: 'env(safe-area-inset-right)',
+    }),
+  },
   main: { flexGrow: 1, flexShrink: 1, minWidth: 0 },
 });

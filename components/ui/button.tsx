@@ -60,7 +60,7 @@ export function Button({
           styles.button,
           styles[size],
           hideLabel && { width: heights[size], paddingHorizontal: 0 },
-          kind === 'quiet' && styles.quiet,
+          kind === 'quiet' && !hideLabel && styles.quiet,
           softColour,
           surface(colours, disabled ? 'disabled' : kind, hovered, pressed),
         ]}
@@ -122,7 +122,8 @@ const styles = StyleSheet.create({
   regular: { minHeight: heights.regular, paddingHorizontal: space[4] },
   main: { minHeight: heights.main, paddingHorizontal: space[4] },
   small: { minHeight: heights.small, paddingHorizontal: space[3] },
-  quiet: { paddingHorizontal: space[1] },
+  // Its word, not its invisible border, stands on the column's edge.
+  quiet: { paddingHorizontal: space[1], marginHorizontal: -space[1] - 1 },
   grow: { flexGrow: 1, flexShrink: 1 },
   why: { marginTop: space[1] },
 });

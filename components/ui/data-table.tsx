@@ -36,7 +36,7 @@ export function DataTable({ caption, columns, rows, maxHeight, hideCaption }: Da
   const cell = (column: Column): React.CSSProperties => ({
     textAlign: column.numeric ? 'right' : 'left',
     height: rail ? 32 : 40,
-    paddingBlock: 0,
+    paddingBlock: space[1],
     paddingLeft: column === columns[0] ? 0 : space[2],
     paddingRight: column === columns.at(-1) ? 0 : space[2],
     borderBottom: `1px solid ${colours.rule}`,

@@ -43,5 +43,5 @@ export function Notice({ tone, title, children, requestId }: NoticeProps) {
 
 const styles = StyleSheet.create({
   notice: { flexDirection: 'row', gap: space[3], padding: space[4], borderRadius: radius },
-  words: { flex: 1, gap: space[1] },
+  words: { flex: 1, gap: space[1], alignItems: 'flex-start' },
 });

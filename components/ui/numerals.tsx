@@ -25,12 +25,15 @@ export function Numerals({ size, bold, tone, numberOfLines, nativeID, children }
   const around = useSurroundingText();
   const shownTone = tone ?? around?.tone ?? 'ink';
   const ownSize = size ?? (around ? undefined : 15);
+  const strong = bold ?? around?.strong ?? false;
   const parts =
     typeof children === 'string' || typeof children === 'number'
       ? numberParts(String(children))
       : undefined;
   return (
-    <SurroundingTextProvider value={{ size: ownSize ?? around?.size ?? 15, tone: shownTone }}>
+    <SurroundingTextProvider
+      value={{ size: ownSize ?? around?.size ?? 15, tone: shownTone, strong }}
+    >
       <Text
         nativeID={nativeID}
         numberOfLines={numberOfLines}
@@ -38,7 +41,8 @@ export function Numerals({ size, bold, tone, numberOfLines, nativeID, children }
           styles.numerals,
           {
             color: colours[shownTone],
-            fontWeight: bold ? '700' : (ownSize ?? 0) >= 20 ? '500' : '400',
+            // Medium is what stands level with semibold words, and with large sizes.
+            fontWeight: bold ? '700' : strong || (ownSize ?? 0) >= 20 ? '500' : '400',
           },
           ownSize !== undefined && { fontSize: ownSize, lineHeight: lineHeights[ownSize] },
           ownSize === 64 && styles.answer,

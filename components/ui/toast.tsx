@@ -2,7 +2,6 @@ import { createContext, useCallback, useContext, useEffect, useState, type React
 import { Pressable, StyleSheet, View } from 'react-native';
 import { Icon } from './icon';
 import { radius, space, useTheme } from './theme';
-import { useLayout } from './use-layout';
 import { webStyle } from './web-style';
 import { Words } from './words';
 
@@ -19,8 +18,14 @@ export const useToast = () => useContext(Say);
 
 const shownFor = 6000;
 
+interface ToastProviderProps {
+  /** Distance from the foot of the window, a CSS length. */
+  readonly bottom: string;
+  readonly children: ReactNode;
+}
+
 /** Gives its children `useToast` and shows, at the foot of the window, what they say. */
-export function ToastProvider({ children }: { readonly children: ReactNode }) {
+export function ToastProvider({ bottom, children }: ToastProviderProps) {
   const [message, setMessage] = useState<ToastMessage>();
   const [held, setHeld] = useState(false);
   const say = useCallback((next: ToastMessage) => setMessage(next), []);
@@ -32,24 +37,29 @@ export function ToastProvider({ children }: { readonly children: ReactNode }) {
   return (
     <Say value={say}>
       {children}
-      <Toast message={message} onHold={setHeld} onClose={() => setMessage(undefined)} />
+      <Toast
+        message={message}
+        bottom={bottom}
+        onHold={setHeld}
+        onClose={() => setMessage(undefined)}
+      />
     </Say>
   );
 }
 
 interface ToastProps {
   readonly message: ToastMessage | undefined;
+  readonly bottom: string;
   /** The pointer or the focus rests on it: it must not go away. */
   readonly onHold: (held: boolean) => void;
   readonly onClose: () => void;
 }
 
-function Toast({ message, onHold, onClose }: ToastProps) {
+function Toast({ message, bottom, onHold, onClose }: ToastProps) {
   const { colours } = useTheme();
-  const { rail } = useLayout();
   const undo = message?.undo;
   return (
-    <View role="status" style={[styles.place, { bottom: rail ? space[6] : 64 + space[3] }]}>
+    <View role="status" style={[styles.place, webStyle({ bottom })]}>
       {message && (
         <View
           style={[

@@ -27,7 +27,11 @@ export function Words({ kind, tone, heading, numberOfLines, nativeID, children }
   const shownTone = tone ?? around?.tone ?? (shownKind === 'help' ? 'inkSoft' : 'ink');
   return (
     <SurroundingTextProvider
-      value={{ size: style?.fontSize ?? around?.size ?? styles.body.fontSize, tone: shownTone }}
+      value={{
+        size: style?.fontSize ?? around?.size ?? styles.body.fontSize,
+        tone: shownTone,
+        strong: style ? style.fontWeight === '600' : (around?.strong ?? false),
+      }}
     >
       <Text
         nativeID={nativeID}

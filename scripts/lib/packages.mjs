@@ -11,7 +11,7 @@ const npmArguments = ['ci', '--include=dev', '--no-audit', '--no-fund'];
 
 /** Installs exactly what the lock file names, when it is not what is installed. */
 export async function installPackages() {
-  const installed = stamp(stampPath, contentHash(['package.json', 'package-lock.json']));
+  const installed = stamp(stampPath, contentHash(['package-lock.json']));
   if (installed.fresh) return 'as the lock file has them';
   await rm(stampPath, { force: true });
   const npm = process.env.npm_execpath;

@@ -38,10 +38,13 @@ export async function makeDatabase(cluster, secrets) {
 
 /**
  * For tests: a role that may create databases, whose address is answered, and beside it the
- * running server's role with the same password, so that what it may not do can be shown.
+ * running server's role with the same password, so that what it may not do can be shown. The
+ * first is a member of the second: it must end its connections to drop a database.
  */
 export async function makeTestRoles(cluster, password) {
   const tester = 'stepwell_test';
-  await cluster.sql(role(tester, password, 'CREATEDB') + role(appRole, password));
+  await cluster.sql(
+    role(tester, password, 'CREATEDB') + role(appRole, password) + `GRANT ${appRole} TO ${tester};`,
+  );
   return cluster.url(tester, password, 'postgres');
 }

@@ -1,7 +1,7 @@
 import type Decimal from 'decimal.js';
 import { Composition, type Factors, factorsOf, termsAt } from './composition';
 import { Exact } from './contexts';
-import { anchorEvery } from './error-bounds';
+import { anchorEvery, type Plan } from './plan';
 import { type PHPoints, valuesOf } from './ph-points';
 import { powerOfTen } from './powers-of-ten';
 import type { Refinable } from './settle';
@@ -35,14 +35,14 @@ function termsAlong(factors: Factors, points: PHPoints): (pH: Decimal, i: number
 }
 
 /**
- * What `answer` makes of a system's composition at each point, in order. Compositions are made with
- * at least `precision` digits, and with twice as many for each further level that `answer` asks
+ * What `answer` makes of a system's composition at each point, in order. Compositions are made as
+ * planned, and with twice as many for each further level that `answer` asks
  * for. A pH that a list repeats is answered once, because raising precision can be dear.
  */
 export function alongPoints<T>(
   system: AcidBaseSystem,
   points: PHPoints,
-  precision: number,
+  { precision, loss }: Plan,
   answer: (point: Refinable) => T,
 ): T[] {
   const constants = constantsOf(system);
@@ -56,7 +56,7 @@ export function alongPoints<T>(
     const made = [new Composition(planned, termsOf(pH, i))];
     const at = (level: number) =>
       (made[level] ??= new Composition(factorsAt(level), termsAt(factorsAt(level), pH)));
-    return answer({ pH, at });
+    return answer({ pH, at, loss });
   };
 
   if (points.kind === 'grid') return valuesOf(points).map(answerAt);

@@ -38,7 +38,7 @@ export function termsAt({ context, constants }: Factors, pH: Decimal): Decimal[]
 
 /**
  * A system at one pH: t_0 = 1, α_j = t_j/Σ_k t_k. Products, sums and one quotient of positive
- * numbers, so that nothing cancels; `errorBoundsOf` (error-bounds.ts) counts their roundings.
+ * numbers, so that nothing cancels; `planFor` (plan.ts) counts their roundings.
  */
 export class Composition {
   readonly precision: number;

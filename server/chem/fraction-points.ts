@@ -1,10 +1,9 @@
 import { alongPoints } from './along-points';
-import { errorBoundsOf } from './error-bounds';
+import { planFor } from './plan';
 import { nth } from './nth';
 import { labelsOf, type PHPoints } from './ph-points';
 import { boundariesOf, predominantAt } from './predominance';
 import { fractionQuantities, meanChargeQuantity, ratioQuantities } from './quantities';
-import { precisionFor } from './rounding';
 import { settle } from './settle';
 import type { AcidBaseSystem } from './system';
 
@@ -31,21 +30,19 @@ export interface FractionPoint {
  * Every digit is that of the exact value for the decimals as given, rounded half-even: fractions
  * and ratios to `digits` (1–60) significant digits however rare the species, the charge to `digits`
  * places after the point. Exponent form below 10⁻⁶ and from 10^digits on; the charge always plain.
- * Inputs are taken as validated (see `AcidBaseSystem`, `PHPoints`).
+ * Inputs are taken as validated (see `AcidBaseSystem`, `PHPoints`). Points of one pH share arrays.
  */
 export function fractionPoints(
   system: AcidBaseSystem,
   points: PHPoints,
   digits: number,
 ): FractionPoint[] {
-  const bounds = errorBoundsOf(system, points);
-  const fractions = fractionQuantities(system, bounds, digits);
-  const ratios = ratioQuantities(system, bounds, digits);
-  const charge = meanChargeQuantity(system, bounds, digits);
+  const fractions = fractionQuantities(system, digits);
+  const ratios = ratioQuantities(system, digits);
+  const charge = meanChargeQuantity(system, digits);
   const boundaries = boundariesOf(system);
-  const precision = precisionFor(Math.max(bounds.fraction, bounds.meanCharge), digits);
 
-  const answers = alongPoints(system, points, precision, (point) => ({
+  const answers = alongPoints(system, points, planFor(system, points, digits), (point) => ({
     fractions: fractions.map((fraction) => settle(point, fraction)),
     neighbourRatios: ratios.map((ratio) => settle(point, ratio)),
     meanCharge: settle(point, charge),
@@ -56,10 +53,8 @@ export function fractionPoints(
 
 /** The fractions alone, one row a pH, as `fractionPoints` gives them. */
 export function fractionRows(system: AcidBaseSystem, points: PHPoints, digits: number): string[][] {
-  const bounds = errorBoundsOf(system, points);
-  const fractions = fractionQuantities(system, bounds, digits);
-  const precision = precisionFor(bounds.fraction, digits);
-  return alongPoints(system, points, precision, (point) =>
+  const fractions = fractionQuantities(system, digits);
+  return alongPoints(system, points, planFor(system, points, digits), (point) =>
     fractions.map((fraction) => settle(point, fraction)),
   );
 }

@@ -1,7 +1,7 @@
 import type Decimal from 'decimal.js';
 import { Exact } from './contexts';
 
-/** Digits looked at behind the rounding place; they fill one word of decimal.js. */
+/** Digits in one word of decimal.js; as many are looked at behind the rounding place. */
 const tailDigits = 7;
 const word = 10 ** tailDigits;
 
@@ -21,28 +21,26 @@ export function tailAfter({ d, e }: Decimal, kept: number): number {
   return head + Math.floor(((d[index + 1] ?? 0) * scale) / word);
 }
 
-/**
- * How far, in 10⁻⁷ of a unit in the last place kept, a value may be off: `error` rounding units of
- * `precision` digits, against a unit of 10^−digits of its leading power (or of 1, for places after
- * the point). One more for the digits behind the tail, one for the products of errors.
- */
-export const slackOf = (error: number, digits: number, precision: number) =>
-  Math.ceil(5 * error * 10 ** (digits + tailDigits - precision)) + 2;
+/** A planned value is within 10^−`clearance` of a unit in the last place kept. */
+export const clearance = 5;
+
+/** The same in units of the tail, and one for the digits behind it. */
+const slack = 10 ** (tailDigits - clearance) + 1;
 
 /**
- * The precision at which an error of so many rounding units is at most 10⁻⁶ of a unit in the last
- * place kept: about one value in 10⁵ then needs a second look, which costs less than more digits.
+ * Whether everything within 10^−`clearance` of a unit in the last place of x rounds to the same
+ * `kept` digits. About one value in 50,000 does not, and a second look costs less than more digits
+ * would for all.
  */
-export const precisionFor = (error: number, digits: number) =>
-  digits + tailDigits - 1 + Math.ceil(Math.log10(5 * error));
-
-/** Whether everything within `slack` of x rounds to the same `kept` digits. */
-export const roundsOneWay = (x: Decimal, kept: number, slack: number) =>
+export const roundsOneWay = (x: Decimal, kept: number) =>
   Math.abs(tailAfter(x, kept) - word / 2) > slack;
 
-/** The tie next to an x that does not round one way: halfway between two neighbours, exact. */
+/** The exponent of a unit in the last of `kept` digits of x. */
+export const unitExponent = (x: Decimal, kept: number) => x.e + 1 - kept;
+
+/** The tie that an x which does not round one way is next to: halfway between neighbours, exact. */
 export function tieNear(x: Decimal, kept: number): Decimal {
-  const half = new Exact(`5e${x.e - kept}`);
+  const half = new Exact(`5e${unitExponent(x, kept) - 1}`);
   const below = kept === 0 ? new Exact(0) : new Exact(x.abs()).toSignificantDigits(kept, 1);
   const tie = below.plus(half);
   return x.isNegative() ? tie.negated() : tie;

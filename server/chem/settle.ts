@@ -1,13 +1,11 @@
 import type Decimal from 'decimal.js';
 import type { Composition } from './composition';
-import { roundsOneWay, slackOf, tieNear } from './rounding';
+import { Exact } from './contexts';
+import { roundsOneWay, tieNear, unitExponent } from './rounding';
 
-/** A number of the answer: where it is found, how good it is, how it is rounded. */
+/** A number of the answer: where it is found and how it is rounded. */
 export interface Quantity {
   readonly of: (composition: Composition) => Decimal;
-  /** Bound on its error, in rounding units. */
-  readonly error: number;
-  readonly digits: number;
   /** How many digits of the coefficient are written. */
   readonly kept: (value: Decimal) => number;
   readonly write: (value: Decimal) => string;
@@ -19,6 +17,8 @@ export interface Quantity {
 export interface Refinable {
   readonly pH: Decimal;
   readonly at: (level: number) => Composition;
+  /** As in `Plan`. */
+  readonly loss: number;
 }
 
 /**
@@ -29,15 +29,16 @@ export interface Refinable {
  * This ends: a value that is no tie lies at a positive distance from every tie, and the interval
  * shrinks below any distance.
  */
-export function settle({ pH, at }: Refinable, quantity: Quantity): string {
-  const { of, error, digits, kept, write, is } = quantity;
+export function settle({ pH, at, loss }: Refinable, { of, kept, write, is }: Quantity): string {
   for (let level = 0; ; level++) {
     const composition = at(level);
     const value = of(composition);
     const places = kept(value);
-    const slack = slackOf(error, digits, composition.precision);
-    if (roundsOneWay(value, places, slack)) return write(value);
+    if (roundsOneWay(value, places)) return write(value);
+
     const tie = tieNear(value, places);
+    const error = new Exact(`1e${loss - composition.precision + unitExponent(value, places)}`);
+    if (tie.minus(value).abs().greaterThan(error)) return write(value);
     if (is(tie, pH)) return write(tie);
   }
 }

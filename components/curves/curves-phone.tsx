@@ -1,0 +1,158 @@
+import { useState } from 'react';
+import { Pressable, StyleSheet, useWindowDimensions, View } from 'react-native';
+import { clamp } from '../chart/geometry';
+import { barHeight } from '../shell/bar';
+import { Page } from '../shell/page';
+import { Button } from '../ui/button';
+import { Dialog } from '../ui/dialog';
+import { Formula } from '../ui/formula';
+import { Icon } from '../ui/icon';
+import { Numerals } from '../ui/numerals';
+import { space, useTheme } from '../ui/theme';
+import { Tabs } from '../ui/tabs';
+import { webStyle } from '../ui/web-style';
+import { Words } from '../ui/words';
+import { Conditions } from './conditions';
+import { CurveNotices } from './curve-notices';
+import { CurvePlot } from './curve-plot';
+import type { Choice, Layer, View as CurvesView } from './curves-state';
+import { NumbersTable } from './numbers-table';
+import { PhControl } from './ph-control';
+import { ReadOut } from './read-out';
+import { ShareDialog } from './share-dialog';
+import { formulasOf } from './species-formulas';
+import { SystemInputs } from './system-inputs';
+import type { Curves } from './use-curves';
+import { useExports } from './use-exports';
+
+const headAndTabs = 66 + 44;
+const dockHeight = 52 + 2 * space[2] + 1;
+/** A phone narrower than this shows the read-out in one column. */
+const twoColumns = 700;
+/** What of the read-out should be in sight under the plot, px. */
+const underPlot = 170;
+/** Narrower, the conditions alone fill the line under the title. */
+const roomForFormula = 380;
+
+const shown: Readonly<Record<CurvesView, readonly Layer[]>> = {
+  fractions: ['fractions', 'predominance'],
+  charge: ['charge', 'predominance'],
+};
+
+/** Below 900 px: one column, the pH docked at the thumb. */
+export function CurvesPhone({ curves }: { readonly curves: Curves }) {
+  const { state, title, drawn, reading, change, move } = curves;
+  const { colours } = useTheme();
+  const window = useWindowDimensions();
+  const exports = useExports(curves);
+  const [open, setOpen] = useState<'system' | 'share'>();
+  const close = () => setOpen(undefined);
+  const pick = (choice: Choice) => {
+    curves.choose(choice);
+    close();
+  };
+  const free = window.height - headAndTabs - dockHeight - barHeight;
+  const height = clamp(free - underPlot, 386, 430);
+  return (
+    <Page
+      title={title}
+      heading={
+        <Pressable
+          role="button"
+          aria-haspopup="dialog"
+          aria-label={`${title}: change the system`}
+          onPress={() => setOpen('system')}
+          style={styles.title}
+        >
+          <View style={styles.titleWords}>
+            <Words kind="title" numberOfLines={1}>
+              {title}
+            </Words>
+          </View>
+          <Icon name="chevron-down" />
+        </Pressable>
+      }
+      subtitle={
+        <Numerals size={12} tone="inkSoft" numberOfLines={1}>
+          {window.width >= roomForFormula && (
+            <>
+              <Formula formula={formulasOf(state.choice)[0] ?? ''} />
+              {' · '}
+            </>
+          )}
+          <Conditions choice={state.choice} />
+        </Numerals>
+      }
+      actions={
+        <Button
+          kind="quiet"
+          icon="share"
+          hideLabel
+          label="Share"
+          onPress={() => setOpen('share')}
+        />
+      }
+    >
+      <View style={styles.column}>
+        <View style={styles.edge}>
+          <Tabs
+            label="What is drawn"
+            tabs={[
+              { key: 'fractions', label: 'Fractions' },
+              { key: 'charge', label: 'Charge' },
+            ]}
+            current={state.view}
+            onChange={(view) => change({ view })}
+            panel="figure"
+          />
+        </View>
+        <CurveNotices {...curves} />
+        <View id="figure" role="tabpanel" aria-label={state.view} style={styles.edge}>
+          <CurvePlot
+            curves={curves}
+            layers={shown[state.view]}
+            height={height}
+            compact
+            figure={exports.figure}
+          />
+        </View>
+        {drawn && reading && (
+          <ReadOut drawn={drawn} reading={reading} columns={window.width >= twoColumns} />
+        )}
+        {drawn && <NumbersTable drawn={drawn} />}
+      </View>
+      {reading && drawn && (
+        <View
+          style={[styles.dock, { backgroundColor: colours.page, borderTopColor: colours.rule }]}
+        >
+          <View style={styles.column}>
+            <PhControl pH={reading.pH} range={drawn.range} onMove={move} />
+          </View>
+        </View>
+      )}
+      <Dialog title="Change the system" open={open === 'system'} onClose={close}>
+        <SystemInputs {...curves} choose={pick} />
+      </Dialog>
+      <ShareDialog open={open === 'share'} onClose={close} curves={curves} exports={exports} />
+    </Page>
+  );
+}
+
+const styles = StyleSheet.create({
+  title: { flexDirection: 'row', alignItems: 'center', gap: space[1], minHeight: 28 },
+  titleWords: { flexShrink: 1, minWidth: 0 },
+  column: { width: '100%', maxWidth: 720, alignSelf: 'center', gap: space[3] },
+  edge: { marginHorizontal: -space[4] },
+  dock: {
+    marginHorizontal: -space[4],
+    marginTop: space[4],
+    padding: space[2],
+    paddingHorizontal: space[4],
+    borderTopWidth: 1,
+    ...webStyle({
+      position: 'sticky',
+      bottom: `calc(${barHeight - 1}px + env(safe-area-inset-bottom))`,
+      zIndex: 1,
+    }),
+  },
+});

@@ -1,0 +1,30 @@
+import { StyleSheet, View } from 'react-native';
+import { Button } from '../ui/button';
+import { space } from '../ui/theme';
+import { Words } from '../ui/words';
+import type { Exports } from './use-exports';
+
+const files = [
+  { kind: 'csv', label: 'Numbers (CSV)', note: 'Every point of the curve, as the API gave it.' },
+  { kind: 'svg', label: 'Figure (SVG)', note: 'For print and for editing; brings its fonts.' },
+  { kind: 'png', label: 'Figure (PNG)', note: 'For slides and reports, at three times its size.' },
+] as const;
+
+/** The files the curve can leave as. */
+export function ExportButtons({ save }: Pick<Exports, 'save'>) {
+  return (
+    <View style={styles.list}>
+      {files.map(({ kind, label, note }) => (
+        <View key={kind} style={styles.file}>
+          <Button icon="download" label={label} onPress={() => void save(kind)} />
+          <Words kind="help">{note}</Words>
+        </View>
+      ))}
+    </View>
+  );
+}
+
+const styles = StyleSheet.create({
+  list: { gap: space[4] },
+  file: { gap: space[1] },
+});

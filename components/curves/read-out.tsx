@@ -1,0 +1,85 @@
+import { StyleSheet, View } from 'react-native';
+import { Button } from '../ui/button';
+import { Formula } from '../ui/formula';
+import { Quantity } from '../ui/quantity';
+import { space } from '../ui/theme';
+import { Words } from '../ui/words';
+import { describeReading } from './describe';
+import type { DrawnCurve } from './drawn-curve';
+import { EqualForms } from './equal-forms';
+import type { Reading } from './follow-curve';
+import { FormsTable } from './forms-table';
+import { neighbourRatio } from './neighbours';
+import { ValueRow } from './read-out-row';
+import { readOutText } from './read-out-text';
+import { shownCharge, shownRatio } from './rounded';
+import { useCopy } from './use-copy';
+import { useSettled } from './use-settled';
+
+interface ReadOutProps {
+  readonly drawn: DrawnCurve;
+  readonly reading: Reading;
+  /** Two columns where the page is one wide column. */
+  readonly columns: boolean;
+}
+
+/** A sentence is said once the cursor has rested this long, ms. */
+const announced = 700;
+
+/** What is present at the cursor. */
+export function ReadOut({ drawn, reading, columns }: ReadOutProps) {
+  const copy = useCopy();
+  const sentence = useSettled(describeReading(drawn, reading), announced);
+  const ratio = neighbourRatio(reading);
+  return (
+    <View style={columns ? styles.columns : styles.column}>
+      <View style={[styles.part, columns && styles.half]}>
+        <FormsTable drawn={drawn} reading={reading} />
+        <div role="status" className="only-said">
+          {sentence}
+        </div>
+      </View>
+      <View style={[styles.part, columns && styles.half]}>
+        <View role="table" aria-label="Mean charge and ratio at the cursor">
+          <ValueRow
+            label={
+              <Words>
+                mean charge <Quantity of="meanCharge" />
+              </Words>
+            }
+            value={shownCharge(reading.meanCharge)}
+          />
+          {ratio && (
+            <ValueRow
+              label={
+                <Words>
+                  <Formula formula={drawn.formulas[ratio.over] ?? ''} /> /{' '}
+                  <Formula formula={drawn.formulas[ratio.under] ?? ''} />
+                </Words>
+              }
+              value={shownRatio(ratio.ratio)}
+            />
+          )}
+        </View>
+        <View style={styles.copy}>
+          <Button
+            kind="quiet"
+            icon="copy"
+            label="Copy all digits"
+            disabled={!reading.exact}
+            onPress={() => copy('Read-out', readOutText(drawn, reading))}
+          />
+        </View>
+        <EqualForms drawn={drawn} />
+      </View>
+    </View>
+  );
+}
+
+const styles = StyleSheet.create({
+  column: { gap: space[5] },
+  columns: { flexDirection: 'row', gap: space[8], alignItems: 'flex-start' },
+  part: { gap: space[3] },
+  half: { flex: 1, minWidth: 0 },
+  copy: { alignItems: 'flex-start' },
+});

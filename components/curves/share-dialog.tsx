@@ -1,0 +1,55 @@
+import { View } from 'react-native';
+import { Button } from '../ui/button';
+import { Dialog } from '../ui/dialog';
+import { space } from '../ui/theme';
+import { Words } from '../ui/words';
+import { ExportButtons } from './export-buttons';
+import { curveRequest } from './request/curve-request';
+import { requestCode } from './request/request-code';
+import { RequestView, useLanguage } from './request/request-view';
+import { linkTo } from './use-address';
+import { useCopy } from './use-copy';
+import type { Curves } from './use-curves';
+import type { Exports } from './use-exports';
+
+interface ShareDialogProps {
+  readonly open: boolean;
+  readonly onClose: () => void;
+  readonly curves: Curves;
+  readonly exports: Exports;
+}
+
+/** All the ways a curve leaves a phone: the link, files, the request. */
+export function ShareDialog({ open, onClose, curves, exports }: ShareDialogProps) {
+  const copy = useCopy();
+  const [language, setLanguage] = useLanguage();
+  const request = curveRequest(curves.state.choice, globalThis.location.origin);
+  return (
+    <Dialog title="Share" open={open} onClose={onClose}>
+      <View style={{ gap: space[4] }}>
+        <Button
+          kind="primary"
+          size="main"
+          icon="copy"
+          label="Copy link"
+          onPress={() => copy('Link', linkTo(curves.state))}
+        />
+        <ExportButtons {...exports} />
+        <View style={{ gap: space[2] }}>
+          <Words kind="section" heading={3}>
+            The request
+          </Words>
+          <Words kind="help">
+            The call that gives this curve. Put your key in the variable; it is never written here.
+          </Words>
+          <RequestView request={request} language={language} onLanguage={setLanguage} />
+          <Button
+            icon="copy"
+            label={`Copy the ${language} request`}
+            onPress={() => copy(`Request in ${language}`, requestCode[language](request))}
+          />
+        </View>
+      </View>
+    </Dialog>
+  );
+}

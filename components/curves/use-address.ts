@@ -1,0 +1,47 @@
+import { useEffect, useState } from 'react';
+import type { CurvesState } from './curves-state';
+import { formatFragment, parseFragment } from './fragment';
+import { useSettled } from './use-settled';
+
+/** Browsers allow about a hundred changes of the address in half a minute: wait for a rest, ms. */
+const rest = 200;
+
+/** The last screen of this visit, for a return to Curves by a link that carries no state. */
+let lastFragment = '';
+
+const read = () => parseFragment(window.location.hash || lastFragment);
+
+/**
+ * The state of the screen, kept in the address's fragment: reload, back and a shared link give the
+ * same screen, and the server never sees it.
+ */
+export function useAddress() {
+  const [{ state, faulty }, setRead] = useState(read);
+  const settled = useSettled(state, rest);
+  const [first] = useState(state);
+
+  useEffect(() => {
+    const fragment = formatFragment(settled);
+    // An address that was opened stays as it is until something is changed.
+    const untouched = settled === first && (window.location.hash !== '' || lastFragment === '');
+    if (untouched) return;
+    lastFragment = fragment;
+    if (window.location.hash !== `#${fragment}`) {
+      window.history.replaceState(window.history.state, '', `#${fragment}`);
+    }
+  }, [settled, first]);
+
+  useEffect(() => {
+    const follow = () => setRead(read());
+    window.addEventListener('hashchange', follow);
+    return () => window.removeEventListener('hashchange', follow);
+  }, []);
+
+  const change = (part: Partial<CurvesState>) =>
+    setRead((before) => ({ state: { ...before.state, ...part }, faulty: false }));
+  return { state, faulty, change };
+}
+
+/** The address that shows this state. */
+export const linkTo = (state: CurvesState) =>
+  `${window.location.origin}${window.location.pathname}#${formatFragment(state)}`;

@@ -1,0 +1,53 @@
+import { useRef } from 'react';
+import type { View } from 'react-native';
+import { embeddedFonts } from '../chart/export/embedded-fonts';
+import { pngOf } from '../chart/export/png';
+import { fileName, saveFile } from '../chart/export/save-file';
+import { standaloneSvg } from '../chart/export/standalone-svg';
+import { elementOf } from '../ui/element';
+import { fonts, useTheme } from '../ui/theme';
+import { useToast } from '../ui/toast';
+import { conditionsText } from './conditions';
+import { curveCsv } from './curve-csv';
+import { exampleOf } from './curves-state';
+import type { Curves } from './use-curves';
+
+/** The files that leave the screen, and the figure they are made from. */
+export function useExports({ drawn, title }: Pick<Curves, 'drawn' | 'title'>) {
+  const figure = useRef<View>(null);
+  const { colours } = useTheme();
+  const say = useToast();
+
+  const svg = async () => {
+    const element = elementOf(figure.current)?.querySelector('svg');
+    if (!element || !drawn) return undefined;
+    const source = exampleOf(drawn.choice)?.source;
+    return standaloneSvg(element, {
+      title,
+      notes: [conditionsText(drawn.choice), ...(source === undefined ? [] : [source])],
+      ink: colours.ink,
+      inkSoft: colours.inkSoft,
+      page: colours.page,
+      face: fonts.words,
+      fonts: await embeddedFonts(),
+    });
+  };
+  const save = async (kind: 'csv' | 'svg' | 'png') => {
+    const content = async () => {
+      if (kind === 'csv') return drawn && new Blob([curveCsv(drawn)], { type: 'text/csv' });
+      const drawing = await svg();
+      if (!drawing) return undefined;
+      if (kind === 'png') return pngOf(drawing);
+      return new Blob([drawing.markup], { type: 'image/svg+xml' });
+    };
+    try {
+      const blob = await content();
+      if (blob) saveFile(fileName(title, kind), blob);
+    } catch {
+      say({ text: `This browser could not make the ${kind.toUpperCase()} file.` });
+    }
+  };
+  return { figure, save };
+}
+
+export type Exports = ReturnType<typeof useExports>;

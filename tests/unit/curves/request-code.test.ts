@@ -1,0 +1,149 @@
+import { spawnSync } from 'node:child_process';
+import fc from 'fast-check';
+import ts from 'typescript';
+import { languages, requestCode } from '../../../components/curves/request/request-code';
+import { curveRequest } from '../../../components/curves/request/curve-request';
+import { publicFractionsRequest } from '../../../shared/fractions';
+
+const url = 'https://stepwell.larkmoor.example/v1/fractions';
+const bodyNamed = (name: string) => ({
+  system: { name, fullyProtonatedCharge: 0, pKa: ['2.148', '7.198'] },
+  pH: { from: '0', to: '14', step: '0.02' },
+  digits: 6,
+});
+
+const hostile = [
+  `O'Neill "buffer" \\ $(touch x) \`id\` $HOME !!`,
+  'line one\nline two\ttab\r\u0007\u001b[31m',
+  '\u2028\u2029\u202egnirts\ufeff\u200b',
+  'pKₐ ′ α é 緩衝液 🧪',
+  '\'\'\' """ \\u0041 \\N{BULLET} {curly} %s',
+  '\ud83d',
+  "'); system('id'); ('",
+];
+const names = fc.oneof(fc.constantFrom(...hostile), fc.string({ unit: 'binary', maxLength: 40 }));
+
+/** What a POSIX shell hands to the program, told by the shell itself. */
+function argumentsOf(command: string): string[] {
+  const told = command.replace(/^curl/, "printf '%s\\0'");
+  const { stdout, status } = spawnSync('sh', ['-c', told], {
+    env: { PATH: process.env.PATH ?? '', STEPWELL_KEY: 'the-key' },
+  });
+  expect(status).toBe(0);
+  return stdout.toString().split('\0').slice(0, -1);
+}
+
+describe('the request as curl', () => {
+  test.each([...hostile, 'phosphoric acid'])('%j reaches the server as it is', (name) => {
+    const body = bodyNamed(name);
+    const given = argumentsOf(requestCode.curl({ url, body }));
+    expect(given.slice(0, -1)).toEqual([
+      url,
+      '-H',
+      'Authorization: Bearer the-key',
+      '-H',
+      'Content-Type: application/json',
+      '-d',
+    ]);
+    expect(JSON.parse(given.at(-1) ?? '')).toEqual(body);
+  });
+
+  test('holds no control character but its line ends', () => {
+    fc.assert(
+      fc.property(names, (name) => {
+        const code = requestCode.curl({ url, body: bodyNamed(name) });
+        expect(code).not.toMatch(/[^\P{Cc}\n]|[\u2028\u2029\u202a-\u202e\ufeff]/u);
+      }),
+    );
+  });
+});
+
+describe('the request as TypeScript', () => {
+  test('compiles, and its body is the one asked for', () => {
+    fc.assert(
+      fc.property(names, (name) => {
+        const body = bodyNamed(name);
+        const code = requestCode.TypeScript({ url, body });
+        const { diagnostics } = ts.transpileModule(code, {
+          reportDiagnostics: true,
+          compilerOptions: { module: ts.ModuleKind.ESNext, target: ts.ScriptTarget.ESNext },
+        });
+        expect(diagnostics).toEqual([]);
+        const literal = /JSON\.stringify\(([\s\S]*)\),\n\}\);/.exec(code)?.[1] ?? '';
+        expect(new Function(`return ${literal}`)()).toEqual(body);
+      }),
+    );
+  });
+});
+
+describe('the request as R', () => {
+  test('its string is the JSON of the body, backslashes and quotes escaped', () => {
+    fc.assert(
+      fc.property(names, (name) => {
+        const body = bodyNamed(name);
+        const code = requestCode.R({ url, body });
+        const literal = /req_body_raw\('((?:[^'\\]|\\['\\])*)', type = /.exec(code)?.[1];
+        expect(literal).toBeDefined();
+        expect(JSON.parse((literal ?? '').replace(/\\(['\\])/g, '$1'))).toEqual(body);
+      }),
+    );
+  });
+});
+
+describe('the request as Python', () => {
+  test('its literal is plain JSON, which Python reads alike', () => {
+    fc.assert(
+      fc.property(names, (name) => {
+        const body = bodyNamed(name);
+        const code = requestCode.Python({ url, body });
+        const literal = /json\.dumps\(([\s\S]*)\)\.encode\(\)/.exec(code)?.[1] ?? '';
+        expect(JSON.parse(literal)).toEqual(body);
+      }),
+    );
+  });
+
+  // A machine without Python still runs the test above.
+  const python = spawnSync('python3', ['--version']).status === 0;
+  if (python)
+    test('runs, and sends the body asked for', () => {
+      const program = [
+        'import json, os, sys, urllib.request, io',
+        'os.environ["STEPWELL_KEY"] = "the-key"',
+        'sent = []',
+        'def urlopen(request):',
+        '    sent.append([request.full_url, request.get_header("Authorization"), request.data.decode()])',
+        '    return io.BytesIO(b"{}")',
+        'urllib.request.urlopen = urlopen',
+        'for code in json.load(sys.stdin):',
+        '    exec(compile(code, "request", "exec"), {})',
+        'json.dump(sent, sys.stdout)',
+      ].join('\n');
+      const bodies = hostile.map(bodyNamed);
+      const { stdout, stderr } = spawnSync('python3', ['-c', program], {
+        input: JSON.stringify(bodies.map((body) => requestCode.Python({ url, body }))),
+      });
+      expect(stderr.toString()).toBe('');
+      const sent = JSON.parse(stdout.toString()) as [string, string, string][];
+      expect(sent.map(([at, header]) => [at, header])).toEqual(
+        bodies.map(() => [url, 'Bearer the-key']),
+      );
+      expect(sent.map(([, , data]) => JSON.parse(data) as unknown)).toEqual(bodies);
+    });
+});
+
+test('no language writes a key', () => {
+  for (const language of languages) {
+    const code = requestCode[language]({ url, body: bodyNamed('x') });
+    expect(code).toContain('STEPWELL_KEY');
+    expect(code).not.toContain('stepwell_');
+  }
+});
+
+test('the request of a curve fits the contract', () => {
+  const { url: address, body } = curveRequest(
+    { kind: 'example', id: 'edta' },
+    'http://127.0.0.1:8080',
+  );
+  expect(address).toBe('http://127.0.0.1:8080/v1/fractions');
+  expect(publicFractionsRequest.safeParse(body).success).toBe(true);
+});
