@@ -5,7 +5,7 @@ import { Failure } from './failure.mjs';
 /** 256 bits, written in characters that need no quoting in a URL or in SQL. */
 const secret = () => randomBytes(32).toString('base64url');
 
-const names = ['databaseAdmin', 'databaseOwner', 'databaseApp', 'keyPepper'];
+const names = ['databaseAdmin', 'databaseOwner', 'databaseApp', 'keyPepper', 'sessionSecret'];
 
 async function read(path) {
   const text = await readFile(path, 'utf8').catch((fault) => {

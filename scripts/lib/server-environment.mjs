@@ -11,6 +11,7 @@ export const serverEnvironment = (settings, secrets, database) => ({
   HOST: settings.host,
   PORT: String(settings.port),
   KEY_PEPPERS: process.env.KEY_PEPPERS || `1:${secrets.keyPepper}`,
+  SESSION_SECRET: process.env.SESSION_SECRET || secrets.sessionSecret,
   WEB_ROOT: inRoot('dist', 'web'),
   ...(settings.mode === 'production' ? {} : { DEMO_KEY_FILE: demoKeyFile() }),
 });
