@@ -50,4 +50,41 @@ export const systemInFull = z
     },
   });
 
+const slug = '[a-z0-9]+(-[a-z0-9]+)*';
+
+/** Identifier of a stored system. */
+export const systemId = z
+  .string()
+  .max(80)
+  .regex(new RegExp(`^${slug}$`))
+  .meta({ description: 'Lasting identifier of a stored system.', example: 'phosphoric-acid' });
+
+const notAReference = 'Write the id of a system, such as "phosphoric-acid" or "phosphoric-acid@1".';
+
+/** A stored system, the handbook's or the organization's own, at its present or a named revision. */
+export const systemById = z
+  .strictObject({
+    id: z
+      .string()
+      .max(90, { error: notAReference })
+      .regex(new RegExp(`^${slug}(@[1-9]\\d{0,8})?$`), { error: notAReference })
+      .meta({
+        description:
+          'Identifier of a stored system; with `@` and a number, that revision of it for good.',
+        example: 'phosphoric-acid',
+      }),
+  })
+  .meta({
+    id: 'SystemById',
+    description: 'A stored system by its identifier.',
+    example: { id: 'phosphoric-acid' },
+  });
+
+/** A system in full or by id. */
+export const systemInput = z
+  .union([systemInFull, systemById])
+  .meta({ id: 'SystemInput', description: 'A system: in full, or by the id of a stored one.' });
+
 export type SystemInFull = z.infer<typeof systemInFull>;
+export type SystemById = z.infer<typeof systemById>;
+export type SystemInput = z.infer<typeof systemInput>;

@@ -1,0 +1,91 @@
+import type { Substance } from './substance';
+
+/** An amine that the table lists under the name of its ion. */
+const amine = (name: string, ion: string, rest: Omit<Substance, 'name' | 'rows'> = {}) => ({
+  ...rest,
+  name,
+  rows: [ion],
+  aliases: [ion.replace(/\(\d\+\)| \(.*\)/g, ''), ...(rest.aliases ?? [])],
+});
+
+export const amines: readonly Substance[] = [
+  amine('methylamine', 'methylammonium', { buffer: 'methylamine' }),
+  amine('dimethylamine', 'dimethylammonium'),
+  amine('trimethylamine', 'trimethylammonium'),
+  amine('ethylamine', 'ethylammonium'),
+  amine('diethylamine', 'diethylammonium'),
+  amine('triethylamine', 'triethylammonium', { buffer: 'triethylamine', aliases: ['TEA'] }),
+  amine('propylamine', 'propylammonium'),
+  amine('butylamine', 'butylammonium'),
+  amine('cyclohexylamine', 'cyclohexylammonium'),
+  amine('benzylamine', 'benzylammonium'),
+  amine('aniline', 'anilinium', { aliases: ['aminobenzene'] }),
+  amine('N-methylaniline', 'N-methylanilinium'),
+  amine('N,N-dimethylaniline', 'N,N-dimethylanilinium'),
+  amine('4-nitroaniline', '4-nitroanilinium', { aliases: ['p-nitroaniline'] }),
+  amine('diphenylamine', 'diphenylammonium'),
+  amine('ethylenediamine', 'ethylenediammonium(2+)', { aliases: ['1,2-ethanediamine'] }),
+  amine('1,3-propanediamine', '1,3-propanediammonium(2+)', { aliases: ['1,3-diaminopropane'] }),
+  amine('putrescine', '1,4-butanediammonium(2+) (putrescine)', {
+    aliases: ['1,4-butanediamine', '1,4-diaminobutane'],
+  }),
+  amine('1,6-hexanediamine', '1,6-hexanediammonium(2+)', { aliases: ['hexamethylenediamine'] }),
+  amine('diethylenetriamine', 'diethylenetriammonium(3+)', { aliases: ['DETA'] }),
+  amine('triethylenetetramine', 'triethylenetetrammonium(4+)', { aliases: ['TETA', 'trien'] }),
+  amine('ethanolamine', 'ethanolammonium', {
+    buffer: 'ethanolamine',
+    aliases: ['2-aminoethanol'],
+  }),
+  amine('diethanolamine', 'diethanolammonium', { buffer: 'diethanolamine' }),
+  amine('triethanolamine', 'triethanolammonium', { buffer: 'triethanolamine' }),
+  amine('tris', 'tris(hydroxymethyl)aminomethane-H+', {
+    buffer: 'TRIS',
+    aliases: [
+      'tris(hydroxymethyl)aminomethane',
+      'tromethamine',
+      '2-amino-2-(hydroxymethyl)-1,3-propanediol',
+    ],
+  }),
+  amine('bis-tris', 'bis-tris-H+', {
+    buffer: 'bis-tris',
+    aliases: ['bis(2-hydroxyethyl)aminotris(hydroxymethyl)methane'],
+  }),
+  amine('piperidine', 'piperidinium'),
+  amine('pyrrolidine', 'pyrrolidinium'),
+  amine('morpholine', 'morpholinium'),
+  amine('piperazine', 'piperazinium(2+)', { buffer: 'piperazine' }),
+  amine('guanidine', 'guanidinium'),
+  { name: 'urea', rows: ['urea-H+ (21 C)'], aliases: ['carbamide'] },
+  {
+    name: '2-amino-2-methyl-1,3-propanediol',
+    rows: [],
+    buffer: '2-amino-2-methyl-1,3-propanediol',
+    aliases: ['AMPD', 'ammediol'],
+    formula: 'C4H11NO2',
+    cas: '115-69-5',
+  },
+  {
+    name: '2-amino-2-methyl-1-propanol',
+    rows: [],
+    buffer: '2-amino-2-methyl-1-propanol (AMP)',
+    aliases: ['AMP'],
+    formula: 'C4H11NO',
+    cas: '124-68-5',
+  },
+  {
+    name: 'bis-tris propane',
+    rows: [],
+    buffer: 'bis-tris propane',
+    aliases: ['BTP', '1,3-bis[tris(hydroxymethyl)methylamino]propane'],
+    formula: 'C11H26N2O6',
+    cas: '64431-96-5',
+  },
+  {
+    name: 'N-ethylmorpholine',
+    rows: [],
+    buffer: 'N-ethylmorpholine',
+    aliases: ['4-ethylmorpholine'],
+    formula: 'C6H13NO',
+    cas: '100-74-3',
+  },
+];
