@@ -5,7 +5,11 @@ import { Membership } from './entities/membership';
 import { Organization } from './entities/organization';
 import { Person } from './entities/person';
 import { Session } from './entities/session';
+import { System } from './entities/system';
+import { SystemConstant } from './entities/system-constant';
+import { SystemRevision } from './entities/system-revision';
 import { OrganizationsAndKeys1764547200000 } from './migrations/1764547200000-organizations-and-keys';
+import { Handbook1764547300000 } from './migrations/1764547300000-handbook';
 import { Sessions1764547400000 } from './migrations/1764547400000-sessions';
 
 /** The database, not yet connected. The schema is made by migrations alone. */
@@ -14,8 +18,11 @@ export const createDataSource = (url: string): DataSource =>
     type: 'postgres',
     url,
     applicationName: 'stepwell',
-    entities: [Organization, Person, Membership, ApiKey, Session],
-    migrations: [OrganizationsAndKeys1764547200000, Sessions1764547400000],
+    entities: [
+      ...[Organization, Person, Membership, ApiKey, Session],
+      ...[System, SystemRevision, SystemConstant],
+    ],
+    migrations: [OrganizationsAndKeys1764547200000, Handbook1764547300000, Sessions1764547400000],
     migrationsTableName: 'schema_migrations',
     migrationsTransactionMode: 'each',
     synchronize: false,

@@ -1,10 +1,12 @@
 import type { DataSource } from 'typeorm';
+import { seedHandbook } from './seed-handbook';
 
 const identifier = /^[a-z_][a-z0-9_]{0,62}$/;
 
 /**
  * Brings the schema up to date and, where the running role is another than the owner, lets it read
- * and write rows, nothing more. An advisory lock makes two migrations at once wait for each other.
+ * and write rows, nothing more; then the handbook, which every environment has. An advisory lock
+ * makes two migrations at once wait for each other.
  */
 export async function migrate(database: DataSource, runningRole?: string): Promise<string[]> {
   if (runningRole !== undefined && !identifier.test(runningRole)) {
@@ -15,6 +17,7 @@ export async function migrate(database: DataSource, runningRole?: string): Promi
   try {
     const done = await database.runMigrations();
     if (runningRole !== undefined) await grantRows(database, runningRole);
+    await seedHandbook(database);
     return done.map(({ name }) => name);
   } finally {
     await lock.query('SELECT pg_advisory_unlock(7041776)');
