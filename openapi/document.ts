@@ -3,6 +3,7 @@ import {
   OpenApiGeneratorV31,
   type ResponseConfig,
 } from '@asteasolutions/zod-to-openapi';
+import { z } from 'zod';
 import { problem, problemTypes, type ProblemName } from '../shared/problem';
 import type { Access, Operation } from '../server/http/operation';
 
@@ -54,11 +55,36 @@ function contentOf(operation: Operation) {
   return { content: Object.fromEntries(content) };
 }
 
+const linkHeader = z.string().optional().meta({
+  description: 'The next page, `rel="next"` (RFC 8288); left out on the last.',
+  example: '</v1/systems?query=acid&limit=50&cursor=eyJ9>; rel="next"',
+});
+const etagHeader = z.string().meta({
+  description: 'Strong validator of the answer, for If-None-Match.',
+  example: '"kZ0a3cQ1mJq2m8v0y2b1n5h7d9f"',
+});
+
+/** Headers of success: the way to the next page, and what revalidation compares. */
+function headersOf({ query, revalidates }: Operation) {
+  const headers = {
+    ...(query && 'cursor' in query.shape && { Link: linkHeader }),
+    ...(revalidates && { ETag: etagHeader }),
+  };
+  return Object.keys(headers).length === 0 ? {} : { headers: z.object(headers) };
+}
+
+const unchanged = { description: 'What If-None-Match names is what would be answered' };
+
 function responsesOf(operation: Operation) {
   const names = refusalsOf(operation);
   const statuses = [...new Set(names.map((name) => problemTypes[name][0]))].sort();
   return {
-    [operation.status ?? 200]: { description: 'The answer', ...contentOf(operation) },
+    [operation.status ?? 200]: {
+      description: 'The answer',
+      ...headersOf(operation),
+      ...contentOf(operation),
+    },
+    ...(operation.revalidates && { 304: unchanged }),
     ...Object.fromEntries(
       statuses.map((status) => [
         status,
@@ -68,13 +94,21 @@ function responsesOf(operation: Operation) {
   };
 }
 
+const ifNoneMatch = z.object({
+  'If-None-Match': z.string().optional().meta({
+    description: 'ETags of answers that the caller holds.',
+    example: '"kZ0a3cQ1mJq2m8v0y2b1n5h7d9f"',
+  }),
+});
+
 function requestOf(operation: Operation) {
-  const { body, params, query } = operation;
+  const { body, params, query, revalidates } = operation;
   const json = { schema: body, examples: valuesOf(operation, 'body') };
   return {
     request: {
       ...(params && { params }),
       ...(query && { query }),
+      ...(revalidates && { headers: ifNoneMatch }),
       ...(body && { body: { required: true, content: { 'application/json': json } } }),
     },
   };
@@ -122,6 +156,7 @@ export function openApiDocument(operations: readonly Operation[]) {
     servers: [{ url: '/' }],
     tags: [
       { name: 'Compute', description: 'Answers about systems and mixtures.' },
+      { name: 'Systems', description: 'The handbook and the organization’s own systems.' },
       { name: 'People', description: 'Who is signed in, and where.' },
       { name: 'Keys', description: 'API keys of the organization.' },
       { name: 'Service', description: 'The service itself.' },

@@ -1,8 +1,9 @@
 import { z } from 'zod';
 import { limits } from './limits';
 import { model, warning } from './model';
-import { pHInput } from './ph';
-import { systemInFull } from './system';
+import { pHInput, pHValue } from './ph';
+import { species } from './species';
+import { systemInput } from './system';
 
 const digits = z
   .int()
@@ -14,6 +15,18 @@ const digits = z
       'Digits of the answer, all of them right: significant digits of fractions and ratios, places after the point of the charge.',
     example: 16,
   });
+
+/** Query of GET /v1/systems/{id}/fractions: the one-line form of the same question. */
+export const fractionsQuery = z.strictObject({
+  pH: pHValue,
+  digits: z.coerce
+    .number()
+    .int()
+    .min(limits.digits.from)
+    .max(limits.digits.to)
+    .default(limits.digits.default)
+    .meta({ description: 'Digits of the answer, all of them right.', example: 16 }),
+});
 
 const dryRun = z.boolean().default(false).meta({
   description: 'Answer cost and warnings only.',
@@ -28,8 +41,8 @@ const pH = pHInput.meta({
 /** Body of POST /v1/fractions: one system or up to 100, never both. */
 export const fractionsRequest = z
   .strictObject({
-    system: systemInFull.optional(),
-    systems: z.array(systemInFull).min(1).max(limits.systems).optional().meta({
+    system: systemInput.optional(),
+    systems: z.array(systemInput).min(1).max(limits.systems).optional().meta({
       description: 'Up to 100 systems, answered in this order.',
     }),
     pH,
@@ -50,19 +63,8 @@ export const fractionsRequest = z
 
 /** Body of POST /v1/public/fractions: one system, at a lower cost bound, no key. */
 export const publicFractionsRequest = z
-  .strictObject({ system: systemInFull, pH, digits })
+  .strictObject({ system: systemInput, pH, digits })
   .meta({ id: 'PublicFractionsRequest', description: 'Asks for one system’s species fractions.' });
-
-const species = z
-  .strictObject({
-    index: z.int().meta({ description: 'Position in `fractions`.', example: 0 }),
-    charge: z.int().meta({ description: 'Charge number.', example: 0, 'x-unit': 'e' }),
-    protonsLost: z.int().meta({
-      description: 'Protons lost from the fully protonated species.',
-      example: 0,
-    }),
-  })
-  .meta({ id: 'Species', description: 'One protonation form.' });
 
 const point = z
   .strictObject({
@@ -107,7 +109,10 @@ const predominance = z
   .meta({ id: 'PredominanceRange', description: 'Where a species is the most abundant.' });
 
 const ofOneSystem = {
-  name: z.string().optional().meta({ description: 'Name given.', example: 'phosphoric acid' }),
+  name: z
+    .string()
+    .optional()
+    .meta({ description: 'Name given or stored.', example: 'phosphoric acid' }),
   species: z.array(species).meta({ description: 'The n + 1 species.' }),
   effectivePKa: z.array(z.string()).meta({
     description: 'Constants pK′ that the fractions use on the pH scale.',
@@ -149,6 +154,7 @@ export const dryRunAnswer = z
   .meta({ id: 'DryRunAnswer', description: 'Cost and warnings of a call that was not made.' });
 
 export type FractionsRequest = z.infer<typeof fractionsRequest>;
+export type FractionsQuery = z.infer<typeof fractionsQuery>;
 export type FractionsRequestInput = z.input<typeof fractionsRequest>;
 export type PublicFractionsRequest = z.infer<typeof publicFractionsRequest>;
 export type PublicFractionsRequestInput = z.input<typeof publicFractionsRequest>;

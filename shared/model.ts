@@ -1,9 +1,18 @@
 import { z } from 'zod';
+import { constant } from './constant';
+
+/** What an answer may warn of. */
+const warningCodes = [
+  'inverted-constants',
+  'estimated-constant',
+  'constants-at-their-medium',
+  'pka-not-temperature-corrected',
+] as const;
 
 /** Something a caller should know about an answer that was nevertheless computed. */
 export const warning = z
   .strictObject({
-    code: z.enum(['inverted-constants']).meta({
+    code: z.enum(warningCodes).meta({
       description: 'Stable name of the warning.',
       example: 'inverted-constants',
     }),
@@ -22,9 +31,22 @@ export type Warning = z.infer<typeof warning>;
 
 const constantsUsed = z
   .strictObject({
-    name: z.string().optional().meta({ description: 'Name given.', example: 'phosphoric acid' }),
-    kind: z.literal('thermodynamic').meta({
-      description: 'Kind of constants.',
+    name: z
+      .string()
+      .optional()
+      .meta({ description: 'Name given or stored.', example: 'phosphoric acid' }),
+    system: z
+      .strictObject({
+        id: z.string().meta({ description: 'Identifier.', example: 'phosphoric-acid' }),
+        revision: z.int().meta({ description: 'Revision computed with.', example: 1 }),
+      })
+      .optional()
+      .meta({
+        id: 'SystemUsed',
+        description: 'The stored system; left out for one given in full.',
+      }),
+    kind: z.literal('thermodynamic').optional().meta({
+      description: 'Kind of constants given in full; stored ones each have their own.',
       example: 'thermodynamic',
     }),
     fullyProtonatedCharge: z.int().meta({
@@ -36,6 +58,9 @@ const constantsUsed = z
       description: 'Constants taken as exact.',
       example: ['2.148', '7.198', '12.35'],
       'x-unit': '1',
+    }),
+    constants: z.array(constant).optional().meta({
+      description: 'What is known of each stored constant; left out for those given in full.',
     }),
   })
   .meta({ id: 'ConstantsUsed', description: 'One system as it was computed.' });

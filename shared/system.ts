@@ -62,23 +62,22 @@ export const systemId = z
 const notAReference = 'Write the id of a system, such as "phosphoric-acid" or "phosphoric-acid@1".';
 
 /** A stored system, the handbook's or the organization's own, at its present or a named revision. */
-export const systemById = z
-  .strictObject({
-    id: z
-      .string()
-      .max(90, { error: notAReference })
-      .regex(new RegExp(`^${slug}(@[1-9]\\d{0,8})?$`), { error: notAReference })
-      .meta({
-        description:
-          'Identifier of a stored system; with `@` and a number, that revision of it for good.',
-        example: 'phosphoric-acid',
-      }),
-  })
+export const systemReference = z
+  .string()
+  .max(90, { error: notAReference })
+  .regex(new RegExp(`^${slug}(@[1-9]\\d{0,8})?$`), { error: notAReference })
   .meta({
-    id: 'SystemById',
-    description: 'A stored system by its identifier.',
-    example: { id: 'phosphoric-acid' },
+    description:
+      'Identifier of a stored system; with `@` and a number, that revision of it for good.',
+    example: 'phosphoric-acid',
   });
+
+/** A system by its reference. */
+export const systemById = z.strictObject({ id: systemReference }).meta({
+  id: 'SystemById',
+  description: 'A stored system by its identifier.',
+  example: { id: 'phosphoric-acid' },
+});
 
 /** A system in full or by id. */
 export const systemInput = z

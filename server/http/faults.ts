@@ -26,11 +26,24 @@ const codeOf = (issue: Issue): string => {
   );
 };
 
-/** The branch of a union that the caller meant: the one that got past the outermost type. */
-const meantBranch = (branches: readonly (readonly Issue[])[]) =>
-  branches.find(
-    ([first]) => first && !(first.code === 'invalid_type' && first.path.length === 0),
-  ) ?? branches.find(([first]) => first && codeOf(first) === 'decimal-must-be-string');
+/** Fields that a branch lacks or does not know: how far a value is from its shape. */
+const strangers = (issues: readonly Issue[]) =>
+  issues.reduce(
+    (sum, issue) =>
+      sum + (issue.code === 'unrecognized_keys' ? issue.keys.length : isMissing(issue) ? 1 : 0),
+    0,
+  );
+
+/**
+ * The branch of a union that the caller meant: of those that got past the outermost type, the one
+ * with the fewest fields missing or unknown.
+ */
+function meantBranch(branches: readonly (readonly Issue[])[]) {
+  const [meant] = branches
+    .filter(([first]) => first && !(first.code === 'invalid_type' && first.path.length === 0))
+    .sort((one, other) => strangers(one) - strangers(other));
+  return meant ?? branches.find(([first]) => first && codeOf(first) === 'decimal-must-be-string');
+}
 
 function faultsOfIssue(issue: Issue, parents: Path): Fault[] {
   const path = [...parents, ...issue.path];

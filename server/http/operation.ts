@@ -78,6 +78,8 @@ interface Declared<
   /** Status of success; 200 where none is named. */
   readonly status?: 200 | 201 | 204;
   readonly answer?: ZodType;
+  /** Answers carry a strong ETag, and a caller who has the same already gets a 304. */
+  readonly revalidates?: true;
   /** Media types in order of preference; JSON first. */
   readonly produces: readonly string[];
   /** Refusals of its own, beside those of every operation. */

@@ -6,6 +6,7 @@ import type { Services } from '../services';
 import type { Caller } from '../services/caller';
 import { jsonBody } from './body';
 import { callerOf, type OwnPages } from './caller';
+import { revalidated } from './etag';
 import { faultsOf, queryFaultsOf } from './faults';
 import type { Operation, Reply } from './operation';
 import { rateLimiter } from './rate-limit';
@@ -81,7 +82,12 @@ const answer =
     };
     // Its own declaration gave the handler its types; the guard and `read` have made them true.
     const reply = await operation.handle(call as never);
-    send(response, reply, operation.status ?? 200, pages);
+    const asked = {
+      ifNoneMatch: request.headers['if-none-match'],
+      shared: operation.access === 'public',
+    };
+    const sent = operation.revalidates ? revalidated(reply, asked) : reply;
+    send(response, sent, operation.status ?? 200, pages);
   };
 
 const otherMethods = (methods: readonly string[]): RequestHandler => {

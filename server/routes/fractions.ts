@@ -5,39 +5,30 @@ import {
   fractionsRequest,
   manyFractionsAnswer,
   publicFractionsRequest,
-  type FractionsRequestInput,
-  type FractionsRequest,
 } from '../../shared/fractions';
 import { limits } from '../../shared/limits';
 import { operation, type Reply } from '../http/operation';
-import { Refusal } from '../refusal';
-import type { Services } from '../services';
-import { answerFractions } from '../services/fractions/answer-fractions';
-import { fractionsCost } from '../services/fractions/cost';
+import { fractionsExample } from './fractions-examples';
 
 const json = 'application/json';
 const csv = 'text/csv';
 
+/** Media types of an answer about fractions. */
+export const fractionsForms = [json, csv];
+
 const answers = z.union([fractionsAnswer, manyFractionsAnswer, dryRunAnswer]);
 
-function withinCost(request: FractionsRequest, most: number): void {
-  const cost = fractionsCost(request);
-  if (cost <= most) return;
-  const detail = `Points × species × digits is ${cost}; one call may ask for ${most}.`;
-  throw new Refusal('over-limit', detail, [{ pointer: '', code: 'cost-over-limit', detail }]);
-}
+/** Where a call stands: who asks, how much it may cost, in which form the answer goes. */
+export const fractionsTerms = (reader: string | undefined, mostCost: number, accepted: string) => ({
+  reader,
+  mostCost,
+  asCsv: accepted === csv,
+});
 
-async function reply(request: FractionsRequest, accepted: string, services: Services) {
-  const asCsv = accepted === csv && !request.dryRun;
-  const body = await services.compute.run(asCsv ? 'fractionsCsv' : 'fractions', request);
-  const type = asCsv ? `${csv}; charset=utf-8; header=present` : json;
-  return { type, body } satisfies Reply;
-}
-
-const example = (summary: string, body: FractionsRequestInput) => ({
-  summary,
+/** A finished body in the form agreed upon; a dry run is JSON always. */
+export const fractionsReply = (body: Uint8Array, accepted: string, dryRun = false): Reply => ({
+  type: accepted === csv && !dryRun ? `${csv}; charset=utf-8; header=present` : json,
   body,
-  answer: answerFractions(fractionsRequest.parse(body)),
 });
 
 const phosphoric = {
@@ -55,35 +46,41 @@ export const fractions = operation({
   description:
     'Fractions, neighbour ratios, mean charge and predominance of one system, or of up to 100, ' +
     'at one pH, a list, or a grid. Every digit is right: the exact value for the constants as ' +
-    'given, rounded half to even. `Accept: text/csv` gives a line a system and pH.',
+    'given, rounded half to even. A system is given in full, or by the id of a stored one, whose ' +
+    'constants are then in `model`. `Accept: text/csv` gives a line a system and pH.',
   tag: 'Compute',
   access: { scope: 'compute' },
   callsPerMinute: limits.keyedCallsPerMinute,
   body: fractionsRequest,
   answer: answers,
-  produces: [json, csv],
+  produces: fractionsForms,
   refuses: ['over-limit'],
   examples: {
-    phosphoricAcid: example('Phosphoric acid at pH 7.4', {
+    phosphoricAcid: fractionsExample('Phosphoric acid at pH 7.4', {
       system: phosphoric,
       pH: '7.4',
       digits: 10,
     }),
-    twoSystems: example('Two systems at two pH', {
+    twoSystems: fractionsExample('Two systems at two pH', {
       systems: [phosphoric, tris],
       pH: ['7.0', '7.4'],
       digits: 6,
     }),
-    dryRun: example('What a curve would cost', {
+    byId: fractionsExample('A stored system by its id', {
+      system: { id: 'carbonic-acid' },
+      pH: '8.1',
+      digits: 6,
+    }),
+    dryRun: fractionsExample('What a curve would cost', {
       system: phosphoric,
       pH: { from: '0', to: '14', step: '0.01' },
       digits: 34,
       dryRun: true,
     }),
   },
-  handle: ({ body, accepted, services }) => {
-    withinCost(body, limits.cost);
-    return reply(body, accepted, services);
+  handle: async ({ body, accepted, caller, services }) => {
+    const terms = fractionsTerms(caller.organizationId, limits.cost, accepted);
+    return fractionsReply(await services.fractions.answer(body, terms), accepted, body.dryRun);
   },
 });
 
@@ -100,18 +97,18 @@ export const publicFractions = operation({
   callsPerMinute: limits.publicCallsPerMinute,
   body: publicFractionsRequest,
   answer: fractionsAnswer,
-  produces: [json, csv],
+  produces: fractionsForms,
   refuses: ['over-limit'],
   examples: {
-    phosphoricAcid: example('Phosphoric acid at pH 7.4', {
+    phosphoricAcid: fractionsExample('Phosphoric acid at pH 7.4', {
       system: phosphoric,
       pH: '7.4',
       digits: 10,
     }),
   },
-  handle: ({ body, accepted, services }) => {
+  handle: async ({ body, accepted, services }) => {
+    const terms = fractionsTerms(undefined, limits.publicCost, accepted);
     const request = { ...body, dryRun: false };
-    withinCost(request, limits.publicCost);
-    return reply(request, accepted, services);
+    return fractionsReply(await services.fractions.answer(request, terms), accepted);
   },
 });

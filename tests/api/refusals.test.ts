@@ -39,7 +39,7 @@ const wrongBodies: [name: string, body: unknown, fault: string][] = [
     '/conditions unknown-field',
   ],
   [
-    'a system by id, which comes later',
+    'a system both by id and in full',
     { system: { ...system, id: 'x' }, pH: '7' },
     '/system/id unknown-field',
   ],

@@ -1,10 +1,10 @@
-import type { FractionsRequest } from '../../../shared/fractions';
 import { answerFractions } from '../fractions/answer-fractions';
 import { fractionsCsv } from '../fractions/fractions-csv';
+import type { ResolvedRequest } from '../fractions/resolve';
 
 /** What the workers can do: a request in, the finished body of the answer out. */
 export const tasks = {
-  fractions: (request: FractionsRequest) => JSON.stringify(answerFractions(request)),
+  fractions: (request: ResolvedRequest) => JSON.stringify(answerFractions(request)),
   fractionsCsv,
 };
 

@@ -2,25 +2,32 @@ import { computeUnitsOf } from '../../../shared/limits';
 import type {
   DryRunAnswer,
   FractionsAnswer,
-  FractionsRequest,
   ManyFractionsAnswer,
   SystemFractions,
 } from '../../../shared/fractions';
-import type { SystemInFull } from '../../../shared/system';
+import type { Species } from '../../../shared/species';
 import { effectivePKa, fractionPoints, predominanceRanges, speciesOf } from '../../chem';
 import { fractionsCost, systemsOf } from './cost';
-import { modelOf, warningsOf } from './model';
+import { modelOf } from './model';
 import { pointsOf } from './points';
+import type { ResolvedRequest, ResolvedSystem } from './resolve';
+import { warningsOf } from './warnings';
 
 type Answer = FractionsAnswer | ManyFractionsAnswer | DryRunAnswer;
 
-const named = (system: SystemInFull) => (system.name === undefined ? {} : { name: system.name });
+const named = ({ name }: ResolvedSystem) => (name === undefined ? {} : { name });
 
-function ofOneSystem(system: SystemInFull, request: FractionsRequest): SystemFractions {
+/** The forms, with their formulas where the system is a stored one. */
+const formsOf = (system: ResolvedSystem): Species[] =>
+  speciesOf(system).map((form) =>
+    system.stored ? { ...form, formula: system.stored.formulas[form.index] ?? null } : form,
+  );
+
+function ofOneSystem(system: ResolvedSystem, request: ResolvedRequest): SystemFractions {
   const { digits } = request;
   return {
     ...named(system),
-    species: speciesOf(system),
+    species: formsOf(system),
     effectivePKa: effectivePKa(system, digits),
     points: fractionPoints(system, pointsOf(request.pH), digits),
     predominance: predominanceRanges(system, digits),
@@ -28,7 +35,7 @@ function ofOneSystem(system: SystemInFull, request: FractionsRequest): SystemFra
 }
 
 /** Species fractions of one system or several, or what they would cost. */
-export function answerFractions(request: FractionsRequest): Answer {
+export function answerFractions(request: ResolvedRequest): Answer {
   if (request.dryRun) {
     const cost = fractionsCost(request);
     return {

@@ -1,7 +1,7 @@
-import type { FractionsRequest } from '../../../shared/fractions';
 import { fractionPoints, type FractionPoint } from '../../chem';
 import { systemsOf } from './cost';
 import { pointsOf } from './points';
+import type { ResolvedRequest } from './resolve';
 
 const columns = (prefix: string, count: number) =>
   Array.from({ length: count }, (_, index) => `${prefix}_${index}`);
@@ -15,7 +15,7 @@ const filled = (values: readonly string[], count: number) => [
  * Fractions as RFC 4180 text: a line a system and pH. With several systems the columns are those of
  * the largest one; smaller ones leave the rest empty.
  */
-export function fractionsCsv(request: FractionsRequest): string {
+export function fractionsCsv(request: ResolvedRequest): string {
   const systems = systemsOf(request);
   const most = Math.max(...systems.map(({ pKa }) => pKa.length));
   const head = [

@@ -1,36 +1,37 @@
-import type { FractionsRequest } from '../../../shared/fractions';
-import type { Model, Warning } from '../../../shared/model';
-import { engineVersion, invertedNeighbours } from '../../chem';
+import type { Model } from '../../../shared/model';
+import { engineVersion } from '../../chem';
 import { systemsOf } from './cost';
+import type { ResolvedRequest, ResolvedSystem } from './resolve';
+import { temperatureUsed, warningsOf } from './warnings';
 
-/** Inverted constants of each system, in words and with the place in the request. */
-export const warningsOf = (request: FractionsRequest): Warning[] =>
-  systemsOf(request).flatMap((system, index) =>
-    invertedNeighbours(system).map((i) => ({
-      code: 'inverted-constants' as const,
-      message:
-        `pKa ${i + 1} (${system.pKa[i]}) is greater than pKa ${i + 2} (${system.pKa[i + 1]}): ` +
-        `species ${i + 1} never predominates.`,
-      pointer: `${request.system === undefined ? `/systems/${index}` : '/system'}/pKa/${i}`,
-    })),
-  );
+type ConstantsUsed = Model['constantsUsed'][number];
+
+const constantsUsed = ({
+  name,
+  fullyProtonatedCharge,
+  pKa,
+  stored,
+}: ResolvedSystem): ConstantsUsed => ({
+  ...(name === undefined ? {} : { name }),
+  ...(stored
+    ? { system: { id: stored.id, revision: stored.revision } }
+    : { kind: 'thermodynamic' }),
+  fullyProtonatedCharge,
+  pKa: [...pKa],
+  ...(stored && { constants: [...stored.constants] }),
+});
 
 /** Where a fractions answer comes from, every default filled in. */
-export const modelOf = (request: FractionsRequest): Model => ({
+export const modelOf = (request: ResolvedRequest): Model => ({
   engineVersion,
   digits: request.digits,
   conditions: {
-    temperature: '25',
+    temperature: temperatureUsed,
     ionicStrength: '0',
     activityModel: 'ideal',
     outOfRange: 'refuse',
   },
-  constantsUsed: systemsOf(request).map(({ name, fullyProtonatedCharge, pKa }) => ({
-    ...(name === undefined ? {} : { name }),
-    kind: 'thermodynamic',
-    fullyProtonatedCharge,
-    pKa: [...pKa],
-  })),
+  constantsUsed: systemsOf(request).map(constantsUsed),
   pKw: null,
   activityConstants: null,
   basis: 'mol/L',
