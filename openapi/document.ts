@@ -51,7 +51,9 @@ function contentOf(operation: Operation) {
   if (!answer) return {};
   const json = { schema: answer, examples: valuesOf(operation, 'answer') };
   const text = { schema: { type: 'string' as const } };
-  const content = produces.map((type) => [type, type === 'application/json' ? json : text]);
+  const content = produces.map(
+    (type) => [type, type === 'application/json' ? json : text] as const,
+  );
   return { content: Object.fromEntries(content) };
 }
 

@@ -84,6 +84,4 @@ export const systemInput = z
   .union([systemInFull, systemById])
   .meta({ id: 'SystemInput', description: 'A system: in full, or by the id of a stored one.' });
 
-export type SystemInFull = z.infer<typeof systemInFull>;
-export type SystemById = z.infer<typeof systemById>;
 export type SystemInput = z.infer<typeof systemInput>;

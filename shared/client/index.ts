@@ -10,6 +10,7 @@ import type { IssuedKey, KeyAnswer, KeyList, KeyRequestInput } from '../keys';
 import type { LimitsAnswer } from '../limits-answer';
 import { readPage, type Page } from './page';
 import { createSend, type CallOptions, type ClientOptions } from './send';
+import { systemsAt } from './systems';
 
 export { ProblemError } from './problem-error';
 export type { Page } from './page';
@@ -38,6 +39,10 @@ export function createClient(options: ClientOptions) {
     /** POST /v1/public/fractions; no key, one system, rate-limited. */
     publicFractions: (body: PublicFractionsRequestInput, call?: CallOptions) =>
       post<FractionsAnswer>('/v1/public/fractions', body, call),
+    /** /v1/systems: the handbook's and the organization's own; needs `systems:read`. */
+    systems: systemsAt(send, '/v1/systems'),
+    /** /v1/public/systems: the handbook, without a key. */
+    publicSystems: systemsAt(send, '/v1/public/systems'),
     limits: (call?: CallOptions) => get<LimitsAnswer>('/v1/limits', call),
 
     signIn: (body: SignInRequest) => post<AccountAnswer>('/v1/sessions', body),

@@ -1,6 +1,5 @@
-import { Column, Entity, JoinColumn, ManyToOne, PrimaryColumn, type Relation } from 'typeorm';
+import { Column, Entity, PrimaryColumn } from 'typeorm';
 import type { Constant } from '../../../shared/constant';
-import { SystemRevision } from './system-revision';
 
 /** One step of one determination; decimals are the text that was published. */
 @Entity('system_constants')
@@ -56,11 +55,4 @@ export class SystemConstant implements Constant {
 
   @Column('text', { name: 'provenance_note', nullable: true })
   provenanceNote!: string | null;
-
-  @ManyToOne(() => SystemRevision, ({ constants }) => constants)
-  @JoinColumn([
-    { name: 'system_id', referencedColumnName: 'systemId' },
-    { name: 'revision', referencedColumnName: 'revision' },
-  ])
-  of?: Relation<SystemRevision>;
 }

@@ -1,14 +1,6 @@
-import {
-  Column,
-  Entity,
-  JoinColumn,
-  ManyToOne,
-  OneToMany,
-  PrimaryColumn,
-  type Relation,
-} from 'typeorm';
+import { Column, Entity, JoinColumn, ManyToOne, PrimaryColumn, type Relation } from 'typeorm';
 import { System } from './system';
-import { SystemConstant } from './system-constant';
+import type { SystemConstant } from './system-constant';
 
 /** What is said about a system at one revision. It never changes: a change makes another. */
 @Entity('system_revisions')
@@ -49,6 +41,6 @@ export class SystemRevision {
   @JoinColumn({ name: 'system_id' })
   system?: Relation<System>;
 
-  @OneToMany(() => SystemConstant, ({ of }) => of)
-  constants?: Relation<SystemConstant[]>;
+  /** There where a query joins them. */
+  constants?: SystemConstant[];
 }

@@ -78,9 +78,9 @@ export function neutralFormula(formula: string, forms: readonly (string | null)[
 /** How often each element stands in a formula, brackets multiplied out. */
 export function atomsOf(formula: string): Map<string, number> {
   const [body = ''] = formula.split('^');
-  const stack: Map<string, number>[] = [new Map()];
+  const stack = [new Map<string, number>()];
   for (const [, element, count, open, times] of body.matchAll(/([A-Z][a-z]?)(\d*)|(\()|\)(\d*)/g)) {
-    if (open) stack.push(new Map());
+    if (open) stack.push(new Map<string, number>());
     const inner = element
       ? new Map([[element, 1]])
       : open

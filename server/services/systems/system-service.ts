@@ -1,5 +1,6 @@
 import type { DataSource } from 'typeorm';
 import type { StoredSystem, SystemSummary } from '../../../shared/stored-system';
+import { SystemConstant } from '../../database/entities/system-constant';
 import { SystemRevision } from '../../database/entities/system-revision';
 import { Refusal } from '../../refusal';
 import { readReference, type Reference } from './reference';
@@ -60,7 +61,12 @@ export class SystemService {
       .getRepository(SystemRevision)
       .createQueryBuilder('entry')
       .innerJoinAndSelect('entry.system', 'system')
-      .innerJoinAndSelect('entry.constants', 'constant')
+      .innerJoinAndMapMany(
+        'entry.constants',
+        SystemConstant,
+        'constant',
+        'constant.systemId = entry.systemId AND constant.revision = entry.revision',
+      )
       .where('entry.systemId IN (:...ids)', { ids: references.map(({ id }) => id) })
       .andWhere('(system.organizationId IS NULL OR system.organizationId = :reader)', {
         reader: reader ?? null,

@@ -1,6 +1,7 @@
 import request from 'supertest';
 import { handbook } from '../../../server/database/handbook/handbook';
 import { seedHandbook } from '../../../server/database/seed-handbook';
+import { createClient } from '../../../shared/client';
 import { storedSystem, systemList, type SystemSummary } from '../../../shared/stored-system';
 import { demoOrganizations } from '../../../server/services/demo/demo-data';
 import { faultsIn } from '../../support/calls';
@@ -149,7 +150,7 @@ describe('paging', () => {
 });
 
 describe('refusals of a list', () => {
-  test.each([
+  const wrong: [query: Record<string, string>, fault: string][] = [
     [{ limit: '0' }, '?limit out-of-range'],
     [{ limit: '101' }, '?limit out-of-range'],
     [{ limit: 'ten' }, '?limit wrong-type'],
@@ -157,8 +158,9 @@ describe('refusals of a list', () => {
     [{ query: 'a\u0000' }, '?query nul-character'],
     [{ query: 'x'.repeat(101) }, '?query out-of-range'],
     [{ q: 'acid' }, '?q unknown-field'],
-  ])('%j is a 400 that names the parameter', async (query, fault) => {
-    const { status, body } = await get('/v1/systems', query as Record<string, string>);
+  ];
+  test.each(wrong)('%j is a 400 that names the parameter', async (query, fault) => {
+    const { status, body } = await get('/v1/systems', query);
     expect([status, faultsIn(body)]).toEqual([400, [fault]]);
   });
 
@@ -299,5 +301,19 @@ describe('the public handbook', () => {
     expect(list.body).toEqual(keyed.body);
     expect(list.headers.link).toMatch(/^<\/v1\/public\/systems\?query=phosph&limit=2&cursor=/);
     expect(list.headers['ratelimit-policy']).toMatch(/listPublicSystems/);
+  });
+});
+
+test('the typed client finds, pages and reads, with a key and without', async () => {
+  const client = createClient({ baseUrl: server.url, key: server.key });
+  const first = await client.systems.find({ query: 'phosph', limit: 2 });
+  expect(first.items).toHaveLength(2);
+  const second = await client.systems.find({ query: 'phosph', limit: 2, cursor: first.next ?? '' });
+  expect(second.items.map(({ id }) => id)).not.toContain(first.items[0]?.id);
+  expect((await client.systems.read('phosphoric-acid@1')).pKa).toEqual(['2.148', '7.198', '12.35']);
+  const open = createClient({ baseUrl: server.url });
+  expect((await open.publicSystems.read('tris')).name).toBe('tris');
+  await expect(open.publicSystems.read('no-such')).rejects.toMatchObject({
+    problem: { status: 404 },
   });
 });
