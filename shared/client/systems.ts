@@ -3,18 +3,20 @@ import { readPage, type Page } from './page';
 import type { CallOptions, Send } from './send';
 
 interface Search {
-  readonly query?: string;
-  readonly limit?: number;
+  readonly query?: string | undefined;
+  readonly limit?: number | undefined;
   /** Of the page before. */
-  readonly cursor?: string;
+  readonly cursor?: string | undefined;
 }
 
-const addressed = (path: string, search: Search) => {
-  const query = new URLSearchParams(
-    Object.entries(search).map(([name, value]) => [name, String(value)]),
-  ).toString();
+function addressed(path: string, search: Search): string {
+  const parameters = new URLSearchParams();
+  for (const [name, value] of Object.entries(search)) {
+    if (value !== undefined) parameters.set(name, String(value));
+  }
+  const query = parameters.toString();
   return query === '' ? path : `${path}?${query}`;
-};
+}
 
 /** Finding and reading stored systems under a path; `next` is the cursor of the page after. */
 export const systemsAt = (send: Send, path: string) => ({
