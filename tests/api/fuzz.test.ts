@@ -1,4 +1,5 @@
 import fc from 'fast-check';
+import request from 'supertest';
 import { problem } from '../../shared/problem';
 import { phosphoric, postWithKey } from '../support/calls';
 import { startTestServer, type TestServer } from '../support/server';
@@ -23,10 +24,17 @@ const system = fc.record(
   },
   { requiredKeys: [] },
 );
+const byId = fc.record({
+  id: fc.oneof(
+    fc.constantFrom('tris', 'tris@1', 'tris@99', 'no-such', 'tris@', '__proto__', 'a\u0000'),
+    fc.string(),
+    anything,
+  ),
+});
 const body = fc.record(
   {
-    system: fc.oneof(fc.constant(phosphoric), system, anything),
-    systems: fc.oneof(fc.array(system, { maxLength: 3 }), anything),
+    system: fc.oneof(fc.constant(phosphoric), system, byId, anything),
+    systems: fc.oneof(fc.array(fc.oneof(system, byId), { maxLength: 3 }), anything),
     pH: fc.oneof(
       decimalish,
       fc.array(decimalish, { maxLength: 4 }),
@@ -54,6 +62,35 @@ test('bodies made from the schema and beside it get an answer or a clear refusal
   await fc.assert(
     fc.asyncProperty(body, (value) => isCivil(JSON.stringify(value))),
     { numRuns: 700 },
+  );
+}, 60_000);
+
+const search = fc.record(
+  {
+    query: fc.oneof(
+      fc.string(),
+      fc.string({ unit: 'grapheme' }),
+      fc.constantFrom('%', "'", '\\', '^'),
+    ),
+    limit: fc.oneof(fc.integer({ min: -1, max: 102 }).map(String), fc.string()),
+    cursor: fc.oneof(
+      fc.base64String(),
+      fc.jsonValue().map((value) => Buffer.from(JSON.stringify(value)).toString('base64url')),
+    ),
+  },
+  { requiredKeys: [] },
+);
+
+test('searches of any kind get a list or a clear refusal', async () => {
+  await fc.assert(
+    fc.asyncProperty(search, fc.string(), async (query, id) => {
+      const open = request(server.url);
+      const list = await open.get('/v1/public/systems').query(query);
+      expect([200, 400, 429]).toContain(list.status);
+      const one = await open.get(`/v1/public/systems/${encodeURIComponent(id)}`);
+      expect([200, 404, 429]).toContain(one.status);
+    }),
+    { numRuns: 230 },
   );
 }, 60_000);
 
