@@ -61,7 +61,7 @@ describe('settling a value', () => {
     }
   });
 
-  test('10⁻¹¹⁷ beside a tie too, where the first order cancels: −2.84375 + 3·10⁻¹¹⁷', () => {
+  test('10⁻¹¹⁸ beside a tie too, where the first order cancels: −2.84375 + 3·10⁻¹¹⁸', () => {
     // Weights 1, 1, 10, 10, 10 times 10^(37ε) and 10^(27ε) on species 2 and 4, ε = 10⁻⁶⁰.
     const system = acid('0', beside('-1', 37), beside('0', 37), beside('-0', 27));
     const { written, levels } = charge(system, '0', 4);
