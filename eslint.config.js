@@ -62,6 +62,7 @@ module.exports = [
       ]),
     ),
   },
+  { files: ['scripts/**'], rules: { 'no-console': 'off' } },
   {
     files: ['*.js', '**/*.{cjs,mjs}', 'server/**', 'openapi/**', 'scripts/**', 'tests/**'],
     languageOptions: { globals: { __dirname: 'readonly', Buffer: 'readonly' } },

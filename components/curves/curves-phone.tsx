@@ -44,7 +44,7 @@ export function CurvesPhone({ curves }: { readonly curves: Curves }) {
   const { state, title, drawn, reading, change, move } = curves;
   const { colours } = useTheme();
   const window = useWindowDimensions();
-  const exports = useExports(curves);
+  const exports = useExports(curves, { captioned: false });
   const [open, setOpen] = useState<'system' | 'share'>();
   const close = () => setOpen(undefined);
   const pick = (choice: Choice) => {

@@ -38,7 +38,7 @@ export function CurvesWide({ curves }: { readonly curves: Curves }) {
   const { colours } = useTheme();
   const window = useWindowDimensions();
   const copy = useCopy();
-  const exports = useExports(curves);
+  const exports = useExports(curves, { captioned: true });
   const [drawer, setDrawer] = useState(false);
   const [exporting, setExporting] = useState(false);
   const inputs = inputsWidth[readOutAside ? 'wide' : 'narrow'];

@@ -15,7 +15,7 @@ interface PhControlProps {
 }
 
 /** What may yet become a number while it is typed. */
-const unfinished = /^\s*[-\u2212]?\d*\.?$/;
+const unfinished = /^\s*[-\u2212]?(\d+[.,])?$/;
 const nothing = { text: '', at: '', left: true };
 /** Keys that a line of text needs for itself. */
 const ownKeys = new Set(['ArrowLeft', 'ArrowRight', 'Home', 'End']);

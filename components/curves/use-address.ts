@@ -1,7 +1,6 @@
 import { useEffect, useState } from 'react';
 import type { CurvesState } from './curves-state';
 import { formatFragment, parseFragment } from './fragment';
-import { useSettled } from './use-settled';
 
 /** Browsers allow about a hundred changes of the address in half a minute: wait for a rest, ms. */
 const rest = 200;
@@ -17,19 +16,20 @@ const read = () => parseFragment(window.location.hash || lastFragment);
  */
 export function useAddress() {
   const [{ state, faulty }, setRead] = useState(read);
-  const settled = useSettled(state, rest);
   const [first] = useState(state);
 
   useEffect(() => {
-    const fragment = formatFragment(settled);
     // An address that was opened stays as it is until something is changed.
-    const untouched = settled === first && (window.location.hash !== '' || lastFragment === '');
+    const untouched = state === first && (window.location.hash !== '' || lastFragment === '');
     if (untouched) return;
+    const fragment = formatFragment(state);
     lastFragment = fragment;
-    if (window.location.hash !== `#${fragment}`) {
+    // The rest also lets the router, which moves after its screen is there, reach this address.
+    const timer = setTimeout(() => {
       window.history.replaceState(window.history.state, '', `#${fragment}`);
-    }
-  }, [settled, first]);
+    }, rest);
+    return () => clearTimeout(timer);
+  }, [state, first]);
 
   useEffect(() => {
     const follow = () => setRead(read());

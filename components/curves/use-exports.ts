@@ -12,8 +12,16 @@ import { curveCsv } from './curve-csv';
 import { exampleOf } from './curves-state';
 import type { Curves } from './use-curves';
 
+interface ExportOptions {
+  /** The figure on the screen states its own conditions. */
+  readonly captioned: boolean;
+}
+
 /** The files that leave the screen, and the figure they are made from. */
-export function useExports({ drawn, title }: Pick<Curves, 'drawn' | 'title'>) {
+export function useExports(
+  { drawn, title }: Pick<Curves, 'drawn' | 'title'>,
+  { captioned }: ExportOptions,
+) {
   const figure = useRef<View>(null);
   const { colours } = useTheme();
   const say = useToast();
@@ -24,7 +32,9 @@ export function useExports({ drawn, title }: Pick<Curves, 'drawn' | 'title'>) {
     const source = exampleOf(drawn.choice)?.source;
     return standaloneSvg(element, {
       title,
-      notes: [conditionsText(drawn.choice), ...(source === undefined ? [] : [source])],
+      notes: [captioned ? undefined : conditionsText(drawn.choice), source].filter(
+        (note) => note !== undefined,
+      ),
       ink: colours.ink,
       inkSoft: colours.inkSoft,
       page: colours.page,

@@ -14,8 +14,8 @@ export async function installFromDebian(packageName, what) {
   }
   if (!isRoot) {
     throw new Failure(
-      `${what} is missing, and only root may install it. Type this once, then start again:\n` +
-        `  sudo apt-get update && sudo apt-get install -y --no-install-recommends ${packageName}`,
+      `${what} is missing, and only root may install it. Type this once as root, then try again:\n` +
+        `  apt-get update && apt-get install -y --no-install-recommends ${packageName}`,
     );
   }
   await run(apt, ['update'], { env });

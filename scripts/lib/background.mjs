@@ -18,7 +18,10 @@ const graceful = 15_000;
  */
 export function startInBackground({ name, args, env, identity = {}, log }) {
   const child = spawn(process.execPath, args, {
-    ...{ cwd: root, env, ...identity, detached: true },
+    cwd: root,
+    env,
+    ...identity,
+    detached: true,
     stdio: ['ignore', 'pipe', 'pipe', 'pipe'],
   });
   log.take(child.stdout);

@@ -46,11 +46,10 @@ async function initialize(place, programs, password) {
   await rm(partial, { recursive: true, force: true });
   await writeFile(passwordFile, password, { mode: 0o600 });
   if (identity.uid !== undefined) await chown(passwordFile, identity.uid, identity.gid);
-  const choices = ['--auth=scram-sha-256', `--pwfile=${passwordFile}`, `--username=${admin}`];
-  const locale = ['--encoding=UTF8', '--locale=C.UTF-8'];
-  await run(programs.path('initdb'), ['-D', partial, ...choices, ...locale, '--no-instructions'], {
-    ...{ cwd: place, env, identity },
-  }).finally(() => rm(passwordFile, { force: true }));
+  const access = ['--auth=scram-sha-256', `--pwfile=${passwordFile}`, `--username=${admin}`];
+  const args = ['-D', partial, ...access, '--encoding=UTF8', '--locale=C.UTF-8'];
+  const forget = () => rm(passwordFile, { force: true });
+  await run(programs.path('initdb'), args, { cwd: place, env, identity }).finally(forget);
   await rename(partial, dataOf(place));
   await seal(place, password);
 }
@@ -74,6 +73,9 @@ async function launch(place, programs, usualPort, throwAway) {
   const args = ['start', '-D', dataOf(place), '-l', log, '-w', '-t', '60', '-o', options.join(' ')];
   const { code } = await attempt(programs.path('pg_ctl'), args, control(place));
   if (code === 0) return;
+  // It may have begun to start all the same, too slowly for us.
+  const abandon = ['stop', '-D', dataOf(place), '-m', 'immediate'];
+  await attempt(programs.path('pg_ctl'), abandon, control(place));
   const end = await run('tail', ['-n', '20', log], { protected: true }).catch(() => '');
   throw new Failure(`PostgreSQL did not start; the end of ${log}:\n${end}`);
 }
@@ -114,10 +116,11 @@ export async function openCluster({ place, password, usualPort = 0, throwAway = 
   const url = (role, secret, database) =>
     `postgresql://${role}:${secret}@${host}:${port}/${database}`;
   const address = ['-h', host, '-p', String(port), '-U', admin, '-w'];
+  const asAdmin = { cwd: '/', env: { ...env, PGPASSWORD: password }, title: 'psql' };
   /** Runs SQL as the cluster's administrator; secrets in it travel by stdin, not as arguments. */
-  const sql = (text, database = 'postgres') =>
-    run(programs.path('psql'), ['-X', '-q', '-v', 'ON_ERROR_STOP=1', ...address, '-d', database], {
-      ...{ cwd: '/', env: { ...env, PGPASSWORD: password }, input: text, title: 'psql' },
-    });
+  const sql = (text, database = 'postgres') => {
+    const args = ['-X', '-q', '-v', 'ON_ERROR_STOP=1', ...address, '-d', database];
+    return run(programs.path('psql'), args, { ...asAdmin, input: text });
+  };
   return { major: programs.major, pid, port, attached, setAsideTo, url, sql, admin };
 }

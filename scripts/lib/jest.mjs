@@ -32,7 +32,7 @@ export const closingLine = ({ passed, failed, skipped }) =>
 export async function runJest(args, env) {
   const report = inLocal(`jest-${process.pid}.json`);
   const workers = args.some((arg) => ownWorkers.test(arg)) ? [] : ['-w', '2'];
-  const own = ['--json', '--outputFile', report, '--forceExit', ...workers];
+  const own = ['--json', '--outputFile', report, ...workers];
   try {
     const { code } = await attempt(
       process.execPath,

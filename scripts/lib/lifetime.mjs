@@ -35,6 +35,11 @@ async function stopAll() {
  */
 const sameKeyPress = 400;
 
+/** A reader that left, as in `npm start | head`, is no reason to fall over and leave things behind. */
+function outliveReaders() {
+  for (const stream of [process.stdout, process.stderr]) stream.on('error', () => {});
+}
+
 function listenForSignals() {
   let first;
   const onSignal = () => {
@@ -66,6 +71,7 @@ const show = (fault) =>
  */
 export async function command(work, atEnd = () => {}) {
   listenForSignals();
+  outliveReaders();
   let code;
   try {
     code = (await work()) ?? 0;

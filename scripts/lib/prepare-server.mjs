@@ -5,10 +5,11 @@ import { step } from './steps.mjs';
 const lastLine = (output) => output.trim().split('\n').at(-1);
 
 /** Schema by the owner's role, then, outside production, the invented organizations. */
-export async function prepareData(settings, env, nodeArguments) {
-  await step('Schema', async () => lastLine(await runNode(nodeArguments('migrate'), { env })));
-  if (settings.mode === 'production') return;
-  await step('Demo data', async () => lastLine(await runNode(nodeArguments('seed'), { env })));
+export async function prepareData(settings, env, entryArguments) {
+  const entry = async (name, title) =>
+    lastLine(await runNode(entryArguments(name), { env, title }));
+  await step('Schema', () => entry('migrate', 'The migration'));
+  if (settings.mode !== 'production') await step('Demo data', () => entry('seed', 'Seeding'));
 }
 
 /** `node …` arguments for an entry of the built server. */

@@ -1,4 +1,4 @@
-import { accessSync, constants, readFileSync, statSync } from 'node:fs';
+import { accessSync, constants, existsSync, readFileSync, statSync } from 'node:fs';
 import { userInfo } from 'node:os';
 import { Failure, Interrupted } from './failure.mjs';
 import { inRoot, local, root } from './paths.mjs';
@@ -6,24 +6,24 @@ import { attempt } from './run.mjs';
 
 export const isRoot = process.getuid?.() === 0;
 
-/** `{ uid, gid }` of a user of this machine, or undefined. */
-export function identityOf(name) {
-  const line = readFileSync('/etc/passwd', 'utf8')
+/** Rows of the machine's list of users: name, password, uid, gid, … */
+const users = () =>
+  readFileSync('/etc/passwd', 'utf8')
     .split('\n')
-    .find((entry) => entry.startsWith(`${name}:`));
-  const [, , uid, gid] = line?.split(':') ?? [];
+    .map((line) => line.split(':'));
+
+/** `{ uid, gid }` of a user of this machine, or undefined. */
+export function identityOf(wanted) {
+  const [, , uid, gid] = users().find(([name]) => name === wanted) ?? [];
   return uid === undefined ? undefined : { uid: Number(uid), gid: Number(gid) };
 }
 
-const nameOf = (uid) =>
-  readFileSync('/etc/passwd', 'utf8')
-    .split('\n')
-    .map((entry) => entry.split(':'))
-    .find(([, , id]) => Number(id) === uid)?.[0] ?? `user ${uid}`;
+const nameOf = (wanted) =>
+  users().find(([, , uid]) => Number(uid) === wanted)?.[0] ?? `user ${wanted}`;
 
 const ours = ['.local', 'node_modules', 'dist', '.expo', 'public/fonts'];
 
-const ownerOf = (path) => statSync(path, { throwIfNoEntry: false })?.uid;
+const ownerOf = (path) => statSync(path).uid;
 
 const writable = (path) => {
   try {
@@ -40,18 +40,15 @@ const writable = (path) => {
  */
 export function requireOwnFolders() {
   if (process.getuid === undefined) return;
-  if (!writable(root)) throw new Failure(`${root} cannot be written by ${userInfo().username}.`);
-  const owner = ownerOf(local);
-  const foreign = owner !== undefined && owner !== process.getuid();
-  const locked = ours.filter(
-    (name) => ownerOf(inRoot(name)) !== undefined && !writable(inRoot(name)),
-  );
-  if (!foreign && locked.length === 0) return;
-  const before = nameOf(foreign ? owner : ownerOf(inRoot(locked[0])));
+  const present = [root, ...ours.map((name) => inRoot(name))].filter((path) => existsSync(path));
+  const foreign = existsSync(local) && ownerOf(local) !== process.getuid() ? local : undefined;
+  const inTheWay = foreign ?? present.find((path) => !writable(path));
+  if (inTheWay === undefined) return;
+  const before = nameOf(ownerOf(inTheWay));
   const me = userInfo().username;
   throw new Failure(
-    `This checkout was started by ${before} before and is now started by ${me}.\n` +
-      `Start it as ${before} again, or hand it over (the database of ${before} stays behind):\n` +
+    `${inTheWay} belongs to ${before}; this start is by ${me}.\n` +
+      `Start as ${before}, or hand the checkout over (a database of ${before} stays behind):\n` +
       `  sudo chown -R ${me} "${root}"`,
   );
 }

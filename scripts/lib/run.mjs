@@ -28,7 +28,10 @@ export function attempt(program, args, options = {}) {
   const out = show ? 'inherit' : 'pipe';
   return new Promise((resolve, reject) => {
     const child = spawn(program, args, {
-      ...{ cwd, env, ...identity, detached: true },
+      cwd,
+      env,
+      ...identity,
+      detached: true,
       stdio: [input === undefined ? 'ignore' : 'pipe', out, out],
     });
     let output = '';

@@ -35,9 +35,9 @@ function termsAlong(factors: Factors, points: PHPoints): (pH: Decimal, i: number
 }
 
 /**
- * What `answer` makes of a system's composition at each point, in order. Compositions are made as
- * planned, and with twice as many for each further level that `answer` asks
- * for. A pH that a list repeats is answered once, because raising precision can be dear.
+ * What `answer` makes of a system's composition at each point, in order. Level 0 of a composition has
+ * the planned precision, each further level that `answer` asks for twice as many digits. A pH that a
+ * list repeats is answered once, because raising precision can be dear.
  */
 export function alongPoints<T>(
   system: AcidBaseSystem,

@@ -1,5 +1,7 @@
-import type Decimal from 'decimal.js';
+import Decimal from 'decimal.js';
 import { Exact } from './contexts';
+
+const { ROUND_HALF_EVEN: halfEven, ROUND_DOWN: down } = Decimal;
 
 /** Digits in one word of decimal.js; as many are looked at behind the rounding place. */
 const tailDigits = 7;
@@ -41,7 +43,7 @@ export const unitExponent = (x: Decimal, kept: number) => x.e + 1 - kept;
 /** The tie that an x which does not round one way is next to: halfway between neighbours, exact. */
 export function tieNear(x: Decimal, kept: number): Decimal {
   const half = new Exact(`5e${unitExponent(x, kept) - 1}`);
-  const below = kept === 0 ? new Exact(0) : new Exact(x.abs()).toSignificantDigits(kept, 1);
+  const below = kept === 0 ? new Exact(0) : new Exact(x.abs()).toSignificantDigits(kept, down);
   const tie = below.plus(half);
   return x.isNegative() ? tie.negated() : tie;
 }
@@ -49,15 +51,17 @@ export function tieNear(x: Decimal, kept: number): Decimal {
 /** Digits of the coefficient of x down to `places` after the point; 0 or less for a small x. */
 export const keptForPlaces = (x: Decimal, places: number) => x.e + 1 + places;
 
-const unsignedZero = (x: Decimal) => (x.isZero() ? x.abs() : x);
+/** Rounding a small negative number leaves a zero, and zero has no sign. */
+const withoutSignOfZero = (written: string) =>
+  written.startsWith('-') && !/[1-9]/.test(written) ? written.slice(1) : written;
 
 /**
  * x to `digits` significant digits, half-even, all written; exponent form below 10⁻⁶ and from
- * 10^digits on. Zero has no sign.
+ * 10^digits on.
  */
 export const writeSignificant = (x: Decimal, digits: number) =>
-  unsignedZero(x).toPrecision(digits, 6);
+  withoutSignOfZero(x.toPrecision(digits, halfEven));
 
-/** x to `places` after the point, half-even, always plain. Zero has no sign. */
+/** x to `places` after the point, half-even, always plain. */
 export const writePlaces = (x: Decimal, places: number) =>
-  unsignedZero(x.toDecimalPlaces(places, 6)).toFixed(places);
+  withoutSignOfZero(x.toFixed(places, halfEven));

@@ -2,7 +2,7 @@ const namespace = 'http://www.w3.org/2000/svg';
 
 interface Caption {
   readonly title: string;
-  /** Conditions, source: one line each under the figure. */
+  /** Conditions, source: wrapped into lines under the figure. */
   readonly notes: readonly string[];
   readonly ink: string;
   readonly inkSoft: string;
@@ -15,6 +15,8 @@ interface Caption {
 const margin = 16;
 const titleHeight = 40;
 const noteHeight = 18;
+/** Mean advance of the notes' face at their size, px. */
+const noteAdvance = 6.4;
 
 /** What the page's style sheet says about text, which a file of its own would lose. */
 const textStyles = ['font-family', 'font-size', 'font-weight', 'font-style'] as const;
@@ -30,13 +32,24 @@ function copyTextStyles(from: SVGElement, to: SVGElement) {
   });
 }
 
+/** Breaks a text into lines of at most `width` px, at blanks. */
+function wrapped(text: string, width: number): string[] {
+  const most = Math.floor(width / noteAdvance);
+  return text.split(' ').reduce<string[]>((lines, word) => {
+    const last = lines[lines.length - 1];
+    const joined = last === undefined ? word : `${last} ${word}`;
+    return last === undefined || joined.length > most
+      ? [...lines, word]
+      : [...lines.slice(0, -1), joined];
+  }, []);
+}
+
 /** A figure on the screen as a file that stands alone: its title, its conditions, its fonts. */
 export function standaloneSvg(figure: SVGSVGElement, caption: Caption) {
   const { width: inner, height: innerHeight } = figure.getBoundingClientRect();
   const width = Math.round(inner) + 2 * margin;
-  const height = Math.round(
-    innerHeight + titleHeight + caption.notes.length * noteHeight + 2 * margin,
-  );
+  const notes = caption.notes.flatMap((note) => wrapped(note, inner));
+  const height = Math.round(innerHeight + titleHeight + notes.length * noteHeight + 2 * margin);
   const element = (name: string, attributes: Record<string, string | number>, text?: string) => {
     const made = document.createElementNS(namespace, name);
     for (const [key, value] of Object.entries(attributes)) made.setAttribute(key, String(value));
@@ -62,7 +75,7 @@ export function standaloneSvg(figure: SVGSVGElement, caption: Caption) {
     element('rect', { width, height, fill: caption.page }),
     line(caption.title, margin + 18, 20, 600, caption.ink),
     copy,
-    ...caption.notes.map((note, i) =>
+    ...notes.map((note, i) =>
       line(
         note,
         margin + titleHeight + innerHeight + (i + 1) * noteHeight,
