@@ -4,6 +4,10 @@ const { getDefaultConfig } = require('expo/metro-config');
 
 const config = getDefaultConfig(__dirname);
 
+/** Builds, and the caches and cluster of a user's start, are nothing to bundle from. */
+const here = __dirname.replace(/[^\w/]/g, '\\$&');
+config.resolver.blockList = [new RegExp(`^${here}/(dist|\\.local)/`)];
+
 /** zod brings forty languages of error messages; the contract has its own words. */
 const zodLocales = path.join('zod', 'v4', 'locales', 'index.');
 

@@ -14,6 +14,9 @@ export interface RunningServer {
   readonly close: () => Promise<void>;
 }
 
+/** How long calls under way may take once the server stops. */
+const patienceMs = 5_000;
+
 /** Connects, listens, and answers how to stop. */
 export async function startServer(config: Config, logger: Logger): Promise<RunningServer> {
   const database = await createDataSource(config.databaseUrl).initialize();
@@ -26,10 +29,13 @@ export async function startServer(config: Config, logger: Logger): Promise<Runni
   const services = createServices(database, config, publicUrl);
   server.on('request', createApp({ config, publicUrl, services, logger }));
   const close = async () => {
+    // A browser keeps spare connections on which nothing was ever asked; they would be waited for.
+    const patience = setTimeout(() => server.closeAllConnections(), patienceMs);
     await new Promise((resolve) => {
       server.close(resolve);
       server.closeIdleConnections();
     });
+    clearTimeout(patience);
     await services.compute.close();
     await database.destroy();
   };

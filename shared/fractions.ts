@@ -156,7 +156,6 @@ export const dryRunAnswer = z
 export type FractionsRequest = z.infer<typeof fractionsRequest>;
 export type FractionsQuery = z.infer<typeof fractionsQuery>;
 export type FractionsRequestInput = z.input<typeof fractionsRequest>;
-export type PublicFractionsRequest = z.infer<typeof publicFractionsRequest>;
 export type PublicFractionsRequestInput = z.input<typeof publicFractionsRequest>;
 export type FractionPoint = z.infer<typeof point>;
 export type SystemFractions = z.infer<typeof systemFractions>;

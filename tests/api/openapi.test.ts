@@ -1,6 +1,7 @@
 import { spawnSync } from 'node:child_process';
 import { readFileSync } from 'node:fs';
 import path from 'node:path';
+import Ajv2020 from 'ajv/dist/2020';
 import request from 'supertest';
 import { openApiDocument } from '../../openapi/document';
 import { operations } from '../../server/routes';
@@ -52,6 +53,14 @@ test('the document is valid OpenAPI 3.1', () => {
   expect(JSON.parse(lint.stdout)).toMatchObject({ totals: { errors: 0, warnings: 0 } });
 });
 
+/** Validates by the document's own JSON Schema, as a caller's tools would. */
+const ajv = new Ajv2020({ strict: false, validateFormats: false }).addSchema(document, 'document');
+const answerSchema = (path: string, method: string, status: number) => {
+  const place = ['paths', path, method, 'responses', `${status}`, 'content', 'application/json'];
+  const pointer = place.map((part) => part.replaceAll('~', '~0').replaceAll('/', '~1')).join('/');
+  return ajv.compile({ $ref: `document#/${encodeURI(pointer)}/schema` });
+};
+
 const examples = operations.flatMap((operation) =>
   Object.entries(operation.examples).map(
     ([name, example]) => [`${operation.operationId} ${name}`, operation, example] as const,
@@ -75,6 +84,9 @@ test.each(examples)('example %s is what the service answers', async (_name, oper
   expect(got.status).toBe(status);
   expect(got.body).toEqual(example.answer);
   expect(answer?.safeParse(got.body).error).toBeUndefined();
+  const valid = answerSchema(path, method, status);
+  valid(got.body);
+  expect(valid.errors).toBeNull();
 });
 
 const schemaOf = (schema: Schema): Schema =>
