@@ -9,7 +9,7 @@ import { conditionsInFigure } from './conditions';
 import { CurvesFigure } from './curves-figure';
 import type { Layer } from './curves-state';
 import type { Curves } from './use-curves';
-import { useLong } from './use-settled';
+import { useLong } from '../ui/use-settled';
 
 interface CurvePlotProps {
   readonly curves: Curves;

@@ -8,7 +8,7 @@ import { drawnCurve } from './drawn-curve';
 import type { DrawnCurve } from './drawn-curve';
 import type { Reading } from './follow-curve';
 import { exactReading, followCurve } from './follow-curve';
-import { useSettled } from './use-settled';
+import { useSettled } from '../ui/use-settled';
 
 const client = createClient({ baseUrl: '' });
 

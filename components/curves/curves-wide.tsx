@@ -20,7 +20,7 @@ import { SidePanel } from './side-panel';
 import { formulasOf } from './species-formulas';
 import { SystemInputs } from './system-inputs';
 import { linkTo } from './use-address';
-import { useCopy } from './use-copy';
+import { useCopy } from '../ui/use-copy';
 import type { Curves } from './use-curves';
 import { useExports } from './use-exports';
 

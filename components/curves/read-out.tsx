@@ -13,8 +13,8 @@ import { neighbourRatio } from './neighbours';
 import { ValueRow } from './read-out-row';
 import { readOutText } from './read-out-text';
 import { shownCharge, shownRatio } from './rounded';
-import { useCopy } from './use-copy';
-import { useSettled } from './use-settled';
+import { useCopy } from '../ui/use-copy';
+import { useSettled } from '../ui/use-settled';
 
 interface ReadOutProps {
   readonly drawn: DrawnCurve;

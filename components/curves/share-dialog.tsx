@@ -8,7 +8,7 @@ import { curveRequest } from './request/curve-request';
 import { requestCode } from './request/request-code';
 import { RequestView, useLanguage } from './request/request-view';
 import { linkTo } from './use-address';
-import { useCopy } from './use-copy';
+import { useCopy } from '../ui/use-copy';
 import type { Curves } from './use-curves';
 import type { Exports } from './use-exports';
 

@@ -4,7 +4,7 @@ import { Numerals } from '../../ui/numerals';
 import { space, useTheme } from '../../ui/theme';
 import { webStyle } from '../../ui/web-style';
 import { Words } from '../../ui/words';
-import { useCopy } from '../use-copy';
+import { useCopy } from '../../ui/use-copy';
 import type { WrittenRequest } from './request-code';
 import { requestCode } from './request-code';
 import { RequestView, useLanguage } from './request-view';

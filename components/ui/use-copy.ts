@@ -1,5 +1,5 @@
 import * as Clipboard from 'expo-clipboard';
-import { useToast } from '../ui/toast';
+import { useToast } from './toast';
 
 /** Puts text on the clipboard and says so, or says that the browser refused. */
 export function useCopy() {
