@@ -15,6 +15,8 @@ export interface ButtonProps {
   readonly icon?: IconName;
   /** Shows the icon alone; the label is still what screen readers say. */
   readonly hideLabel?: boolean;
+  /** Said after the label, where several buttons on screen share it: what this one is about. */
+  readonly about?: string;
   readonly disabled?: boolean;
   /** Why the button is disabled, shown below it. */
   readonly why?: string;
@@ -34,6 +36,7 @@ export function Button({
   size = 'regular',
   icon,
   hideLabel = false,
+  about,
   disabled = false,
   why,
   expanded,
@@ -50,7 +53,7 @@ export function Button({
       <Pressable
         ref={ref}
         role="button"
-        aria-label={hideLabel ? label : undefined}
+        aria-label={hideLabel || about !== undefined ? spoken(label, about) : undefined}
         aria-expanded={expanded}
         aria-controls={controls}
         aria-describedby={showsWhy ? whyId : undefined}
@@ -82,6 +85,8 @@ export function Button({
     </View>
   );
 }
+
+const spoken = (label: string, about = '') => `${label} ${about}`.trim();
 
 const tones = { primary: 'onWell', plain: 'ink', destructive: 'bad', quiet: 'well' } as const;
 const heights = { regular: 44, main: 52, small: 36 } as const;

@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import { useId, type ReactNode } from 'react';
 import { Pressable, StyleSheet, View } from 'react-native';
 import { Icon } from './icon';
 import { space, useTheme } from './theme';
@@ -12,18 +12,30 @@ interface CheckboxProps {
   readonly onChange: (checked: boolean) => void;
   /** Stands at the right: a symbol, a reason. */
   readonly note?: ReactNode;
+  /** Stands under the label. */
+  readonly help?: string;
   readonly disabled?: boolean;
 }
 
 /** Something that is on or off; the whole row is the target. */
-export function Checkbox({ label, checked, onChange, note, disabled = false }: CheckboxProps) {
+export function Checkbox({
+  label,
+  checked,
+  onChange,
+  note,
+  help,
+  disabled = false,
+}: CheckboxProps) {
   const { colours } = useTheme();
   const { rail } = useLayout();
+  const id = useId();
   const tone = disabled ? 'inkSoft' : 'ink';
   return (
     <Pressable
       role="checkbox"
       aria-checked={checked}
+      aria-labelledby={help === undefined ? undefined : `${id}-label`}
+      aria-describedby={help === undefined ? undefined : `${id}-help`}
       disabled={disabled}
       onPress={() => onChange(!checked)}
       // react-native-web presses by Space only where the role is button.
@@ -47,7 +59,14 @@ export function Checkbox({ label, checked, onChange, note, disabled = false }: C
         {checked && <Icon name="check" size={16} tone={disabled ? 'inkSoft' : 'onWell'} />}
       </View>
       <View style={styles.label}>
-        <Words tone={tone}>{label}</Words>
+        <Words tone={tone} nativeID={`${id}-label`}>
+          {label}
+        </Words>
+        {help !== undefined && (
+          <Words kind="help" nativeID={`${id}-help`}>
+            {help}
+          </Words>
+        )}
       </View>
       {typeof note === 'string' ? <Words kind="help">{note}</Words> : note}
     </Pressable>

@@ -1,4 +1,6 @@
 import type { ReactNode } from 'react';
+import { Pressable, StyleSheet } from 'react-native';
+import { Icon } from './icon';
 import { ScrollBox } from './scroll-box';
 import { Numerals } from './numerals';
 import { space, useTheme } from './theme';
@@ -10,6 +12,14 @@ export interface Column {
   readonly head: ReactNode;
   /** Set in numerals, at the right. */
   readonly numeric?: boolean;
+  /** Its head sorts by it. */
+  readonly sortable?: boolean;
+}
+
+/** By which column the rows are sorted, and which way. */
+export interface Sorting {
+  readonly key: string;
+  readonly direction: 'ascending' | 'descending';
 }
 
 /** One row: a cell for each column's key, and a `key` of its own where its first cell is no id. */
@@ -23,13 +33,23 @@ interface DataTableProps {
   /** px; a longer table scrolls inside itself, its head staying. */
   readonly maxHeight?: number;
   readonly hideCaption?: boolean;
+  readonly sorted?: Sorting;
+  readonly onSort?: (key: string) => void;
 }
 
 /**
  * A table that a spreadsheet can paste and a screen reader can walk: real table elements, which
  * react-native-web has none of. Wider than its place, it scrolls inside itself.
  */
-export function DataTable({ caption, columns, rows, maxHeight, hideCaption }: DataTableProps) {
+export function DataTable({
+  caption,
+  columns,
+  rows,
+  maxHeight,
+  hideCaption,
+  sorted,
+  onSort,
+}: DataTableProps) {
   const { colours } = useTheme();
   const { rail } = useLayout();
   // The outer cells end where the table ends: figures stand on the edge of their column of text.
@@ -62,10 +82,13 @@ export function DataTable({ caption, columns, rows, maxHeight, hideCaption }: Da
         <thead>
           <tr>
             {columns.map((column) => (
-              <th key={column.key} scope="col" style={{ ...cell(column), ...head }}>
-                <Words kind="label" tone="inkSoft">
-                  {column.head}
-                </Words>
+              <th
+                key={column.key}
+                scope="col"
+                aria-sort={sorted?.key === column.key ? sorted.direction : undefined}
+                style={{ ...cell(column), ...head }}
+              >
+                <Head column={column} sorted={sorted} onSort={onSort} />
               </th>
             ))}
           </tr>
@@ -86,7 +109,31 @@ export function DataTable({ caption, columns, rows, maxHeight, hideCaption }: Da
   );
 }
 
+function Head({
+  column,
+  sorted,
+  onSort,
+}: { readonly column: Column } & Pick<DataTableProps, 'sorted' | 'onSort'>) {
+  const direction = sorted?.key === column.key ? sorted.direction : undefined;
+  const words = (
+    <Words kind="label" tone={direction ? 'ink' : 'inkSoft'}>
+      {column.head}
+    </Words>
+  );
+  if (!column.sortable || !onSort) return words;
+  return (
+    <Pressable role="button" onPress={() => onSort(column.key)} style={styles.head}>
+      {words}
+      {direction && <Icon name={direction === 'ascending' ? 'arrow-up' : 'arrow-down'} size={16} />}
+    </Pressable>
+  );
+}
+
 function Cell({ numeric, children }: { readonly numeric?: boolean; readonly children: ReactNode }) {
   if (typeof children !== 'string' && typeof children !== 'number') return children;
   return numeric ? <Numerals size={14}>{children}</Numerals> : <Words>{children}</Words>;
 }
+
+const styles = StyleSheet.create({
+  head: { flexDirection: 'row', alignItems: 'center', gap: space[1], minHeight: 32 },
+});

@@ -11,6 +11,8 @@ interface DialogProps {
   readonly title: string;
   readonly open: boolean;
   readonly onClose: () => void;
+  /** For what does not fit a column of text; a sheet on a phone is as wide as it is. */
+  readonly wide?: boolean;
   readonly children: ReactNode;
   /** Buttons, the safe one first. */
   readonly actions?: ReactNode;
@@ -20,7 +22,7 @@ interface DialogProps {
  * A question or a view that waits on top of the page. The browser's own modal `<dialog>`: the page
  * behind is inert, Esc closes, and the focus goes back to where it was.
  */
-export function Dialog({ title, open, onClose, children, actions }: DialogProps) {
+export function Dialog({ title, open, onClose, wide = false, children, actions }: DialogProps) {
   const { colours } = useTheme();
   const { rail } = useLayout();
   const titleId = useId();
@@ -47,7 +49,7 @@ export function Dialog({ title, open, onClose, children, actions }: DialogProps)
         if (event.target === event.currentTarget) onClose();
       }}
       onKeyDown={keepFocusWithin}
-      className={rail ? 'dialog' : 'dialog sheet'}
+      className={rail ? (wide ? 'dialog wide' : 'dialog') : 'dialog sheet'}
     >
       {open && (
         <View

@@ -1,4 +1,4 @@
-import { useId, useRef, type Ref } from 'react';
+import { useId, useRef, type ReactNode, type Ref } from 'react';
 import {
   StyleSheet,
   Text,
@@ -27,6 +27,10 @@ interface FieldProps {
   readonly unit?: string;
   /** Shown inside, at the left. */
   readonly lead?: string;
+  /** A button of 44 px inside, at the right, where no unit is. */
+  readonly trailing?: ReactNode;
+  /** Shows dots in place of what is typed. */
+  readonly secret?: boolean;
   readonly help?: string;
   /** What is wrong and the right form; takes the place of the help. */
   readonly error?: string;
@@ -51,6 +55,8 @@ export function Field({
   onChangeText,
   unit,
   lead,
+  trailing,
+  secret = false,
   help,
   error,
   onSubmit,
@@ -97,6 +103,7 @@ export function Field({
           aria-labelledby={hideLabel ? undefined : ids.label}
           aria-describedby={described || undefined}
           aria-invalid={invalid || undefined}
+          secureTextEntry={secret}
           inputMode={inputMode}
           autoComplete={autoComplete}
           autoCapitalize="none"
@@ -110,7 +117,7 @@ export function Field({
               backgroundColor: colours.page,
               borderColor: invalid ? colours.bad : colours.edge,
               paddingLeft: room(lead, invalid),
-              paddingRight: room(unit, invalid),
+              paddingRight: trailing === undefined ? room(unit, invalid) : height,
             },
             invalid && styles.invalid,
           ]}
@@ -120,6 +127,7 @@ export function Field({
             <Words kind="button">{lead}</Words>
           </View>
         )}
+        {trailing !== undefined && <View style={styles.trailing}>{trailing}</View>}
         {unit !== undefined && (
           <View style={[styles.inside, styles.unit]}>
             <Words tone="inkSoft" nativeID={ids.unit}>
@@ -139,11 +147,13 @@ export function Field({
 const room = (inside: string | undefined, invalid: boolean) =>
   (inside === undefined ? space[3] : space[5] + inside.length * 8) - (invalid ? 1 : 0);
 
+const height = 44;
+
 const styles = StyleSheet.create({
   field: { minWidth: 0 },
   label: { marginBottom: 6, cursor: 'pointer' },
   input: { borderWidth: 1, borderRadius: radius, fontSize: 15, width: '100%' },
-  regular: { height: 44 },
+  regular: { height },
   main: { height: 52, fontSize: 24, fontWeight: '500' },
   invalid: { borderWidth: 2 },
   inside: {
@@ -155,4 +165,5 @@ const styles = StyleSheet.create({
   },
   lead: { left: space[3] },
   unit: { right: space[3] },
+  trailing: { position: 'absolute', top: 0, right: 0 },
 });

@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import type { ReactNode, Ref } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { Icon, type IconName } from './icon';
 import { Numerals } from './numerals';
@@ -11,6 +11,8 @@ interface NoticeProps {
   readonly children?: ReactNode;
   /** Of the refused call, so that it can be found in the service's logs. */
   readonly requestId?: string;
+  /** Lets the focus be sent here: what is wrong is then read before what to change. */
+  readonly ref?: Ref<View>;
 }
 
 const icons: Record<NoticeProps['tone'], IconName> = {
@@ -20,10 +22,12 @@ const icons: Record<NoticeProps['tone'], IconName> = {
 };
 
 /** A state worth reading: what it is, and what to do. Announced when it appears. */
-export function Notice({ tone, title, children, requestId }: NoticeProps) {
+export function Notice({ tone, title, children, requestId, ref }: NoticeProps) {
   const { colours } = useTheme();
   return (
     <View
+      ref={ref}
+      tabIndex={ref ? -1 : undefined}
       role={tone === 'bad' ? 'alert' : 'status'}
       style={[styles.notice, { backgroundColor: colours[`${tone}Wash`] }]}
     >

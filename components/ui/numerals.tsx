@@ -5,7 +5,7 @@ import { SurroundingTextProvider, useSurroundingText } from './text-context';
 import { fonts, useTheme, type Colours } from './theme';
 import { Raised } from './raised';
 
-const lineHeights = { 12: 16, 13: 20, 14: 20, 15: 22, 20: 26, 24: 30, 64: 64 } as const;
+const lineHeights = { 12: 16, 13: 20, 14: 20, 15: 22, 18: 28, 20: 26, 24: 30, 64: 64 } as const;
 export type NumeralsSize = keyof typeof lineHeights;
 
 interface NumeralsProps {
