@@ -1,5 +1,6 @@
 import { View } from 'react-native';
 import * as Clipboard from 'expo-clipboard';
+import { firstCall } from '../keys/first-call';
 import { Section } from '../shell/prose';
 import { Button } from '../ui/button';
 import { CodeBlock } from '../ui/code-block';
@@ -7,23 +8,10 @@ import { Numerals } from '../ui/numerals';
 import { useToast } from '../ui/toast';
 import { Words } from '../ui/words';
 
-const call = (origin: string) => `curl ${origin}/v1/fractions \\
-  -H "Authorization: Bearer $STEPWELL_KEY" \\
-  -H "Content-Type: application/json" \\
-  -d '{
-    "system": {
-      "name": "phosphoric acid",
-      "fullyProtonatedCharge": 0,
-      "pKa": ["2.148", "7.198", "12.35"]
-    },
-    "pH": "7.4",
-    "digits": 12
-  }'`;
-
 /** A call that works as it is copied, against the service that shows it. */
 export function FirstCall() {
   const say = useToast();
-  const code = call(window.location.origin);
+  const code = firstCall(window.location.origin, '$STEPWELL_KEY');
   const copy = async () => {
     await Clipboard.setStringAsync(code);
     say({ text: 'Call copied' });

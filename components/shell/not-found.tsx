@@ -3,11 +3,12 @@ import { StyleSheet, View } from 'react-native';
 import { space } from '../ui/theme';
 import { Words } from '../ui/words';
 import { Page } from './page';
-import { places } from './places';
 import { Prose } from './prose';
+import { usePlaces } from './use-places';
 
 /** An address that leads nowhere. */
 export function NotFound() {
+  const places = usePlaces();
   return (
     <Page title="No page at this address">
       <Prose>

@@ -15,11 +15,13 @@ interface PageProps {
   readonly subtitle?: ReactNode;
   /** Buttons at the right of the heading. */
   readonly actions?: ReactNode;
+  /** A phone's main action, in a `Dock` under the content. */
+  readonly dock?: ReactNode;
   readonly children: ReactNode;
 }
 
 /** A place's page: its title, its one h1, its gutters. */
-export function Page({ title, heading = title, subtitle, actions, children }: PageProps) {
+export function Page({ title, heading = title, subtitle, actions, dock, children }: PageProps) {
   const { rail } = useLayout();
   return (
     <>
@@ -37,6 +39,7 @@ export function Page({ title, heading = title, subtitle, actions, children }: Pa
         {actions}
       </View>
       <View style={[styles.content, rail && styles.contentWide]}>{children}</View>
+      {dock}
     </>
   );
 }

@@ -6,16 +6,25 @@ import type { Place } from './places';
 
 interface PlaceLinkProps {
   readonly place: Place;
+  /** Called on the way there, such as to close what the link stands in. */
+  readonly onGo?: () => void;
   readonly style: (state: { current: boolean; hovered: boolean }) => StyleProp<ViewStyle>;
   readonly children: (current: boolean) => ReactNode;
 }
 
 /** The way to the top of a place; says when it is the one on screen. */
-export function PlaceLink({ place, style, children }: PlaceLinkProps) {
+export function PlaceLink({ place, onGo, style, children }: PlaceLinkProps) {
   const current = usePathname() === place.href;
   const [hovered, setHovered] = useState(false);
   return (
-    <Link href={place.href} asChild onPress={() => window.scrollTo(0, 0)}>
+    <Link
+      href={place.href}
+      asChild
+      onPress={() => {
+        window.scrollTo(0, 0);
+        onGo?.();
+      }}
+    >
       {/* A view, not a Pressable, whose own onClick would take the place of the link's. */}
       <View
         aria-current={current ? 'page' : undefined}

@@ -1,20 +1,30 @@
+import type { Role } from '../../shared/scopes';
 import type { IconName } from '../ui/icon';
 
 /** A place of the app and the question it answers. */
 export interface Place {
-  readonly href: '/' | '/api' | '/notes';
+  readonly href: '/' | '/keys' | '/api' | '/notes';
   readonly label: string;
   readonly question: string;
   readonly icon: IconName;
+  /** Who finds it among the places; without it everybody, signed in or not. */
+  readonly roles?: readonly Role[];
 }
 
 /** In the order of the bar and the rail. */
-export const places: readonly Place[] = [
+const places: readonly Place[] = [
   {
     href: '/',
     label: 'Curves',
     question: 'What forms are present at this pH?',
     icon: 'curves',
+  },
+  {
+    href: '/keys',
+    label: 'Keys',
+    question: 'Who calls us, and how do I stop one?',
+    icon: 'key',
+    roles: ['admin', 'developer'],
   },
   {
     href: '/api',
@@ -29,3 +39,16 @@ export const places: readonly Place[] = [
     icon: 'notes',
   },
 ];
+
+/** The places of somebody in this role, or of nobody in particular. */
+export const placesOf = (role: Role | undefined): readonly Place[] =>
+  places.filter(({ roles }) => roles === undefined || (role !== undefined && roles.includes(role)));
+
+/** Places on a phone's bar; its last slot holds the account and the places that find no room. */
+const onBar = 4;
+
+/** What the bar shows itself, and what stands behind its last slot. */
+export const barPlaces = (all: readonly Place[]) => ({
+  shown: all.slice(0, onBar),
+  behind: all.slice(onBar),
+});

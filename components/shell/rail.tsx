@@ -6,7 +6,9 @@ import { useLayout } from '../ui/use-layout';
 import { webStyle } from '../ui/web-style';
 import { Words } from '../ui/words';
 import { PlaceLink } from './place-link';
-import { places, type Place } from './places';
+import type { Place } from './places';
+import { RailAccount } from './rail-account';
+import { usePlaces } from './use-places';
 
 const widths = { narrow: 72, wide: 184 } as const;
 
@@ -14,6 +16,7 @@ const widths = { narrow: 72, wide: 184 } as const;
 export function Rail() {
   const { colours } = useTheme();
   const { readOutAside: wide } = useLayout();
+  const places = usePlaces();
   return (
     <View
       role="navigation"
@@ -52,6 +55,7 @@ export function Rail() {
           }
         </PlaceLink>
       ))}
+      <RailAccount wide={wide} />
     </View>
   );
 }

@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
+import { SessionEnded } from '../account/session-ended';
 import { useTheme } from '../ui/theme';
 import { ToastProvider } from '../ui/toast';
 import { useLayout } from '../ui/use-layout';
@@ -28,6 +29,7 @@ export function Shell({ children }: { readonly children: ReactNode }) {
         <SkipLink />
         {rail ? <Rail /> : null}
         <View id={mainId} role="main" tabIndex={-1} style={styles.main}>
+          <SessionEnded />
           {children}
         </View>
         {rail ? null : <Bar />}
