@@ -6,7 +6,7 @@ import { SignInLink } from '../account/sign-in-link';
 import { useTheme } from '../ui/theme';
 import { BarItem, barSlot } from './bar-item';
 import { MoreDialog } from './more-dialog';
-import type { Place } from './places';
+import { isWithin, type Place } from './places';
 
 /** The last slot of the bar: the account, and the places the bar has no room for. */
 export function BarEnd({ behind }: { readonly behind: readonly Place[] }) {
@@ -21,7 +21,7 @@ export function BarEnd({ behind }: { readonly behind: readonly Place[] }) {
       </SignInLink>
     );
   }
-  const current = behind.some(({ href }) => href === pathname);
+  const current = behind.some((place) => isWithin(place, pathname));
   const more = behind.length > 0;
   return (
     <>

@@ -2,7 +2,7 @@ import { Link, usePathname } from 'expo-router';
 import { useState, type ReactNode } from 'react';
 import { StyleSheet, View, type StyleProp, type ViewStyle } from 'react-native';
 import { softColour } from '../ui/web-style';
-import type { Place } from './places';
+import { isWithin, type Place } from './places';
 
 interface PlaceLinkProps {
   readonly place: Place;
@@ -14,7 +14,7 @@ interface PlaceLinkProps {
 
 /** The way to the top of a place; says when it is the one on screen. */
 export function PlaceLink({ place, onGo, style, children }: PlaceLinkProps) {
-  const current = usePathname() === place.href;
+  const current = isWithin(place, usePathname());
   const [hovered, setHovered] = useState(false);
   return (
     <Link

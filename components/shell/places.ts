@@ -3,7 +3,7 @@ import type { IconName } from '../ui/icon';
 
 /** A place of the app and the question it answers. */
 export interface Place {
-  readonly href: '/' | '/keys' | '/api' | '/notes';
+  readonly href: '/' | '/systems' | '/keys' | '/api' | '/notes';
   readonly label: string;
   readonly question: string;
   readonly icon: IconName;
@@ -18,6 +18,12 @@ const places: readonly Place[] = [
     label: 'Curves',
     question: 'What forms are present at this pH?',
     icon: 'curves',
+  },
+  {
+    href: '/systems',
+    label: 'Systems',
+    question: 'Which constants do we use, from where?',
+    icon: 'systems',
   },
   {
     href: '/keys',
@@ -39,6 +45,10 @@ const places: readonly Place[] = [
     icon: 'notes',
   },
 ];
+
+/** Whether an address is that of a place or of a page within it. */
+export const isWithin = ({ href }: Place, pathname: string) =>
+  pathname === href || pathname.startsWith(`${href}/`);
 
 /** The places of somebody in this role, or of nobody in particular. */
 export const placesOf = (role: Role | undefined): readonly Place[] =>

@@ -9,11 +9,21 @@ const quantities = {
   alpha: { italic: '\u03b1', spoken: 'alpha' },
   beta: { italic: '\u03b2', spoken: 'beta' },
   meanCharge: { italic: 'z\u0304', spoken: 'mean charge' },
+  firstCharge: { italic: 'z', index: '0', spoken: 'charge of the fully protonated form' },
   concentration: { italic: 'c', spoken: 'concentration' },
   ionicStrength: { italic: 'I', spoken: 'ionic strength' },
   activity: { italic: 'a', spoken: 'activity' },
   pK: { upright: 'p', italic: 'K', spoken: 'p K' },
   pKa: { upright: 'p', italic: 'K', index: 'a', spoken: 'p K a' },
+  deltaH: { upright: 'Δ', italic: 'H', degree: true, spoken: 'standard enthalpy change' },
+  deltaCp: {
+    upright: 'Δ',
+    italic: 'C',
+    index: 'p',
+    degree: true,
+    spoken: 'standard heat capacity change',
+  },
+  uncertainty: { italic: 'u', spoken: 'standard uncertainty' },
   pKPrime: { upright: 'p', italic: 'K', prime: true, spoken: 'p K prime' },
 } as const;
 
@@ -39,6 +49,7 @@ export function Quantity({ of, index, size, bold, tone }: QuantityProps) {
     italic: string;
     index?: string;
     prime?: boolean;
+    degree?: boolean;
     spoken: string;
   } = quantities[of];
   const subscript = [symbol.index, index].filter((part) => part !== undefined).join('');
@@ -55,6 +66,7 @@ export function Quantity({ of, index, size, bold, tone }: QuantityProps) {
       {symbol.upright}
       <Text style={styles.italic}>{symbol.italic}</Text>
       {symbol.prime && <Text style={styles.prime}>′</Text>}
+      {symbol.degree && <Raised place="sup">°</Raised>}
       {subscript !== '' && <Raised place="sub">{subscript}</Raised>}
     </Text>
   );

@@ -1,0 +1,1 @@
+export { SystemsLayout as default } from '../../../components/systems/systems-layout';

@@ -1,0 +1,1 @@
+export { SystemsScreen as default } from '../../../components/systems/systems-screen';
