@@ -20,6 +20,8 @@ interface PhAxisProps {
 
 /** Half the tab and half a numeral, px. */
 const tabRoom = 38;
+/** Title and caption stand clear of the tab, px. */
+const titleDrop = 51;
 const minus = '\u2212';
 
 /** The one pH axis under the last panel. */
@@ -47,12 +49,12 @@ export function PhAxis({ x, domain, y, tab, titled = false, caption }: PhAxisPro
         </G>
       ))}
       {caption !== undefined && (
-        <FigureText x={x(from)} y={y + 44} fill={colours.inkSoft} face="words">
+        <FigureText x={x(from)} y={y + titleDrop} fill={colours.inkSoft} face="words">
           {caption}
         </FigureText>
       )}
       {titled && (
-        <FigureText x={x(to)} y={y + 44} anchor="end" fill={colours.inkSoft} face="words">
+        <FigureText x={x(to)} y={y + titleDrop} anchor="end" fill={colours.inkSoft} face="words">
           <TSpan fontWeight="600" fill={colours.ink}>
             pH
           </TSpan>

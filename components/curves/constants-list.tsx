@@ -1,30 +1,50 @@
+import { Link } from 'expo-router';
 import { StyleSheet, View } from 'react-native';
+import type { Constant } from '../../shared/constant';
+import { basesOf } from '../handbook/bases';
+import { BasisInShort } from '../handbook/basis-in-short';
 import { Button } from '../ui/button';
 import { Quantity } from '../ui/quantity';
 import { space } from '../ui/theme';
 import { Words } from '../ui/words';
-import type { Example } from './examples';
 import { ValueRow } from './read-out-row';
 
 interface ConstantsListProps {
-  readonly example: Example;
+  /** Id of the system whose constants they are. */
+  readonly id: string;
+  readonly constants: readonly Constant[];
   readonly onTypeOwn: () => void;
 }
 
-/** An example's constants as given, and where they are from. */
-export function ConstantsList({ example, onTypeOwn }: ConstantsListProps) {
-  const { system, source, note } = example;
+/** A stored system's constants as given, and where they are from. */
+export function ConstantsList({ id, constants, onTypeOwn }: ConstantsListProps) {
+  const bases = basesOf(constants);
   return (
     <View style={styles.list}>
       <View role="table" aria-label="Constants">
-        {system.pKa.map((value, i) => (
-          <ValueRow key={i} label={<Quantity of="pKa" index={i + 1} />} value={value} />
+        {constants.map(({ step, value, estimate, approximate }) => (
+          <ValueRow
+            key={step}
+            label={
+              <Words>
+                <Quantity of="pKa" index={step} />
+                {estimate ? ' estimate' : approximate && ' approximate'}
+              </Words>
+            }
+            value={value}
+          />
         ))}
       </View>
-      <Words kind="help">{source}</Words>
-      {note !== undefined && <Words kind="help">{note}</Words>}
-      <View style={styles.own}>
+      {bases.map((basis) => (
+        <BasisInShort key={basis.steps[0]} basis={basis} count={constants.length} />
+      ))}
+      <View style={styles.ways}>
         <Button kind="quiet" label="Change these constants" onPress={onTypeOwn} />
+        <Link href={`/systems/${id}`} style={styles.link}>
+          <Words kind="button" tone="well">
+            All that is known of them
+          </Words>
+        </Link>
       </View>
     </View>
   );
@@ -32,5 +52,6 @@ export function ConstantsList({ example, onTypeOwn }: ConstantsListProps) {
 
 const styles = StyleSheet.create({
   list: { gap: space[2] },
-  own: { alignItems: 'flex-start' },
+  ways: { alignItems: 'flex-start' },
+  link: { paddingVertical: 11 },
 });

@@ -17,7 +17,8 @@ const highest = Number(limits.pH.to);
 
 /**
  * The pH range a system is drawn over: 0 to 14 at least, widened to the whole number that leaves
- * one unit beside an outlying constant, within the contract's −20…40.
+ * one unit beside an outlying constant, within the contract's −20…40. A stored system, whose
+ * constants come only with its curve, is drawn over 0 to 14.
  */
 export function rangeOf(pKa: readonly string[]): readonly [number, number] {
   const values = pKa.map(Number);

@@ -1,29 +1,31 @@
-import { onlineManager } from '@tanstack/react-query';
-import { useSyncExternalStore } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { ProblemError } from '../../shared/client';
 import { Button } from '../ui/button';
 import { Notice } from '../ui/notice';
 import { space } from '../ui/theme';
+import { useOnline } from '../ui/use-online';
 import { Words } from '../ui/words';
 import type { Curves } from './use-curves';
 
-const useOnline = () =>
-  useSyncExternalStore(
-    (changed) => onlineManager.subscribe(changed),
-    () => onlineManager.isOnline(),
-  );
-
 /** What stands between the reader and the curve asked for. What is drawn stays. */
-export function CurveNotices({ faulty, curve }: Pick<Curves, 'faulty' | 'curve'>) {
+export function CurveNotices({
+  faulty,
+  unknown,
+  curve,
+}: Pick<Curves, 'faulty' | 'unknown' | 'curve'>) {
   const online = useOnline();
   const failure = curve.error ?? curve.failureReason;
-  if (!faulty && online && !failure) return null;
+  if (!faulty && unknown === undefined && online && !failure) return null;
   return (
     <View style={styles.notices}>
       {faulty && (
         <Notice tone="warn" title="Part of this address could not be used">
           What it left open is as on a first visit.
+        </Notice>
+      )}
+      {unknown !== undefined && (
+        <Notice tone="warn" title={`No system has the id ${unknown}`}>
+          Phosphoric acid is drawn in its place. Find yours by name, formula or CAS number.
         </Notice>
       )}
       {!online && (

@@ -43,7 +43,7 @@ export function CurvePlot({ curves, layers, height, compact, figure }: CurvePlot
           width={width}
           height={height}
           compact={compact}
-          caption={conditionsInFigure(drawn.choice)}
+          caption={conditionsInFigure(drawn)}
           onMove={move}
         />
       )}

@@ -3,7 +3,7 @@ import { useState } from 'react';
 import { createClient, ProblemError } from '../../shared/client';
 import { curveDigits, gridOf } from './curve-grid';
 import type { Choice } from './curves-state';
-import { systemOf } from './curves-state';
+import { givenConstants, systemAsked } from './curves-state';
 import { drawnCurve } from './drawn-curve';
 import type { DrawnCurve } from './drawn-curve';
 import type { Reading } from './follow-curve';
@@ -36,15 +36,20 @@ export function useCurve(choice: Choice) {
   const query = useQuery({
     queryKey: ['curve', settled],
     queryFn: async ({ signal }) => {
-      const system = systemOf(settled);
-      const body = { system, pH: gridOf(system.pKa), digits: curveDigits };
+      const pH = gridOf(givenConstants(settled));
+      const body = { system: systemAsked(settled), pH, digits: curveDigits };
       return drawnCurve(settled, await client.publicFractions(body, { signal }));
     },
     ...patience,
   });
   const [last, setLast] = useState(query.data);
   if (query.data && query.data !== last) setLast(query.data);
-  return { ...query, drawn: query.data ?? last };
+  return {
+    ...query,
+    drawn: query.data ?? last,
+    /** What is drawn is the choice, and not the one before it. */
+    isCurrent: query.data !== undefined && settled === choice,
+  };
 }
 
 /** What is present at a pH: from the curve at once, exactly as soon as the cursor rests. */
@@ -55,7 +60,7 @@ export function useReading(drawn: DrawnCurve | undefined, pH: string): Reading |
     enabled: drawn !== undefined,
     queryFn: async ({ signal }) => {
       if (!drawn) return null;
-      const body = { system: systemOf(drawn.choice), pH: settled };
+      const body = { system: systemAsked(drawn.choice), pH: settled };
       return exactReading(await client.publicFractions(body, { signal })) ?? null;
     },
     ...patience,

@@ -15,12 +15,12 @@ import { Words } from '../ui/words';
 import { Conditions } from './conditions';
 import { CurveNotices } from './curve-notices';
 import { CurvePlot } from './curve-plot';
+import { CurveWarnings } from './curve-warnings';
 import type { Choice, Layer, View as CurvesView } from './curves-state';
 import { NumbersTable } from './numbers-table';
 import { PhControl } from './ph-control';
 import { ReadOut } from './read-out';
 import { ShareDialog } from './share-dialog';
-import { formulasOf } from './species-formulas';
 import { SystemInputs } from './system-inputs';
 import type { Curves } from './use-curves';
 import { useExports } from './use-exports';
@@ -73,15 +73,17 @@ export function CurvesPhone({ curves }: { readonly curves: Curves }) {
         </Pressable>
       }
       subtitle={
-        <Numerals size={12} tone="inkSoft" numberOfLines={1}>
-          {window.width >= roomForFormula && (
-            <>
-              <Formula formula={formulasOf(state.choice)[0] ?? ''} />
-              {' · '}
-            </>
-          )}
-          <Conditions choice={state.choice} />
-        </Numerals>
+        drawn && (
+          <Numerals size={12} tone="inkSoft" numberOfLines={1}>
+            {window.width >= roomForFormula && (
+              <>
+                <Formula formula={drawn.formulas[0] ?? ''} />
+                {' · '}
+              </>
+            )}
+            <Conditions drawn={drawn} />
+          </Numerals>
+        )
       }
       actions={
         <Button
@@ -116,6 +118,7 @@ export function CurvesPhone({ curves }: { readonly curves: Curves }) {
             figure={exports.figure}
           />
         </View>
+        <CurveWarnings {...curves} />
         {drawn && reading && (
           <ReadOut drawn={drawn} reading={reading} columns={window.width >= twoColumns} />
         )}

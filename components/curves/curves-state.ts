@@ -1,6 +1,5 @@
 import type { z } from 'zod';
-import type { systemInFull } from '../../shared/system';
-import { examples } from './examples';
+import type { systemInFull, systemInput } from '../../shared/system';
 
 /** A system as the contract takes it: decimals as text, nothing rounded. */
 export type SystemText = z.input<typeof systemInFull>;
@@ -13,10 +12,13 @@ export type Layer = (typeof layers)[number];
 export const views = ['fractions', 'charge'] as const;
 export type View = (typeof views)[number];
 
-/** An example by its id, or a system that was typed. */
-export type Choice =
-  | { readonly kind: 'example'; readonly id: string }
-  | { readonly kind: 'typed'; readonly system: SystemText };
+interface StoredChoice {
+  readonly kind: 'stored';
+  readonly id: string;
+}
+
+/** A stored system by its id, or one that was typed. */
+export type Choice = StoredChoice | { readonly kind: 'typed'; readonly system: SystemText };
 
 /** Everything that makes the Curves screen what it is; the address carries it. */
 export interface CurvesState {
@@ -27,20 +29,23 @@ export interface CurvesState {
 }
 
 /** What a first visit shows: something worth reading, at once. */
-export const firstState: CurvesState = {
-  choice: { kind: 'example', id: 'phosphoric-acid' },
+export const firstState: CurvesState & { readonly choice: StoredChoice } = {
+  choice: { kind: 'stored', id: 'phosphoric-acid' },
   pH: '7.40',
   layers,
   view: 'fractions',
 };
 
-export const exampleOf = (choice: Choice) =>
-  choice.kind === 'example' ? examples.find(({ id }) => id === choice.id) : undefined;
-
-/** The system that is drawn; an unknown example cannot be chosen, so the first stands for it. */
-export function systemOf(choice: Choice): SystemText {
-  if (choice.kind === 'typed') return choice.system;
-  const example = exampleOf(choice) ?? examples[0];
-  if (!example) throw new Error('There are no examples.');
-  return example.system;
+/** The system as a call asks for it. */
+export function systemAsked(choice: Choice): z.input<typeof systemInput> {
+  if (choice.kind === 'stored') return { id: choice.id };
+  const { name, ...system } = choice.system;
+  return name === undefined ? system : { name, ...system };
 }
+
+/** Constants that are known before the service has answered: a stored system's are not. */
+export const givenConstants = (choice: Choice): readonly string[] =>
+  choice.kind === 'typed' ? choice.system.pKa : [];
+
+/** What typing begins with where no system is drawn yet. */
+export const plainSystem: SystemText = { fullyProtonatedCharge: 0, pKa: ['7'] };

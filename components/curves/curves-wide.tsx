@@ -17,7 +17,6 @@ import { NumbersTable } from './numbers-table';
 import { curveRequest } from './request/curve-request';
 import { drawerHeights, RequestDrawer } from './request/request-drawer';
 import { SidePanel } from './side-panel';
-import { formulasOf } from './species-formulas';
 import { SystemInputs } from './system-inputs';
 import { linkTo } from './use-address';
 import { useCopy } from '../ui/use-copy';
@@ -33,7 +32,7 @@ const plotAtMost = 960;
 
 /** From 900 px: inputs left, plot right of them, read-out under it or, from 1200 px, at its right. */
 export function CurvesWide({ curves }: { readonly curves: Curves }) {
-  const { state, title, change } = curves;
+  const { state, title, drawn, change } = curves;
   const { readOutAside } = useLayout();
   const { colours } = useTheme();
   const window = useWindowDimensions();
@@ -51,9 +50,11 @@ export function CurvesWide({ curves }: { readonly curves: Curves }) {
       <Page
         title={title}
         subtitle={
-          <Words kind="section" tone="inkSoft">
-            <Formula formula={formulasOf(state.choice)[0] ?? ''} />
-          </Words>
+          drawn && (
+            <Words kind="section" tone="inkSoft">
+              <Formula formula={drawn.formulas[0] ?? ''} />
+            </Words>
+          )
         }
         actions={
           <>

@@ -1,7 +1,8 @@
 import type { StairRange } from '../chart/stair';
 import type { FractionsAnswer } from '../../shared/fractions';
-import type { Choice } from './curves-state';
-import { systemOf } from './curves-state';
+import type { Constant } from '../../shared/constant';
+import type { Choice, SystemText } from './curves-state';
+import { givenConstants } from './curves-state';
 import type { Curve } from './follow-curve';
 import { curveOf } from './follow-curve';
 import { rangeOf } from './curve-grid';
@@ -17,6 +18,10 @@ export interface DrawnCurve {
   readonly choice: Choice;
   readonly answer: FractionsAnswer;
   readonly curve: Curve;
+  /** The system as it was computed. */
+  readonly system: SystemText;
+  /** What is known of each of its constants; nothing of typed ones. */
+  readonly constants: readonly Constant[];
   readonly formulas: readonly string[];
   readonly range: PHRange;
   readonly stair: readonly StairRange[];
@@ -50,20 +55,26 @@ const seriesCount = 8;
 
 export function drawnCurve(choice: Choice, answer: FractionsAnswer): DrawnCurve {
   const curve = curveOf(answer);
+  const [used] = answer.model.constantsUsed;
+  if (!used) throw new Error('The answer names no system.');
+  const { name, fullyProtonatedCharge, pKa, constants = [] } = used;
+  const system = choice.kind === 'typed' ? choice.system : { name, fullyProtonatedCharge, pKa };
   const bound = (end: string | null) => (end === null ? null : Number(end));
   return {
     choice,
     answer,
     curve,
-    formulas: formulasOf(choice),
-    range: rangeOf(systemOf(choice).pKa),
+    system,
+    constants,
+    formulas: formulasOf(answer.species, system),
+    range: rangeOf(givenConstants(choice)),
     stair: answer.predominance.map(({ species, from, to }) => ({
       index: species,
       charge: curve.charges[species] ?? 0,
       from: bound(from),
       to: bound(to),
     })),
-    meetings: meetingsOf(answer, systemOf(choice).pKa),
+    meetings: meetingsOf(answer, system.pKa),
     shown: curve.fractions.flatMap((alpha, index) =>
       curve.fractions.length <= seriesCount || Math.max(...alpha) >= worthDrawing ? [index] : [],
     ),

@@ -24,7 +24,7 @@ interface FigureSize {
 
 /** Room above a panel for its head and, over the fractions, for names; below all for the axis. */
 const room = {
-  wide: { fractions: 42, predominance: 0, charge: 32, axis: 52, left: 36, right: 14 },
+  wide: { fractions: 42, predominance: 0, charge: 32, axis: 58, left: 36, right: 14 },
   compact: { fractions: 26, predominance: 0, charge: 24, axis: 42, left: 16, right: 16 },
 } as const;
 const compactStair = 118;

@@ -1,6 +1,6 @@
-import { systemInFull } from '../../shared/system';
+import { systemInFull, systemReference } from '../../shared/system';
 import type { Choice, CurvesState, Layer } from './curves-state';
-import { exampleOf, firstState, layers, systemOf, views } from './curves-state';
+import { firstState, givenConstants, layers, views } from './curves-state';
 import { rangeOf } from './curve-grid';
 import { pHWithin, typedPH } from './ph-steps';
 import { wellFormed } from './well-formed';
@@ -10,7 +10,7 @@ const encode = (text: string) =>
   encodeURIComponent(wellFormed(text)).replace(/%20/g, '+').replace(/%2C/g, ',');
 
 const choicePairs = (choice: Choice): [string, string | undefined][] =>
-  choice.kind === 'example'
+  choice.kind === 'stored'
     ? [['system', choice.id]]
     : [
         ['name', choice.system.name],
@@ -45,7 +45,7 @@ export function parseFragment(fragment: string): ReadFragment {
   const { values, faulty: broken } = readPairs(fragment.replace(/^#/, ''));
   const choice = readChoice(values);
   const drawn = choice === 'unusable' ? firstState.choice : choice;
-  const range = rangeOf(systemOf(drawn).pKa);
+  const range = rangeOf(givenConstants(drawn));
   const typed = typedPH(values.get('pH') ?? pHWithin(firstState.pH, range), range);
   const shown = readLayers(values.get('layers'));
   const view = views.find((name) => name === (values.get('view') ?? firstState.view));
@@ -89,8 +89,8 @@ function readChoice(values: ReadonlyMap<string, string>): Choice | 'unusable' {
   const pKa = values.get('pKa');
   const typed = charge !== undefined || pKa !== undefined || values.has('name');
   if (id !== undefined) {
-    const choice = { kind: 'example', id } as const;
-    return typed || !exampleOf(choice) ? 'unusable' : choice;
+    const isReference = systemReference.safeParse(id).success;
+    return typed || !isReference ? 'unusable' : { kind: 'stored', id };
   }
   if (!typed) return firstState.choice;
   const system = systemInFull.safeParse({

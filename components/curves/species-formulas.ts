@@ -1,5 +1,5 @@
-import type { Choice, SystemText } from './curves-state';
-import { exampleOf, systemOf } from './curves-state';
+import type { Species } from '../../shared/species';
+import type { SystemText } from './curves-state';
 
 /** `^2-`, `^+`, or nothing for a neutral form. */
 const chargeSign = (charge: number) =>
@@ -7,13 +7,15 @@ const chargeSign = (charge: number) =>
 
 const protons = (count: number) => (count === 0 ? '' : count === 1 ? 'H' : `H${count}`);
 
-/** Formulas of a typed system: HₙA down to A, each with its charge. */
+/** General formulas: HₙA down to A, each with its charge. */
 export const genericFormulas = ({ fullyProtonatedCharge, pKa }: SystemText): string[] =>
   Array.from(
     { length: pKa.length + 1 },
     (_, lost) => `${protons(pKa.length - lost)}A${chargeSign(fullyProtonatedCharge - lost)}`,
   );
 
-/** Formulas of the forms that are drawn, from fully protonated to fully deprotonated. */
-export const formulasOf = (choice: Choice): readonly string[] =>
-  exampleOf(choice)?.formulas ?? genericFormulas(systemOf(choice));
+/** Formulas of the forms; general ones where that of any form is not known. */
+export function formulasOf(species: readonly Species[], system: SystemText): readonly string[] {
+  const known = species.flatMap(({ formula }) => formula ?? []);
+  return known.length === species.length ? known : genericFormulas(system);
+}

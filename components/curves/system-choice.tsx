@@ -1,26 +1,14 @@
-import { Choice } from '../ui/choice';
-import { examples } from './examples';
+import { SystemCombobox } from '../handbook/system-combobox';
 import type { Curves } from './use-curves';
 
-const own = 'own';
-
-const options = [
-  ...examples.map(({ id, title, system }) => ({
-    value: id,
-    label: title,
-    note: system.pKa.join(', '),
-  })),
-  { value: own, label: 'Your own constants', note: 'typed or pasted' },
-];
-
-/** Which system is drawn: an example, or one that is typed. */
-export function SystemChoice({ state: { choice }, choose, typeOwn }: Curves) {
+/** Which system is drawn: one of the handbook, or one that is typed. */
+export function SystemChoice({ state: { choice }, title, curve, choose, typeOwn }: Curves) {
   return (
-    <Choice
+    <SystemCombobox
       label="System"
-      options={options}
-      value={choice.kind === 'example' ? choice.id : own}
-      onChange={(id) => (id === own ? typeOwn() : choose({ kind: 'example', id }))}
+      value={choice.kind === 'typed' ? 'Your own constants' : curve.isCurrent ? title : ''}
+      onPick={(id) => choose({ kind: 'stored', id })}
+      onTypeOwn={typeOwn}
     />
   );
 }

@@ -8,7 +8,15 @@ const rest = 200;
 /** The last screen of this visit, for a return to Curves by a link that carries no state. */
 let lastFragment = '';
 
-const read = () => parseFragment(window.location.hash || lastFragment);
+/** The router moves after its screen is there: until then the address is that of another place. */
+const ownHash = () => (window.location.pathname === '/' ? window.location.hash : '');
+
+const read = () => parseFragment(ownHash() || lastFragment);
+
+/** What Curves shows when it is opened next by a link within the app. */
+export const openNext = (fragment: string): void => {
+  lastFragment = fragment;
+};
 
 /**
  * The state of the screen, kept in the address's fragment: reload, back and a shared link give the
@@ -20,7 +28,7 @@ export function useAddress() {
 
   useEffect(() => {
     // An address that was opened stays as it is until something is changed.
-    const untouched = state === first && (window.location.hash !== '' || lastFragment === '');
+    const untouched = state === first && (ownHash() !== '' || lastFragment === '');
     if (untouched) return;
     const fragment = formatFragment(state);
     lastFragment = fragment;

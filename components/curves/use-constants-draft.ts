@@ -2,7 +2,7 @@ import { useState } from 'react';
 import type { ConstantsDraft, DraftFaults } from './constants-draft';
 import { checkDraft, draftOf } from './constants-draft';
 import type { Choice } from './curves-state';
-import { systemOf } from './curves-state';
+import { plainSystem } from './curves-state';
 
 export interface DraftEditing {
   readonly draft: ConstantsDraft;
@@ -20,7 +20,8 @@ export function useConstantsDraft(
   choice: Choice,
   onChoice: (choice: Choice) => void,
 ): DraftEditing {
-  const fresh = () => ({ of: choice, draft: draftOf(systemOf(choice)), faults: noFaults });
+  const typed = choice.kind === 'typed' ? choice.system : plainSystem;
+  const fresh = () => ({ of: choice, draft: draftOf(typed), faults: noFaults });
   const [held, setHeld] = useState(fresh);
   const current = held.of === choice ? held : fresh();
   if (current !== held) setHeld(current);

@@ -1,7 +1,11 @@
+import { useState } from 'react';
+import { ProblemError } from '../../shared/client';
+import { systemTitle } from '../handbook/system-title';
+import { rangeOf } from './curve-grid';
 import { useCurve, useReading } from './curve-queries';
 import type { Choice } from './curves-state';
-import { exampleOf, systemOf } from './curves-state';
-import { rangeOf } from './curve-grid';
+import { firstState, givenConstants, plainSystem } from './curves-state';
+import type { DrawnCurve } from './drawn-curve';
 import { pHWithin } from './ph-steps';
 import { useAddress } from './use-address';
 import { useConstantsDraft } from './use-constants-draft';
@@ -10,18 +14,29 @@ import { useConstantsDraft } from './use-constants-draft';
 export function useCurves() {
   const { state, faulty, change } = useAddress();
   const { choice } = state;
-  const choose = (next: Choice) =>
-    change({ choice: next, pH: pHWithin(state.pH, rangeOf(systemOf(next).pKa)) });
+  const [unknown, setUnknown] = useState<string>();
+  const draw = (next: Choice) =>
+    change({ choice: next, pH: pHWithin(state.pH, rangeOf(givenConstants(next))) });
+  const choose = (next: Choice) => {
+    setUnknown(undefined);
+    draw(next);
+  };
   const editing = useConstantsDraft(choice, choose);
   const curve = useCurve(choice);
   const { drawn } = curve;
+  if (choice.kind === 'stored' && isUnknown(curve.error) && choice.id !== firstState.choice.id) {
+    setUnknown(choice.id);
+    draw(firstState.choice);
+  }
   // An old curve that is still shown may not reach as far as the cursor of the new one.
   const pH = drawn ? pHWithin(state.pH, drawn.range) : state.pH;
   const reading = useReading(drawn, pH);
   return {
     state,
     faulty,
-    title: exampleOf(choice)?.title ?? systemOf(choice).name ?? 'Your constants',
+    /** Id that the address asked for and that no system has. */
+    unknown,
+    title: titleOf(choice, drawn),
     drawn,
     reading,
     curve,
@@ -30,8 +45,20 @@ export function useCurves() {
     change,
     move: (next: string) => change({ pH: next }),
     /** Begins a system of one's own from the one that is drawn. */
-    typeOwn: () => choose({ kind: 'typed', system: systemOf(choice) }),
+    typeOwn: () => {
+      if (choice.kind === 'stored') choose({ kind: 'typed', system: drawn?.system ?? plainSystem });
+    },
   };
+}
+
+const isUnknown = (error: Error | null) =>
+  error instanceof ProblemError &&
+  error.problem.errors?.some(({ code }) => code === 'unknown-system');
+
+/** A stored system's name comes with its curve; until then the one that is drawn stands there. */
+function titleOf(choice: Choice, drawn: DrawnCurve | undefined): string {
+  if (choice.kind === 'typed') return choice.system.name ?? 'Your constants';
+  return drawn ? systemTitle(drawn.system.name ?? 'Your constants') : 'Curves';
 }
 
 export type Curves = ReturnType<typeof useCurves>;

@@ -7,9 +7,9 @@ import { standaloneSvg } from '../chart/export/standalone-svg';
 import { elementOf } from '../ui/element';
 import { fonts, useTheme } from '../ui/theme';
 import { useToast } from '../ui/toast';
-import { conditionsText } from './conditions';
+import { basesOf, provenanceWords } from '../handbook/bases';
+import { conditionsText } from './conditions-of';
 import { curveCsv } from './curve-csv';
-import { exampleOf } from './curves-state';
 import type { Curves } from './use-curves';
 
 interface ExportOptions {
@@ -29,12 +29,12 @@ export function useExports(
   const svg = async () => {
     const element = elementOf(figure.current)?.querySelector('svg');
     if (!element || !drawn) return undefined;
-    const source = exampleOf(drawn.choice)?.source;
+    const sources = basesOf(drawn.constants).map(
+      (basis) => `${basis.source}. ${provenanceWords(basis)}.`,
+    );
     return standaloneSvg(element, {
       title,
-      notes: [captioned ? undefined : conditionsText(drawn.choice), source].filter(
-        (note) => note !== undefined,
-      ),
+      notes: [...(captioned ? [] : [conditionsText(drawn)]), ...sources],
       ink: colours.ink,
       inkSoft: colours.inkSoft,
       page: colours.page,

@@ -1,40 +1,63 @@
 import type { Constant } from '../../shared/constant';
 
-/** What one or more constants of a determination have in common besides their values. */
+/** Constants from one source that came here in one way. */
 export interface Basis {
   /** Which constants, from 1. */
   readonly steps: readonly number[];
-  /** One of them, for all. */
-  readonly of: Constant;
+  readonly source: string;
+  readonly provenance: Constant['provenance'];
+  readonly provenanceNote: string | null;
+  readonly media: readonly MediumOf[];
 }
 
-const shared = [
-  'kind',
-  'temperature',
-  'ionicStrength',
-  'source',
-  'provenance',
-  'provenanceNote',
-] as const satisfies readonly (keyof Constant)[];
+/** Constants of one kind, temperature and medium. */
+export interface MediumOf {
+  readonly steps: readonly number[];
+  readonly kind: Constant['kind'];
+  /** °C. */
+  readonly temperature: string;
+  /** mol/L; null where it is not stated. */
+  readonly ionicStrength: string | null;
+}
 
-const standAlike = (one: Constant, other: Constant) =>
-  shared.every((key) => one[key] === other[key]) &&
-  (one.uncertainty === null) === (other.uncertainty === null);
-
-/** Constants gathered by kind, temperature, medium, source and provenance, in their order. */
-export function basesOf(constants: readonly Constant[]): Basis[] {
-  const bases: { steps: number[]; of: Constant }[] = [];
+/** Groups of constants that agree in every one of the keys, in the order of their first ones. */
+function gathered<Key extends keyof Constant>(
+  constants: readonly Constant[],
+  keys: readonly Key[],
+): (Pick<Constant, Key> & { constants: Constant[]; steps: number[] })[] {
+  const groups: { constants: Constant[]; first: Constant }[] = [];
   for (const constant of constants) {
-    const same = bases.find(({ of }) => standAlike(of, constant));
-    if (same) same.steps.push(constant.step);
-    else bases.push({ steps: [constant.step], of: constant });
+    const same = groups.find(({ first }) => keys.every((key) => first[key] === constant[key]));
+    if (same) same.constants.push(constant);
+    else groups.push({ constants: [constant], first: constant });
   }
-  return bases;
+  return groups.map(({ constants: these, first }) => ({
+    ...first,
+    constants: these,
+    steps: these.map(({ step }) => step),
+  }));
 }
 
-/** Numbers of constants as they are read: `1`, `1 and 2`, `1, 2 and 4`. */
-export const stepsInWords = (steps: readonly number[]) =>
-  [steps.slice(0, -1).join(', '), String(steps.at(-1))].filter(Boolean).join(' and ');
+/** What constants stand on: by source and provenance, and within these by kind and medium. */
+export const basesOf = (constants: readonly Constant[]): Basis[] =>
+  gathered(constants, ['source', 'provenance', 'provenanceNote']).map((group) => ({
+    ...group,
+    media: gathered(group.constants, ['kind', 'temperature', 'ionicStrength']),
+  }));
+
+/** Numbers of constants as they are read, runs joined: `1`, `1 and 2`, `1 to 4`, `1, 3 and 5 to 7`. */
+export function stepsInWords(steps: readonly number[]): string {
+  const runs: number[][] = [];
+  for (const step of steps) {
+    const run = runs.at(-1);
+    if (run && step === (run.at(-1) ?? 0) + 1) run.push(step);
+    else runs.push([step]);
+  }
+  const parts = runs.flatMap((run) =>
+    run.length > 2 ? [`${run[0]} to ${run.at(-1)}`] : run.map(String),
+  );
+  return [parts.slice(0, -1).join(', '), parts.at(-1)].filter(Boolean).join(' and ');
+}
 
 export const kindWords: Readonly<Record<Constant['kind'], string>> = {
   thermodynamic: 'Thermodynamic',
@@ -42,7 +65,7 @@ export const kindWords: Readonly<Record<Constant['kind'], string>> = {
   concentration: 'Concentration',
 };
 
-/** What the kind of a constant means, in a sentence. */
+/** What the kind of a constant means. */
 export const kindMeaning: Readonly<Record<Constant['kind'], string>> = {
   thermodynamic: 'all activities, at ionic strength 0',
   mixed: 'activity of hydrogen ion, concentrations of the rest',
@@ -53,7 +76,7 @@ export const kindMeaning: Readonly<Record<Constant['kind'], string>> = {
 export function provenanceWords({
   provenance,
   provenanceNote,
-}: Pick<Constant, 'provenance' | 'provenanceNote'>): string {
+}: Pick<Basis, 'provenance' | 'provenanceNote'>): string {
   switch (provenance) {
     case 'read':
       return `Read in ${provenanceNote ?? 'a copy of the source'}`;

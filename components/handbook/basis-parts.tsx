@@ -1,35 +1,48 @@
 import { StyleSheet, View } from 'react-native';
-import type { Constant } from '../../shared/constant';
 import { Icon } from '../ui/icon';
 import { Numerals } from '../ui/numerals';
 import { Quantity } from '../ui/quantity';
 import { space } from '../ui/theme';
 import { Words } from '../ui/words';
+import type { Basis, MediumOf } from './bases';
 import { provenanceWords, recalledMeans } from './bases';
 
-/** Medium that a constant holds in, within a text around it. */
-export function Medium({ ionicStrength }: Pick<Constant, 'ionicStrength'>) {
-  if (ionicStrength === null) return 'ionic strength not stated';
+/** Temperature and ionic strength that constants hold at, within a text around them. */
+export function HoldsAt({
+  temperature,
+  ionicStrength,
+}: Pick<MediumOf, 'temperature' | 'ionicStrength'>) {
   return (
     <>
-      <Quantity of="ionicStrength" />
-      {' = '}
-      <Numerals>{ionicStrength}</Numerals>
-      {ionicStrength === '0' ? '' : ' mol/L'}
+      <Numerals>{temperature}</Numerals>&nbsp;°C,{' '}
+      {ionicStrength === null ? (
+        'ionic strength not stated'
+      ) : (
+        <>
+          <Quantity of="ionicStrength" />
+          {' = '}
+          <Numerals>{ionicStrength}</Numerals>
+          {ionicStrength === '0' ? '' : '\u00a0mol/L'}
+        </>
+      )}
     </>
   );
 }
 
-type Origin = Pick<Constant, 'provenance' | 'provenanceNote'>;
+interface ProvenanceProps extends Pick<Basis, 'provenance' | 'provenanceNote'> {
+  readonly inShort?: boolean;
+}
 
 /** How a value came here; one that was recalled says what that asks of the reader. */
-export function Provenance(origin: Origin) {
+export function Provenance({ inShort = false, ...origin }: ProvenanceProps) {
   const recalled = origin.provenance === 'recalled';
   return (
     <View style={styles.line}>
       {recalled && <Icon name="warning" size={16} tone="warn" />}
       <View style={styles.words}>
-        <Words tone={recalled ? 'warn' : undefined}>{provenanceWords(origin)}</Words>
+        <Words kind={inShort ? 'help' : 'body'} tone={recalled ? 'warn' : undefined}>
+          {provenanceWords(origin)}
+        </Words>
         {recalled && <Words kind="help">{recalledMeans}</Words>}
       </View>
     </View>

@@ -1,4 +1,10 @@
-import { keepPreviousData, useInfiniteQuery, useQuery } from '@tanstack/react-query';
+import {
+  infiniteQueryOptions,
+  keepPreviousData,
+  useInfiniteQuery,
+  useQuery,
+  useQueryClient,
+} from '@tanstack/react-query';
 import { createClient, type ProblemError } from '../../shared/client';
 import type { StoredSystem } from '../../shared/stored-system';
 import { useSettled } from '../ui/use-settled';
@@ -10,33 +16,46 @@ const typingRest = 200;
 /** The longest query that the contract takes. */
 const longest = 100;
 
-/** The text as a query; undefined for all systems. */
+/** The text as a query; empty for all systems. */
 const queryOf = (text: string) => text.replaceAll('\u0000', '').trim().slice(0, longest).trim();
+
+const searchOptions = (query: string, limit: number) =>
+  infiniteQueryOptions({
+    queryKey: ['systems', query, limit],
+    queryFn: ({ pageParam, signal }) =>
+      client.publicSystems.find(
+        { query: query === '' ? undefined : query, limit, cursor: pageParam },
+        { signal },
+      ),
+    initialPageParam: undefined as string | undefined,
+    getNextPageParam: ({ next }) => next,
+    staleTime: Infinity,
+  });
 
 /**
  * Systems found by name, alias, formula or CAS number, best matches first; all by name without a
  * text. The last ones stay until the new ones are there: `isCurrent` says which these are.
  */
-export function useSystemSearch(text: string, limit: number) {
+export function useSystemSearch(text: string, limit: number, enabled = true) {
+  const queryClient = useQueryClient();
   const wanted = queryOf(text);
   const settled = useSettled(wanted, typingRest);
   const search = useInfiniteQuery({
-    queryKey: ['systems', settled, limit],
-    queryFn: ({ pageParam, signal }) =>
-      client.publicSystems.find(
-        { query: settled === '' ? undefined : settled, limit, cursor: pageParam },
-        { signal },
-      ),
-    initialPageParam: undefined as string | undefined,
-    getNextPageParam: ({ next }) => next,
+    ...searchOptions(settled, limit),
     placeholderData: keepPreviousData,
-    staleTime: Infinity,
+    enabled,
   });
   return {
     ...search,
     systems: search.data?.pages.flatMap(({ items }) => items),
+    /** What was searched for. */
     query: settled,
     isCurrent: wanted === settled && search.isSuccess && !search.isPlaceholderData,
+    /** The best match, for somebody who does not wait for the list; undefined where there is none. */
+    first: async () => {
+      const { pages } = await queryClient.fetchInfiniteQuery(searchOptions(wanted, limit));
+      return pages[0]?.items[0];
+    },
   };
 }
 

@@ -40,8 +40,11 @@ export function Determination({ of, species }: DeterminationProps) {
         constants={constants}
         species={species}
       />
+      {constants.every(({ uncertainty }) => uncertainty === null) && (
+        <Words kind="help">No uncertainty is stated.</Words>
+      )}
       {bases.map((basis) => (
-        <BasisFacts key={basis.steps[0]} basis={basis} alone={bases.length === 1} />
+        <BasisFacts key={basis.steps[0]} basis={basis} count={constants.length} />
       ))}
     </View>
   );

@@ -1,5 +1,6 @@
-import { Link } from 'expo-router';
 import { StyleSheet } from 'react-native';
+import { CurvesLink } from '../curves/curves-link';
+import { plainSystem } from '../curves/curves-state';
 import { Empty } from '../ui/empty';
 import { Words } from '../ui/words';
 
@@ -9,11 +10,11 @@ export function NoMatch({ query }: { readonly query: string }) {
     <Empty
       title={`Nothing is called “${query}”`}
       action={
-        <Link href="/" style={styles.link}>
+        <CurvesLink choice={{ kind: 'typed', system: plainSystem }} style={styles.link}>
           <Words kind="button" tone="well">
             Type your own constants in Curves
           </Words>
-        </Link>
+        </CurvesLink>
       }
     >
       Names, aliases, formulas and CAS numbers are searched. Try a part of the name, or the formula

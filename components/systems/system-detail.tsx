@@ -6,6 +6,7 @@ import { space } from '../ui/theme';
 import { Words } from '../ui/words';
 import { CallById } from './call-by-id';
 import { Determination } from './determination';
+import { SystemFigure } from './system-figure';
 
 /** All that is known of a system. */
 export function SystemDetail({ system }: { readonly system: StoredSystem }) {
@@ -25,6 +26,7 @@ export function SystemDetail({ system }: { readonly system: StoredSystem }) {
           ]}
         />
       </View>
+      <SystemFigure id={id} />
       {determinations.map((determination) => (
         <Determination
           key={`${determination.listedAs} ${determination.constants[0]?.source}`}

@@ -1,3 +1,4 @@
+import '../curves/no-eval';
 import { Slot, usePathname } from 'expo-router';
 import { StyleSheet, View } from 'react-native';
 import { space, useTheme } from '../ui/theme';

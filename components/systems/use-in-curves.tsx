@@ -1,24 +1,21 @@
-import { Link } from 'expo-router';
-import { StyleSheet, View } from 'react-native';
-
+import { StyleSheet } from 'react-native';
+import { CurvesLink } from '../curves/curves-link';
 import { radius, space, useTheme } from '../ui/theme';
 import { softColour } from '../ui/web-style';
 import { Words } from '../ui/words';
 
-/** The way to this system's curve: a link, so that it opens in another tab too. */
+/** The way to this system's curve. */
 export function UseInCurves({ id }: { readonly id: string }) {
   const { colours } = useTheme();
-  const fragment = `system=${id}`;
   return (
-    <Link href={`/#${fragment}`} asChild>
-      <View
-        style={StyleSheet.flatten([styles.link, softColour, { backgroundColor: colours.well }])}
-      >
-        <Words kind="button" tone="onWell" numberOfLines={1}>
-          Use in Curves
-        </Words>
-      </View>
-    </Link>
+    <CurvesLink
+      choice={{ kind: 'stored', id }}
+      style={[styles.link, softColour, { backgroundColor: colours.well }]}
+    >
+      <Words kind="button" tone="onWell" numberOfLines={1}>
+        Use in Curves
+      </Words>
+    </CurvesLink>
   );
 }
 

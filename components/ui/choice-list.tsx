@@ -1,5 +1,5 @@
-import { useLayoutEffect, useRef, useState, type RefObject } from 'react';
-import { StyleSheet, View, type Role } from 'react-native';
+import { useLayoutEffect, useRef, useState, type ReactNode, type RefObject } from 'react';
+import { StyleSheet, View, type Role, type TextInput } from 'react-native';
 import { elementOf } from './element';
 import { Icon } from './icon';
 import { placeBeside, type Placement } from './place-beside';
@@ -10,19 +10,22 @@ import { Words } from './words';
 export interface Option<Value extends string> {
   readonly value: Value;
   readonly label: string;
-  readonly note?: string;
+  readonly note?: ReactNode;
 }
 
 interface ChoiceListProps<Value extends string> {
   readonly id: string;
   readonly label: string;
-  readonly anchor: RefObject<View | null>;
+  readonly anchor: RefObject<View | TextInput | null>;
   readonly options: readonly Option<Value>[];
   readonly at: number;
   readonly chosen: number;
   readonly optionId: (index: number) => string;
   readonly onTake: (index: number) => void;
-  readonly onClose: () => void;
+  /** Stands over the options: why there are none, what is waited for. */
+  readonly status?: string | undefined;
+  /** px; the list may be wider than what it belongs to. */
+  readonly leastWidth?: number;
 }
 
 /**
@@ -38,7 +41,8 @@ export function ChoiceList<Value extends string>({
   chosen,
   optionId,
   onTake,
-  onClose,
+  status,
+  leastWidth = 0,
 }: ChoiceListProps<Value>) {
   const { colours } = useTheme();
   const list = useRef<View>(null);
@@ -48,33 +52,29 @@ export function ChoiceList<Value extends string>({
     const box = elementOf(anchor.current);
     const element = elementOf(list.current);
     if (!box || !element) return;
-    setPlacement(placeBeside(box.getBoundingClientRect(), window));
+    const place = () => setPlacement(placeBeside(box.getBoundingClientRect(), seen(), leastWidth));
+    place();
     element.popover = 'manual';
     element.showPopover();
-  }, [anchor]);
+    // A phone's keyboard covers the window without resizing it.
+    const { visualViewport } = window;
+    visualViewport?.addEventListener('resize', place);
+    window.addEventListener('resize', place);
+    window.addEventListener('scroll', place, true);
+    return () => {
+      visualViewport?.removeEventListener('resize', place);
+      window.removeEventListener('resize', place);
+      window.removeEventListener('scroll', place, true);
+    };
+  }, [anchor, leastWidth]);
 
   useLayoutEffect(() => {
     document.getElementById(optionId(at))?.scrollIntoView({ block: 'nearest' });
   });
 
-  useLayoutEffect(() => {
-    const scrolled = (event: Event) => {
-      if (event.target !== elementOf(list.current)) onClose();
-    };
-    window.addEventListener('resize', onClose);
-    window.addEventListener('scroll', scrolled, true);
-    return () => {
-      window.removeEventListener('resize', onClose);
-      window.removeEventListener('scroll', scrolled, true);
-    };
-  }, [onClose]);
-
   return (
     <View
       ref={list}
-      id={id}
-      role={listbox}
-      aria-label={label}
       // The focus stays on the choice itself: a press here must not take it.
       onMouseDown={(event) => event.preventDefault()}
       style={[
@@ -84,25 +84,39 @@ export function ChoiceList<Value extends string>({
         webStyle({ boxShadow: `0 8px 24px ${colours.shadow}` }),
       ]}
     >
-      {options.map((option, index) => (
-        <View
-          key={option.value}
-          id={optionId(index)}
-          role="option"
-          aria-selected={index === chosen}
-          onClick={() => onTake(index)}
-          style={[styles.option, index === at && { backgroundColor: colours.wash }]}
-        >
-          <View style={styles.words}>
-            <Words>{option.label}</Words>
-            {option.note !== undefined && <Words kind="help">{option.note}</Words>}
-          </View>
-          {index === chosen && <Icon name="check" size={16} tone="well" />}
+      {status !== undefined && (
+        <View style={styles.status}>
+          <Words kind="help">{status}</Words>
         </View>
-      ))}
+      )}
+      <View id={id} role={listbox} aria-label={label}>
+        {options.map((option, index) => (
+          <View
+            key={option.value}
+            id={optionId(index)}
+            role="option"
+            aria-selected={index === chosen}
+            onClick={() => onTake(index)}
+            style={[styles.option, index === at && { backgroundColor: colours.wash }]}
+          >
+            <View style={styles.words}>
+              <Words>{option.label}</Words>
+              {option.note !== undefined && <Words kind="help">{option.note}</Words>}
+            </View>
+            {index === chosen && <Icon name="check" size={16} tone="well" />}
+          </View>
+        ))}
+      </View>
     </View>
   );
 }
+
+/** The part of the window that is in sight. */
+const seen = () => {
+  const { visualViewport, innerHeight, innerWidth } = window;
+  const bottom = visualViewport ? visualViewport.offsetTop + visualViewport.height : innerHeight;
+  return { innerHeight: bottom, innerWidth };
+};
 
 /** React Native's types know no list box; the web does. */
 const listbox = 'listbox' as string as Role;
@@ -124,5 +138,6 @@ const styles = StyleSheet.create({
     cursor: 'pointer',
     userSelect: 'none',
   },
-  words: { flex: 1 },
+  words: { flex: 1, minWidth: 0 },
+  status: { paddingVertical: space[2], paddingHorizontal: space[3] },
 });

@@ -110,7 +110,6 @@ export function Choice<Value extends string>({
           chosen={chosen}
           optionId={optionId}
           onTake={take}
-          onClose={() => setState({ ...state, open: false })}
         />
       )}
       {(help !== undefined || !hideLabel) && <FieldMessage id={`${id}-message`} help={help} />}

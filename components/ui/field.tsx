@@ -16,7 +16,16 @@ import { Words } from './words';
 export interface FieldKey {
   readonly key: string;
   readonly shiftKey: boolean;
+  readonly altKey: boolean;
   readonly preventDefault: () => void;
+}
+
+/** The list that typing opens: the field is then a combobox after the WAI-ARIA practices. */
+interface FieldListbox {
+  readonly id: string;
+  readonly open: boolean;
+  /** Id of the option that the keys are at. */
+  readonly at: string | undefined;
 }
 
 interface FieldProps {
@@ -43,6 +52,9 @@ interface FieldProps {
   readonly inputMode?: InputModeOptions;
   /** The label is then only said, and no room is kept for a message. */
   readonly hideLabel?: boolean;
+  readonly listbox?: FieldListbox;
+  /** What is there is taken as a whole: typing replaces it. */
+  readonly selectOnFocus?: boolean;
   readonly autoComplete?: TextInputProps['autoComplete'];
   readonly width?: DimensionValue;
   readonly ref?: Ref<TextInput>;
@@ -66,6 +78,8 @@ export function Field({
   size = 'regular',
   inputMode,
   hideLabel = false,
+  listbox,
+  selectOnFocus = false,
   autoComplete = 'off',
   width,
   ref,
@@ -103,6 +117,8 @@ export function Field({
           aria-labelledby={hideLabel ? undefined : ids.label}
           aria-describedby={described || undefined}
           aria-invalid={invalid || undefined}
+          {...(listbox && comboboxProps(listbox))}
+          selectTextOnFocus={selectOnFocus}
           secureTextEntry={secret}
           inputMode={inputMode}
           autoComplete={autoComplete}
@@ -142,6 +158,16 @@ export function Field({
     </View>
   );
 }
+
+const comboboxProps = ({ id, open, at }: FieldListbox) =>
+  ({
+    role: 'combobox',
+    'aria-autocomplete': 'list',
+    'aria-haspopup': 'listbox',
+    'aria-expanded': open,
+    'aria-controls': open ? id : undefined,
+    'aria-activedescendant': open ? at : undefined,
+  }) as const;
 
 /** Padding beside a text inside the field; a 2 px border takes its extra px from the padding. */
 const room = (inside: string | undefined, invalid: boolean) =>

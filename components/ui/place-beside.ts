@@ -11,7 +11,10 @@ const gap = 4;
 const margin = 8;
 const comfortable = 240;
 
-/** Under the anchor, or over it where there is more room; never out of the window. */
+/**
+ * Under the anchor, or over it where there is more room; as wide as it, or as `leastWidth`; never
+ * out of the window.
+ */
 export function placeBeside(
   anchor: {
     readonly left: number;
@@ -19,11 +22,13 @@ export function placeBeside(
     readonly bottom: number;
     readonly width: number;
   },
-  { innerHeight }: { readonly innerHeight: number },
+  { innerHeight, innerWidth }: { readonly innerHeight: number; readonly innerWidth: number },
+  leastWidth = 0,
 ): Placement {
   const below = innerHeight - anchor.bottom - gap - margin;
   const above = anchor.top - gap - margin;
-  const { left, width } = anchor;
+  const width = Math.min(Math.max(anchor.width, leastWidth), innerWidth - 2 * margin);
+  const left = Math.min(anchor.left, innerWidth - margin - width);
   return below >= Math.min(comfortable, above)
     ? { left, width, maxHeight: below, top: anchor.bottom + gap, bottom: 'auto' }
     : { left, width, maxHeight: above, top: 'auto', bottom: innerHeight - anchor.top + gap };

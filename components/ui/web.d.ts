@@ -8,6 +8,7 @@ import type { KeyboardEvent, MouseEvent, Ref } from 'react';
 declare module 'react-native' {
   interface AccessibilityProps {
     'aria-activedescendant'?: string | undefined;
+    'aria-autocomplete'?: 'list' | undefined;
     'aria-controls'?: string | undefined;
     'aria-current'?: 'page' | undefined;
     'aria-describedby'?: string | undefined;
