@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { ProblemError } from '../../shared/client';
 import type { KeyAnswer } from '../../shared/keys';
 import { Empty } from '../ui/empty';
 import { Failure } from '../ui/failure';
@@ -20,6 +21,8 @@ export function KeysContent({ keys, onRevoke, issue }: KeysContentProps) {
   const { data, error, isFetching, isFetchingNextPage, hasNextPage } = keys;
   const online = useOnline();
   const all = data?.pages.flatMap(({ items }) => items);
+  // That the session is over, the shell has said already.
+  const isTold = all && error instanceof ProblemError && error.problem.status === 401;
   const retry = isFetchingNextPage || (data && hasNextPage) ? keys.fetchNextPage : keys.refetch;
   return (
     <>
@@ -28,7 +31,9 @@ export function KeysContent({ keys, onRevoke, issue }: KeysContentProps) {
           What is on screen stays. It is brought up to date when the connection is back.
         </Notice>
       )}
-      {online && error && !isFetching && <Failure error={error} onRetry={() => void retry()} />}
+      {online && error && !isFetching && !isTold && (
+        <Failure error={error} onRetry={() => void retry()} />
+      )}
       {!all && online && !error && <Skeleton label="Fetching the keys" lines={6} />}
       {all?.length === 0 && (
         <Empty title="No keys yet" action={issue}>

@@ -1,21 +1,16 @@
 import { View } from 'react-native';
-import * as Clipboard from 'expo-clipboard';
 import { firstCall } from '../keys/first-call';
 import { Section } from '../shell/prose';
 import { Button } from '../ui/button';
 import { CodeBlock } from '../ui/code-block';
 import { Numerals } from '../ui/numerals';
-import { useToast } from '../ui/toast';
+import { useCopy } from '../ui/use-copy';
 import { Words } from '../ui/words';
 
 /** A call that works as it is copied, against the service that shows it. */
 export function FirstCall() {
-  const say = useToast();
+  const copy = useCopy();
   const code = firstCall(window.location.origin, '$STEPWELL_KEY');
-  const copy = async () => {
-    await Clipboard.setStringAsync(code);
-    say({ text: 'Call copied' });
-  };
   return (
     <Section heading="A first call">
       <Words>
@@ -24,7 +19,7 @@ export function FirstCall() {
       </Words>
       <CodeBlock label="A first call with curl" code={code} />
       <View style={{ flexDirection: 'row' }}>
-        <Button icon="copy" label="Copy the call" onPress={() => void copy()} />
+        <Button icon="copy" label="Copy the call" onPress={() => copy('Call', code)} />
       </View>
       <Words>
         The answer holds each form’s fraction, the ratios of neighbours, the mean charge, the ranges
