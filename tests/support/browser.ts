@@ -27,19 +27,21 @@ const flags = [
   '--no-first-run',
 ];
 
-/** Debian's Chromium with one page of the given size. Chromium's sandbox refuses to run as root. */
+/** Debian's Chromium with one tab of the given size. Chromium's sandbox refuses to run as root. */
 export async function openBrowser(view: View): Promise<OpenBrowser> {
   const browser = await chromium.launch({
     executablePath: given('CHROMIUM'),
     chromiumSandbox: process.getuid?.() !== 0,
     args: flags,
   });
-  const page = await browser.newPage({
+  // A context of its own, so that a test can open a second tab in it.
+  const context = await browser.newContext({
     viewport: { width: view.width, height: view.height },
     colorScheme: view.dark ? 'dark' : 'light',
     hasTouch: view.touch ?? false,
     isMobile: view.touch ?? false,
   });
+  const page = await context.newPage();
   const complaints: string[] = [];
   page.on('pageerror', (error) => complaints.push(error.message));
   page.on('console', (message) => {
