@@ -9,7 +9,7 @@ export interface Conditions {
   readonly model: 'ideal' | 'as given';
 }
 
-const distinct = (values: readonly string[]) => [...new Set(values)].join(' and ');
+const distinct = (values: readonly string[]) => [...new Set(values)].join(', ');
 
 /**
  * The model is ideal, at 25 °C. Constants that were measured in a medium or at another temperature

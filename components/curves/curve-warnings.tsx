@@ -1,5 +1,6 @@
 import type { Warning } from '../../shared/model';
 import { Notice } from '../ui/notice';
+import { Words } from '../ui/words';
 import { trueMinus } from './rounded';
 import type { Curves } from './use-curves';
 
@@ -15,7 +16,9 @@ export function CurveWarnings({ drawn, curve }: Pick<Curves, 'drawn' | 'curve'>)
   const warnings = curve.isCurrent && drawn ? drawn.answer.model.warnings : [];
   return warnings.map(({ code, message, pointer }) => (
     <Notice key={`${code} ${pointer} ${message}`} tone="warn" title={titles[code]}>
-      {trueMinus(message)}
+      <Words kind="help" tone="ink">
+        {trueMinus(message)}
+      </Words>
     </Notice>
   ));
 }

@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import { Pressable, StyleSheet, useWindowDimensions, View } from 'react-native';
 import { clamp } from '../chart/geometry';
+import { formulaWidth, numeralsWidth } from '../chart/text-width';
 import { barHeight } from '../shell/bar';
 import { Page } from '../shell/page';
 import { Button } from '../ui/button';
@@ -13,10 +14,12 @@ import { Tabs } from '../ui/tabs';
 import { webStyle } from '../ui/web-style';
 import { Words } from '../ui/words';
 import { Conditions } from './conditions';
+import { conditionsText } from './conditions-of';
 import { CurveNotices } from './curve-notices';
 import { CurvePlot } from './curve-plot';
 import { CurveWarnings } from './curve-warnings';
 import type { Choice, Layer, View as CurvesView } from './curves-state';
+import type { DrawnCurve } from './drawn-curve';
 import { NumbersTable } from './numbers-table';
 import { PhControl } from './ph-control';
 import { ReadOut } from './read-out';
@@ -31,8 +34,8 @@ const dockHeight = 52 + 2 * space[2] + 1;
 const twoColumns = 700;
 /** What of the read-out should be in sight under the plot, px. */
 const underPlot = 170;
-/** Narrower, the conditions alone fill the line under the title. */
-const roomForFormula = 380;
+/** Gutters, mark and button beside the line under the title, px. */
+const besideSubtitle = 128;
 
 const shown: Readonly<Record<CurvesView, readonly Layer[]>> = {
   fractions: ['fractions', 'predominance'],
@@ -75,7 +78,7 @@ export function CurvesPhone({ curves }: { readonly curves: Curves }) {
       subtitle={
         drawn && (
           <Numerals size={12} tone="inkSoft" numberOfLines={1}>
-            {window.width >= roomForFormula && (
+            {fitsFormula(drawn, window.width) && (
               <>
                 <Formula formula={drawn.formulas[0] ?? ''} />
                 {' · '}
@@ -140,6 +143,11 @@ export function CurvesPhone({ curves }: { readonly curves: Curves }) {
     </Page>
   );
 }
+
+/** Where the line is too short for both, the conditions stay. */
+const fitsFormula = (drawn: DrawnCurve, width: number) =>
+  formulaWidth(drawn.formulas[0] ?? '', 12) + numeralsWidth(` · ${conditionsText(drawn)}`, 12) <=
+  width - besideSubtitle;
 
 const styles = StyleSheet.create({
   title: { flexDirection: 'row', alignItems: 'center', gap: space[1], minHeight: 28 },

@@ -16,16 +16,14 @@ export function SystemInputs(curves: Curves) {
       <SystemChoice {...curves} />
       <CurveWarnings {...curves} />
       {choice.kind === 'typed' ? (
-        <>
-          <ConstantsEditor {...editing} />
-          <Words kind="help">Constants are taken as given, at 25 °C, in an ideal solution.</Words>
-        </>
+        <ConstantsEditor {...editing} />
       ) : (
         drawn &&
         curve.isCurrent && (
           <ConstantsList id={choice.id} constants={drawn.constants} onTypeOwn={typeOwn} />
         )
       )}
+      <Words kind="help">Constants are taken as given: nothing is corrected for the medium.</Words>
     </View>
   );
 }

@@ -9,6 +9,7 @@ import { Skeleton } from '../ui/skeleton';
 import { space } from '../ui/theme';
 import { useLayout } from '../ui/use-layout';
 import { useOnline } from '../ui/use-online';
+import { webStyle } from '../ui/web-style';
 import { Words } from '../ui/words';
 import { countInWords } from './count-in-words';
 import { NoMatch } from './no-match';
@@ -55,7 +56,7 @@ export function SystemsList({ text, onText, chosen }: SystemsListProps) {
       {systems && (
         <View style={styles.foot}>
           {hasNextPage && <More search={search} shown={systems.map(({ id }) => id)} />}
-          <View role="status">
+          <View role="status" style={systems.length === 0 && styles.said}>
             <Words kind="help">
               {isFetchingNextPage ? '' : countInWords(systems.length, hasNextPage, query)}
             </Words>
@@ -96,5 +97,7 @@ function More({ search, shown }: MoreProps) {
 
 const styles = StyleSheet.create({
   list: { gap: space[3] },
+  // The empty place says it already to those who see it.
+  said: webStyle({ position: 'absolute', clipPath: 'inset(50%)' }),
   foot: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', gap: space[3] },
 });

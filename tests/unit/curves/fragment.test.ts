@@ -1,7 +1,6 @@
 import fc from 'fast-check';
-import { examples } from '../../../components/curves/examples';
 import type { Choice, CurvesState } from '../../../components/curves/curves-state';
-import { firstState, layers, systemOf, views } from '../../../components/curves/curves-state';
+import { firstState, givenConstants, layers, views } from '../../../components/curves/curves-state';
 import { rangeOf } from '../../../components/curves/curve-grid';
 import { formatFragment, parseFragment } from '../../../components/curves/fragment';
 import { pHAt } from '../../../components/curves/ph-steps';
@@ -27,16 +26,19 @@ const typed = fc.record({
     { requiredKeys: ['fullyProtonatedCharge', 'pKa'] },
   ),
 });
-const example = fc.constantFrom(...examples).map(({ id }): Choice => ({ kind: 'example', id }));
+const stored = fc
+  .stringMatching(/^[a-z0-9]+(-[a-z0-9]+){0,3}(@[1-9][0-9]{0,8})?$/)
+  .filter((id) => id.length <= 80)
+  .map((id): Choice => ({ kind: 'stored', id }));
 
 const state: fc.Arbitrary<CurvesState> = fc
   .record({
-    choice: fc.oneof(example, typed),
+    choice: fc.oneof(stored, typed),
     at: fc.double({ min: -20, max: 40, noNaN: true }),
     layers: fc.subarray([...layers]),
     view: fc.constantFrom(...views),
   })
-  .map(({ at, ...rest }) => ({ ...rest, pH: pHAt(at, rangeOf(systemOf(rest.choice).pKa)) }));
+  .map(({ at, ...rest }) => ({ ...rest, pH: pHAt(at, rangeOf(givenConstants(rest.choice))) }));
 
 describe('the fragment of the address', () => {
   test('any state comes back as it was', () => {
@@ -70,7 +72,7 @@ describe('the fragment of the address', () => {
 
   test('what is left out is as on a first visit', () => {
     expect(parseFragment('#system=glycine')).toEqual({
-      state: { ...firstState, choice: { kind: 'example', id: 'glycine' } },
+      state: { ...firstState, choice: { kind: 'stored', id: 'glycine' } },
       faulty: false,
     });
   });
@@ -82,8 +84,9 @@ describe('the fragment of the address', () => {
   });
 
   test.each([
-    ['an unknown system', '#system=unobtainium&pH=7.40'],
-    ['an example and constants at once', '#system=glycine&charge=0&pKa=4'],
+    ['an id that can be none', '#system=Citric+acid&pH=7.40'],
+    ['a revision that can be none', '#system=tris@0&pH=7.40'],
+    ['an id and constants at once', '#system=glycine&charge=0&pKa=4'],
     ['constants without a charge', '#pKa=4'],
     ['a constant that is none', '#charge=0&pKa=4,x'],
     ['65 constants', `#charge=0&pKa=${Array.from({ length: 65 }, () => '4').join(',')}`],
@@ -106,7 +109,7 @@ describe('the fragment of the address', () => {
     expect(faulty).toBe(true);
     expect(read).toEqual({
       ...firstState,
-      choice: { kind: 'example', id: 'citric-acid' },
+      choice: { kind: 'stored', id: 'citric-acid' },
       view: 'charge',
     });
   });

@@ -1,16 +1,29 @@
 import { curveCsv } from '../../../components/curves/curve-csv';
+import { conditionsText } from '../../../components/curves/conditions-of';
 import type { Choice } from '../../../components/curves/curves-state';
 import { describeCurve, describeReading } from '../../../components/curves/describe';
 import { drawnCurve } from '../../../components/curves/drawn-curve';
 import { figureLayout } from '../../../components/curves/figure-layout';
 import { exactReading } from '../../../components/curves/follow-curve';
 import { readOutText } from '../../../components/curves/read-out-text';
+import type { Constant } from '../../../shared/constant';
 import type { FractionsAnswer } from '../../../shared/fractions';
 
 const range = (species: number, from: string | null, to: string | null) => ({ species, from, to });
+const determined = (known: Partial<Constant>) => ({
+  kind: 'thermodynamic',
+  temperature: '25',
+  ionicStrength: '0',
+  ...known,
+});
 const phosphoric = {
   name: 'phosphoric acid',
-  species: [0, 1, 2, 3].map((index) => ({ index, charge: -index, protonsLost: index })),
+  species: ['H3PO4', 'H2PO4^-', 'HPO4^2-', 'PO4^3-'].map((formula, index) => ({
+    index,
+    charge: -index,
+    protonsLost: index,
+    formula,
+  })),
   points: [
     {
       pH: '7.40',
@@ -26,8 +39,21 @@ const phosphoric = {
     range(2, '7.19800', '12.3500'),
     range(3, '12.3500', null),
   ],
+  model: {
+    conditions: { temperature: '25', ionicStrength: '0' },
+    constantsUsed: [
+      {
+        name: 'phosphoric acid',
+        fullyProtonatedCharge: 0,
+        pKa: ['2.148', '7.198', '12.35'],
+        constants: ['2.148', '7.198', '12.35'].map((value, i) =>
+          determined({ value, step: i + 1 }),
+        ),
+      },
+    ],
+  },
 } as unknown as FractionsAnswer;
-const choice: Choice = { kind: 'example', id: 'phosphoric-acid' };
+const choice: Choice = { kind: 'stored', id: 'phosphoric-acid' };
 const drawn = drawnCurve(choice, phosphoric);
 const reading = exactReading(phosphoric);
 if (!reading) throw new Error('The answer has a point.');
@@ -50,6 +76,29 @@ describe('what is drawn', () => {
     expect(drawnCurve(inverted, answer).meetings).toEqual([
       { before: 0, after: 2, pH: 6.5, text: '6.5' },
     ]);
+  });
+});
+
+describe('the conditions on a plot', () => {
+  const [used] = phosphoric.model.constantsUsed;
+  const textFor = (constants: readonly object[]) =>
+    conditionsText(
+      drawnCurve(choice, {
+        ...phosphoric,
+        model: { ...phosphoric.model, constantsUsed: [{ ...used, constants }] },
+      } as unknown as FractionsAnswer),
+    );
+
+  test('are the model’s for thermodynamic constants at its temperature', () => {
+    expect(conditionsText(drawn)).toBe('25 °C · I = 0 · ideal');
+  });
+
+  test('are the constants’ own where these were measured elsewhere', () => {
+    const at = (ionicStrength: string | null) =>
+      determined({ kind: 'concentration', ionicStrength });
+    expect(textFor([at('1'), at('0.1')])).toBe('25 °C · I = 1, 0.1 · as given');
+    expect(textFor([at(null)])).toBe('25 °C · I not stated · as given');
+    expect(textFor([determined({ temperature: '18' })])).toBe('18 °C · I = 0 · as given');
   });
 });
 

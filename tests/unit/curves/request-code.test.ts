@@ -140,10 +140,16 @@ test('no language writes a key', () => {
 });
 
 test('the request of a curve fits the contract', () => {
-  const { url: address, body } = curveRequest(
-    { kind: 'example', id: 'edta' },
-    'http://127.0.0.1:8080',
-  );
-  expect(address).toBe('http://127.0.0.1:8080/v1/fractions');
-  expect(publicFractionsRequest.safeParse(body).success).toBe(true);
+  const origin = 'http://127.0.0.1:8080';
+  const byId = curveRequest({ kind: 'stored', id: 'edta' }, origin);
+  expect(byId).toEqual({
+    url: `${origin}/v1/fractions`,
+    body: { system: { id: 'edta' }, pH: { from: '0', to: '14', step: '0.02' }, digits: 6 },
+  });
+  const system = { name: undefined, fullyProtonatedCharge: 0, pKa: ['0.0', '7.198'] };
+  const inFull = curveRequest({ kind: 'typed', system }, origin);
+  for (const { body } of [byId, inFull]) {
+    expect(publicFractionsRequest.safeParse(body).success).toBe(true);
+  }
+  expect(requestCode.curl(inFull)).toContain('"system": { "fullyProtonatedCharge": 0,');
 });

@@ -4,7 +4,7 @@ import {
   shownFraction,
   shownRatio,
 } from '../../../components/curves/rounded';
-import { genericFormulas } from '../../../components/curves/species-formulas';
+import { formulasOf, genericFormulas } from '../../../components/curves/species-formulas';
 
 describe('numbers as they are read', () => {
   test.each([
@@ -54,5 +54,17 @@ describe('formulas of a typed system', () => {
       'A^-',
     ]);
     expect(genericFormulas({ fullyProtonatedCharge: 2, pKa: ['2'] })).toEqual(['HA^2+', 'A^+']);
+  });
+
+  test('stand in where the formula of any form is not known', () => {
+    const system = { fullyProtonatedCharge: 0, pKa: ['9.4'] };
+    const form = (index: number, formula: string | null) => ({
+      index,
+      charge: -index,
+      protonsLost: index,
+      formula,
+    });
+    expect(formulasOf([form(0, 'C20H14O4'), form(1, null)], system)).toEqual(['HA', 'A^-']);
+    expect(formulasOf([form(0, 'HF'), form(1, 'F^-')], system)).toEqual(['HF', 'F^-']);
   });
 });
