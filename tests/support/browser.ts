@@ -34,12 +34,14 @@ export async function openBrowser(view: View): Promise<OpenBrowser> {
     chromiumSandbox: process.getuid?.() !== 0,
     args: flags,
   });
-  const page = await browser.newPage({
+  // A context by name: browser.newPage would refuse the second page that axe needs.
+  const context = await browser.newContext({
     viewport: { width: view.width, height: view.height },
     colorScheme: view.dark ? 'dark' : 'light',
     hasTouch: view.touch ?? false,
     isMobile: view.touch ?? false,
   });
+  const page = await context.newPage();
   const complaints: string[] = [];
   page.on('pageerror', (error) => complaints.push(error.message));
   page.on('console', (message) => {
