@@ -1,4 +1,5 @@
 import { Choice } from '../ui/choice';
+import { useToast } from '../ui/toast';
 import { examples } from './examples';
 import type { Curves } from './use-curves';
 
@@ -15,12 +16,19 @@ const options = [
 
 /** Which system is drawn: an example, or one that is typed. */
 export function SystemChoice({ state: { choice }, choose, typeOwn }: Curves) {
+  const say = useToast();
+  const pick = (id: string) => {
+    choose({ kind: 'example', id });
+    if (choice.kind === 'typed') {
+      say({ text: 'Your own constants are put away', undo: () => choose(choice) });
+    }
+  };
   return (
     <Choice
       label="System"
       options={options}
       value={choice.kind === 'example' ? choice.id : own}
-      onChange={(id) => (id === own ? typeOwn() : choose({ kind: 'example', id }))}
+      onChange={(id) => (id === own ? typeOwn() : pick(id))}
     />
   );
 }

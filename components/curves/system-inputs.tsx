@@ -19,11 +19,9 @@ export function SystemInputs(curves: Curves) {
       {example ? (
         <ConstantsList example={example} onTypeOwn={typeOwn} />
       ) : (
-        <>
-          <ConstantsEditor {...editing} />
-          <Words kind="help">Constants are taken as given, at 25 °C, in an ideal solution.</Words>
-        </>
+        <ConstantsEditor {...editing} />
       )}
+      <Words kind="help">Constants are taken as given: nothing is corrected for the medium.</Words>
       {warnings.map(({ message, pointer }) => (
         <Notice key={`${pointer} ${message}`} tone="warn" title="Computed as given">
           {message}
