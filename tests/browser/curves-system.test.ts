@@ -79,6 +79,15 @@ describe('a system of one’s own', () => {
     await fragmentIs(page, own);
   });
 
+  test('an example puts it away, and one press brings it back', async () => {
+    const { page } = await openCurves(server, wide, own);
+    await page.getByRole('combobox', { name: 'System' }).click();
+    await page.getByRole('option', { name: /Acetic acid/ }).click();
+    await fragmentIs(page, 'system=acetic-acid&pH=7.40');
+    await page.getByRole('button', { name: 'Undo' }).click();
+    await fragmentIs(page, own);
+  });
+
   test('inverted constants are computed, and said to be', async () => {
     const { page } = await openCurves(server, wide, 'charge=0&pKa=9,4&pH=7.40');
     await page.getByText('Computed as given').waitFor();

@@ -40,7 +40,7 @@ test('too many calls: it says when they are made again, and what is drawn stays'
       body: JSON.stringify({ system: { fullyProtonatedCharge: 0, pKa: ['7'] }, pH: '7' }),
     });
   // A window of the limit may end while it is filled: fill it until one call is refused.
-  for (let statuses: number[] = []; !statuses.includes(429); ) {
+  for (let statuses: number[] = []; !statuses.includes(429);) {
     const answers = await Promise.all(Array.from({ length: limits.publicCallsPerMinute }, call));
     statuses = answers.map(({ status }) => status);
   }
