@@ -28,9 +28,12 @@ export function IssuedDialog({ of: { key, name, scopes, expiresAt }, onClose }: 
   const [copied, setCopied] = useState<Copied>();
   const [asked, setAsked] = useState(false);
   const isKept = copied?.ok === true;
-  const ask = () => setAsked(true);
-  useBeforeLeaving(!isKept, ask);
   const warning = useRef<View>(null);
+  const ask = () => {
+    setAsked(true);
+    elementOf(warning.current)?.focus();
+  };
+  useBeforeLeaving(!isKept, ask);
   useEffect(() => {
     if (asked) elementOf(warning.current)?.focus();
   }, [asked]);
@@ -46,17 +49,19 @@ export function IssuedDialog({ of: { key, name, scopes, expiresAt }, onClose }: 
       open
       wide
       onClose={isKept ? onClose : ask}
-      actions={
-        asked ? (
-          <>
-            <Button label="Stay and copy it" onPress={() => setAsked(false)} />
-            <Button kind="destructive" label="Leave without it" onPress={onClose} />
-          </>
-        ) : (
-          <Button label="Done" onPress={isKept ? onClose : ask} />
-        )
-      }
+      actions={<Button label="Done" onPress={isKept ? onClose : ask} />}
     >
+      {asked && (
+        <Notice ref={warning} tone="warn" title="You have not copied the key">
+          <Words>
+            It cannot be shown again. Without it the key is of no use: revoke it and issue another.
+          </Words>
+          <View style={[styles.row, styles.answers]}>
+            <Button label="Stay" onPress={() => setAsked(false)} />
+            <Button kind="destructive" label="Leave without it" onPress={onClose} />
+          </View>
+        </Notice>
+      )}
       <Words>
         Copy the key now. It is shown this once: we keep only a fingerprint of it, and this page
         forgets it when you leave.
@@ -79,16 +84,12 @@ export function IssuedDialog({ of: { key, name, scopes, expiresAt }, onClose }: 
         {` until ${exactDay(new Date(expiresAt))}.`}
       </Words>
       <TryKey value={key} scopes={scopes} onCopy={(call) => void copy('Call', call)} />
-      {asked && (
-        <Notice ref={warning} tone="warn" title="You have not copied the key">
-          It cannot be shown again. Without it the key is of no use: revoke it and issue another.
-        </Notice>
-      )}
     </Dialog>
   );
 }
 
 const styles = StyleSheet.create({
   raised: { gap: space[4], padding: space[4], borderRadius: radius },
+  answers: { marginTop: space[2] },
   row: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', gap: space[3] },
 });

@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { StyleSheet, View } from 'react-native';
 import { ProblemError } from '../../shared/client';
 import type { KeyAnswer } from '../../shared/keys';
 import { Empty } from '../ui/empty';
@@ -6,6 +7,7 @@ import { Failure } from '../ui/failure';
 import { Notice } from '../ui/notice';
 import { Skeleton } from '../ui/skeleton';
 import { useOnline } from '../ui/use-online';
+import { Words } from '../ui/words';
 import { KeysList } from './keys-list';
 import type { useKeys } from './keys-queries';
 
@@ -22,7 +24,7 @@ export function KeysContent({ keys, onRevoke, issue }: KeysContentProps) {
   const online = useOnline();
   const all = data?.pages.flatMap(({ items }) => items);
   // That the session is over, the shell has said already.
-  const isTold = all && error instanceof ProblemError && error.problem.status === 401;
+  const isTold = error instanceof ProblemError && error.problem.status === 401;
   const retry = isFetchingNextPage || (data && hasNextPage) ? keys.fetchNextPage : keys.refetch;
   return (
     <>
@@ -34,11 +36,14 @@ export function KeysContent({ keys, onRevoke, issue }: KeysContentProps) {
       {online && error && !isFetching && !isTold && (
         <Failure error={error} onRetry={() => void retry()} />
       )}
+      {!all && isTold && <Words>The keys come once you are signed in again.</Words>}
       {!all && online && !error && <Skeleton label="Fetching the keys" lines={6} />}
       {all?.length === 0 && (
-        <Empty title="No keys yet" action={issue}>
-          A key lets a program call: a nightly import, a plate reader, a notebook.
-        </Empty>
+        <View style={styles.empty}>
+          <Empty title="No keys yet" action={issue}>
+            A key lets a program call: a nightly import, a plate reader, a notebook.
+          </Empty>
+        </View>
       )}
       {all && all.length > 0 && (
         <KeysList
@@ -51,3 +56,7 @@ export function KeysContent({ keys, onRevoke, issue }: KeysContentProps) {
     </>
   );
 }
+
+const styles = StyleSheet.create({
+  empty: { maxWidth: 560 },
+});

@@ -1,6 +1,5 @@
 import { useState } from 'react';
 import { StyleSheet, View } from 'react-native';
-import type { KeyAnswer } from '../../shared/keys';
 import { Button } from '../ui/button';
 import { space } from '../ui/theme';
 import { useLayout } from '../ui/use-layout';

@@ -12,7 +12,7 @@ import type { KeyColumn, KeySorting } from './sort-keys';
 const columns: readonly Column[] = [
   { key: 'name' satisfies KeyColumn, head: 'Key', sortable: true },
   { key: 'may', head: 'May' },
-  { key: 'issued' satisfies KeyColumn, head: 'Issued by', sortable: true },
+  { key: 'issued' satisfies KeyColumn, head: 'Issued', sortable: true },
   { key: 'used' satisfies KeyColumn, head: 'Last used', sortable: true },
   { key: 'ends' satisfies KeyColumn, head: 'Ends', sortable: true },
   { key: 'standing', head: 'State' },
@@ -44,7 +44,7 @@ export function KeysTable({ keys, now, onRevoke, sorting, onSort }: KeysTablePro
         may: <MayDo {...key} />,
         issued: (
           <View>
-            <Words>{key.issuer.name}</Words>
+            <Words numberOfLines={1}>{key.issuer.name}</Words>
             <Words kind="help">
               <Moment at={key.createdAt} now={now} />
             </Words>

@@ -19,9 +19,8 @@ interface MoreDialogProps {
 /** What the bar or the rail opens: places without room there, and the account. */
 export function MoreDialog({ behind, open, onClose }: MoreDialogProps) {
   const { data: session } = useSession();
-  const title = session?.state === 'signed-in' ? session.who.account.name : 'Account';
   return (
-    <Dialog title={behind.length > 0 ? 'More' : title} open={open} onClose={onClose}>
+    <Dialog title={behind.length > 0 ? 'More' : 'Account'} open={open} onClose={onClose}>
       {behind.map((place) => (
         <PlaceLink key={place.href} place={place} onGo={onClose} style={() => styles.place}>
           {() => (

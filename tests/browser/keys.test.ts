@@ -100,7 +100,7 @@ test('a key that was not copied is not left without a word', async () => {
   const warning = page.getByText('You have not copied the key');
   await page.keyboard.press('Escape');
   await warning.waitFor();
-  await page.getByRole('button', { name: 'Stay and copy it' }).click();
+  await page.getByRole('button', { name: 'Stay' }).click();
   await warning.waitFor({ state: 'detached' });
   await page.evaluate(() => window.history.back());
   await warning.waitFor();
