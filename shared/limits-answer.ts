@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { limits } from './limits';
 
-const costFormula = 'cost = sum over systems of points × (protons + 1) × digits';
+const costFormula = 'cost = sum over systems of points × (protons + 1) × (digits + 20)';
 const unitFormula = `computeUnits = ceil(cost / ${limits.costOfOneUnit})`;
 
 const count = (description: string, example: number) => z.int().meta({ description, example });

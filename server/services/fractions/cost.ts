@@ -6,7 +6,7 @@ import type { ResolvedRequest, ResolvedSystem } from './resolve';
 export const systemsOf = (request: ResolvedRequest): readonly ResolvedSystem[] =>
   request.system === undefined ? (request.systems ?? []) : [request.system];
 
-/** Digits to be made right: points × species × digits, summed over the systems. */
+/** The work of a call, summed over its systems. */
 export const fractionsCost = (request: ResolvedRequest): number =>
   systemsOf(request)
     .map(({ pKa }) => costOf(pointCount(request.pH), pKa.length + 1, request.digits))

@@ -37,7 +37,7 @@ export class FractionsService {
   private withinCost(request: ResolvedRequest, { mostCost, asCsv }: Terms): Promise<Uint8Array> {
     const cost = fractionsCost(request);
     if (cost > mostCost) {
-      const detail = `Points × species × digits is ${cost}; one call may ask for ${mostCost}.`;
+      const detail = `The cost, points × species × (digits + 20), is ${cost}; one call may ask for ${mostCost}.`;
       throw new Refusal('over-limit', detail, [{ pointer: '', code: 'cost-over-limit', detail }]);
     }
     return this.compute.run(asCsv && !request.dryRun ? 'fractionsCsv' : 'fractions', request);
