@@ -147,7 +147,9 @@ export const manyFractionsAnswer = z
 export const dryRunAnswer = z
   .strictObject({
     dryRun: z.literal(true).meta({ description: 'Nothing was computed.', example: true }),
-    cost: z.int().meta({ description: 'Points × species × (digits + 20), summed.', example: 302616 }),
+    cost: z
+      .int()
+      .meta({ description: 'Points × species × (digits + 20), summed.', example: 302616 }),
     computeUnits: z.int().meta({ description: 'What the call would count.', example: 1 }),
     warnings: z.array(warning).meta({ description: 'What the answer would warn of.' }),
   })
