@@ -1,7 +1,6 @@
 import { MutationCache, QueryCache, QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import { Slot } from 'expo-router';
 import { StatusBar } from 'expo-status-bar';
-import { useState } from 'react';
 import { ProblemError } from '../../shared/client';
 import { learnFromRefusal, useSessionKeeper } from '../account/session-queries';
 
@@ -10,8 +9,8 @@ const worthAsking = (error: Error) =>
   !(error instanceof ProblemError) || error.problem.status === 0 || error.problem.status === 503;
 
 function newQueryClient(): QueryClient {
-  const onError = (error: Error): void => learnFromRefusal(queryClient, error);
-  const queryClient: QueryClient = new QueryClient({
+  const onError = (error: Error): void => learnFromRefusal(client, error);
+  const client: QueryClient = new QueryClient({
     queryCache: new QueryCache({ onError }),
     mutationCache: new MutationCache({ onError }),
     defaultOptions: {
@@ -23,12 +22,14 @@ function newQueryClient(): QueryClient {
       },
     },
   });
-  return queryClient;
+  return client;
 }
+
+/** One for the page, not for each Root: the router makes a new one on some steps back. */
+const queryClient = newQueryClient();
 
 /** What every route stands in. */
 export function Root() {
-  const [queryClient] = useState(newQueryClient);
   return (
     <QueryClientProvider client={queryClient}>
       <SessionKeeper />
