@@ -96,7 +96,6 @@ export function SystemCombobox({ label, value, onPick, onTypeOwn }: SystemCombob
           onKeyDown={press}
           onBlur={rest}
           selectOnFocus
-          inputMode="search"
           listbox={{ id: `${id}-list`, open, at: at === inText ? undefined : optionId(at) }}
           help="By name, formula or CAS number"
         />

@@ -19,7 +19,7 @@ export function SystemLink({ system: { id, name }, chosen }: SystemLinkProps) {
     <Link href={`/systems/${id}`} asChild>
       <View id={systemLinkId(id)} aria-current={chosen ? 'page' : undefined} style={styles.link}>
         <Words kind="button">{systemTitle(name)}</Words>
-        <View style={StyleSheet.absoluteFill} />
+        <View style={[StyleSheet.absoluteFill, styles.row]} />
       </View>
     </Link>
   );
@@ -28,4 +28,6 @@ export function SystemLink({ system: { id, name }, chosen }: SystemLinkProps) {
 const styles = StyleSheet.create({
   // Its own box must not catch the absolute child: the row does.
   link: webStyle({ position: 'static' }),
+  // Over what else stands in the row.
+  row: { zIndex: 1 },
 });

@@ -1,5 +1,4 @@
-import AxeBuilder from '@axe-core/playwright';
-import type { Page } from 'playwright-core';
+import { axeFaults } from '../support/axe';
 import { startTestServer, type TestServer } from '../support/server';
 import { openCurves, wide } from './curves-page';
 
@@ -11,18 +10,6 @@ beforeAll(async () => {
 });
 afterAll(() => server.close());
 
-const tags = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'];
-
-async function faults(page: Page) {
-  // A sheet that still rises is half transparent.
-  await page.evaluate(() => Promise.all(document.getAnimations().map(({ finished }) => finished)));
-  const { violations } = await new AxeBuilder({ page }).withTags(tags).analyze();
-  return violations.map(({ id, nodes }) => ({
-    id,
-    at: nodes.map(({ html }) => html.slice(0, 160)),
-  }));
-}
-
 const own = 'name=Larkmoor+buffer&charge=0&pKa=2.148,7.198,12.35&pH=7.40';
 
 describe.each([320, 390, 1280])('at %i px', (width) => {
@@ -30,27 +17,42 @@ describe.each([320, 390, 1280])('at %i px', (width) => {
     const view = { width, height: 800, dark: scheme === 'dark', touch: width < 900 };
     const onRail = width >= 900;
 
+    test('axe finds nothing in the search for a system, found or not', async () => {
+      const { page } = await openCurves(server, view, 'system=edta');
+      if (!onRail) await page.getByRole('button', { name: /change the system/ }).click();
+      const field = page.getByRole('combobox', { name: 'System' });
+      await field.click();
+      await page.getByRole('option', { name: 'Phosphoric acid' }).waitFor();
+      expect(await axeFaults(page)).toEqual([]);
+      await field.fill('citr');
+      await page.getByRole('option', { name: /^Citric acid/ }).waitFor();
+      expect(await axeFaults(page)).toEqual([]);
+      await field.fill('no such thing');
+      await page.getByText('Nothing is called “no such thing”.').first().waitFor();
+      expect(await axeFaults(page)).toEqual([]);
+    });
+
     test('axe finds nothing in the curve, its error, its dialog and its request', async () => {
       const { page } = await openCurves(server, view, own);
       await page.getByRole('button', { name: 'Show the numbers' }).click();
       await page.getByRole('table', { name: /Fraction of each form/ }).waitFor();
-      expect(await faults(page)).toEqual([]);
+      expect(await axeFaults(page)).toEqual([]);
 
       if (!onRail) await page.getByRole('button', { name: /change the system/ }).click();
       await page.getByRole('textbox', { name: 'pKa 2' }).fill('x');
       await page.getByText('Write a number such as 7.20.').waitFor();
-      expect(await faults(page)).toEqual([]);
+      expect(await axeFaults(page)).toEqual([]);
       await page.keyboard.press('Escape');
 
       await page.getByRole('button', { name: onRail ? 'Export' : 'Share' }).click();
       await page.getByRole('dialog').waitFor();
-      expect(await faults(page)).toEqual([]);
+      expect(await axeFaults(page)).toEqual([]);
       await page.keyboard.press('Escape');
 
       if (onRail) {
         await page.getByRole('button', { name: 'Open' }).click();
         await page.getByRole('tabpanel', { name: 'curl' }).waitFor();
-        expect(await faults(page)).toEqual([]);
+        expect(await axeFaults(page)).toEqual([]);
       }
     });
   });

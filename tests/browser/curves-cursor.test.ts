@@ -103,7 +103,7 @@ describe('on a phone, by touch', () => {
     await page.getByRole('combobox', { name: 'System' }).tap();
     await page.getByRole('option', { name: /Citric acid/ }).tap();
     await page.getByRole('heading', { level: 1, name: /Citric acid/ }).waitFor();
-    await showsValue(page, 'Cit, charge minus 3', '0.910');
+    await showsValue(page, 'C6 H5 O7, charge minus 3', '0.910');
   });
 
   test.each([320, 360, 390])('nothing scrolls sideways at %i px', async (width) => {

@@ -60,9 +60,9 @@ describe('what leaves the screen', () => {
     }, svg);
     expect(read.root).toBe('svg');
     expect(read.words).toEqual(
-      expect.arrayContaining(['EDTA', '25 °C · I = 0.1 · as given', '4.40']),
+      expect.arrayContaining(['EDTA', '25 °C · I = 1, 0.1 · as given', '4.40']),
     );
-    expect(read.words.join(' ')).toContain('Critical Stability Constants');
+    expect(read.words.join(' ')).toMatch(/Quantitative Chemical Analysis.* Recalled: sure\./);
     expect(read.classes).toBe(0);
     expect(svg.match(/@font-face/g)?.length).toBeGreaterThanOrEqual(5);
     expect(svg.match(/url\((?!data:)/g)).toBeNull();
@@ -104,6 +104,15 @@ describe('the request', () => {
     expect(answer.name).toBe(`O'Neill "x" $HOME \\ é`);
     const shown = answer.points.find(({ pH }) => pH === '7.40')?.fractions[1] ?? '';
     await showsValue(page, 'H A', Number(shown).toFixed(3));
+  });
+
+  test('asks for a system of the handbook by its id', async () => {
+    const { page } = await openCurves(server, wide, 'system=citric-acid&pH=5.00');
+    const command = await copied(page, 'Copy');
+    expect(command).toContain('"system": { "id": "citric-acid" }');
+    const answer = fractionsAnswer.parse(JSON.parse((await inShell(command)).stdout));
+    const shown = answer.points.find(({ pH }) => pH === '5.00')?.fractions[2] ?? '';
+    await showsValue(page, 'C6 H6 O7, charge minus 2', Number(shown).toFixed(3));
   });
 
   test('is shown in four languages, without a key', async () => {
