@@ -9,6 +9,8 @@ export class Refusal extends Error {
     readonly code: ProblemName,
     readonly detail?: string,
     readonly errors?: readonly Fault[],
+    /** Seconds after which trying again may help. */
+    readonly retryAfter?: number,
   ) {
     super(detail ?? code);
     this.name = 'Refusal';

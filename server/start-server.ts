@@ -36,7 +36,7 @@ export async function startServer(config: Config, logger: Logger): Promise<Runni
       server.closeIdleConnections();
     });
     clearTimeout(patience);
-    await services.compute.close();
+    await services.close();
     await database.destroy();
   };
   return { port, publicUrl, close };

@@ -3,6 +3,7 @@ import { limits } from './limits';
 import { model, warning } from './model';
 import { pHInput, pHValue } from './ph';
 import { species } from './species';
+import { queryInteger } from './query-integer';
 import { systemInput } from './system';
 
 const digits = z
@@ -19,11 +20,7 @@ const digits = z
 /** Query of GET /v1/systems/{id}/fractions: the one-line form of the same question. */
 export const fractionsQuery = z.strictObject({
   pH: pHValue,
-  digits: z.coerce
-    .number()
-    .int()
-    .min(limits.digits.from)
-    .max(limits.digits.to)
+  digits: queryInteger(limits.digits.from, limits.digits.to)
     .default(limits.digits.default)
     .meta({ description: 'Digits of the answer, all of them right.', example: 16 }),
 });

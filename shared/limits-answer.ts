@@ -52,8 +52,14 @@ export const limitsAnswer = z
       .meta({ id: 'ComputeUnits', description: 'What a call counts.' }),
     callsPerMinute: z
       .strictObject({
-        key: count('Calls a minute for each key.', limits.keyedCallsPerMinute),
-        address: count('Public calls a minute from each address.', limits.publicCallsPerMinute),
+        key: count(
+          'Calls a minute of one operation by one key or person.',
+          limits.keyedCallsPerMinute,
+        ),
+        address: count(
+          'Calls a minute of one public operation from one address.',
+          limits.publicCallsPerMinute,
+        ),
       })
       .meta({ id: 'RateLimits', description: 'How often.' }),
   })

@@ -18,7 +18,8 @@ export const warning = z
     }),
     message: z.string().meta({
       description: 'The warning in words.',
-      example: 'pKa 1 (9) is greater than pKa 2 (4): species 1 never predominates.',
+      example:
+        'pKa 1 (9) is greater than pKa 2 (4): species 1 never predominates, and others beside it may not either.',
     }),
     pointer: z.string().optional().meta({
       description: 'JSON Pointer to the part of the request it concerns.',
@@ -35,6 +36,10 @@ const constantsUsed = z
       .string()
       .optional()
       .meta({ description: 'Name given or stored.', example: 'phosphoric acid' }),
+    note: z.string().nullable().optional().meta({
+      description: 'What to know before using a stored system; null where there is nothing.',
+      example: 'Two of its three steps.',
+    }),
     system: z
       .strictObject({
         id: z.string().meta({ description: 'Identifier.', example: 'phosphoric-acid' }),

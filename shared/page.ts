@@ -1,17 +1,14 @@
 import { z } from 'zod';
+import { queryInteger } from './query-integer';
 
 /** Query parameters of every list: how many rows, and where the last page ended. */
 export const pageQuery = {
-  limit: z.coerce
-    .number()
-    .int()
-    .min(1)
-    .max(100)
+  limit: queryInteger(1, 100)
     .default(50)
     .meta({ description: 'Rows of a page, 1 to 100.', example: 50 }),
   cursor: z
     .string()
-    .max(500)
+    .max(2_000)
     .optional()
     .meta({ description: 'Opaque: the one that `Link: rel="next"` of the last page carries.' }),
 };

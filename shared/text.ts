@@ -1,15 +1,16 @@
 import { z } from 'zod';
 
-/**
- * Text a person typed: trimmed, bounded, and free of U+0000, which PostgreSQL cannot store.
- */
+/** Control characters, halves of surrogate pairs, and signs that turn the direction of writing. */
+const unfit = /[\p{Cc}\p{Cs}\p{Bidi_Control}]/u;
+
+/** Text a person typed: trimmed, bounded, and free of characters that show as nothing or mislead. */
 export const text = (longest: number) =>
   z
     .string()
     .trim()
     .min(1)
     .max(longest)
-    .refine((value) => !value.includes('\u0000'), {
-      params: { code: 'nul-character' },
-      message: 'Text may not contain the character U+0000.',
+    .refine((value) => !unfit.test(value), {
+      params: { code: 'unfit-character' },
+      message: 'Leave out control characters and signs that turn the direction of writing.',
     });

@@ -6,8 +6,12 @@ type Issue = z.core.$ZodIssue;
 type Path = readonly PropertyKey[];
 
 /** RFC 6901. */
+const pointerLongest = 200;
 const pointerOf = (path: Path) =>
-  path.map((part) => `/${String(part).replaceAll('~', '~0').replaceAll('/', '~1')}`).join('');
+  path
+    .map((part) => `/${String(part).replaceAll('~', '~0').replaceAll('/', '~1')}`)
+    .join('')
+    .slice(0, pointerLongest);
 
 const ownCode = (issue: Issue): string | undefined => {
   const code: unknown = issue.code === 'custom' ? issue.params?.code : undefined;

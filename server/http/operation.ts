@@ -17,8 +17,8 @@ export interface Reply {
   readonly type?: string;
   readonly body?: Uint8Array | string;
   readonly headers?: Readonly<Record<string, string>>;
-  /** Opens a session with these tokens, or ends it, in the caller's cookies. */
-  readonly session?: Tokens | 'ended';
+  /** Tokens for the caller's cookies: a session opened, renewed or ended. */
+  readonly session?: (Pick<Tokens, 'access'> & Partial<Tokens>) | 'ended';
 }
 
 interface Call<A extends Access, Body, Params, Query> {
@@ -34,6 +34,8 @@ interface Call<A extends Access, Body, Params, Query> {
     : A extends 'public' | 'own-pages'
       ? undefined
       : Caller;
+  /** Aborted when the caller has gone. */
+  readonly signal: AbortSignal;
   /** The peer's network address. */
   readonly address: string;
   /** The refresh token of the caller's cookie. */

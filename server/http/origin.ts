@@ -11,7 +11,7 @@ export function requireOwnOrigin(request: Request, origins: ReadonlySet<string>)
   if (safe.has(request.method)) return;
   const { origin, 'sec-fetch-site': site } = request.headers;
   const ours = origin === undefined ? site === 'same-origin' : origins.has(origin);
-  if (!ours) throw new Refusal('origin-refused');
+  if (!ours) throw new Refusal('origin-refused', 'Send it from our own pages, or use a key.');
 }
 
 /** Origins of our own pages: PUBLIC_URL, and outside production this machine by its other name. */

@@ -53,7 +53,8 @@ function sendProblem(publicUrl: string, response: Response, refusal: Refusal): v
     requestId: String(response.getHeader('X-Request-Id')),
     ...(refusal.errors === undefined ? {} : { errors: [...refusal.errors] }),
   };
-  if (status === 503 && !response.hasHeader('Retry-After')) response.setHeader('Retry-After', '5');
+  const wait = refusal.retryAfter ?? (status === 503 ? 5 : undefined);
+  if (wait !== undefined) response.setHeader('Retry-After', String(wait));
   response
     .status(status)
     .setHeader('Cache-Control', 'no-store')

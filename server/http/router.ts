@@ -43,7 +43,7 @@ function parsed(schema: ZodType, value: unknown, faults: (error: z.ZodError) => 
   const detail =
     errors.length === 1
       ? 'One field is not as the contract has it.'
-      : `${errors.length} fields are not as the contract has them.`;
+      : `${errors.length} fields or more are not as the contract has them.`;
   throw new Refusal('invalid-request', detail, errors);
 }
 
@@ -51,7 +51,7 @@ const noQuery = z.strictObject({});
 
 function read({ params, query, body }: Operation, request: Request) {
   const path = params?.safeParse(request.params);
-  if (path?.success === false) throw new Refusal('not-found');
+  if (path?.success === false) throw new Refusal('not-found', 'There is no such thing here.');
   return {
     params: path?.data,
     query: parsed(query ?? noQuery, request.query, queryFaultsOf),
@@ -69,6 +69,12 @@ function send(response: Response, reply: Reply, status: number, pages: OwnPages)
   response.end(reply.body);
 }
 
+function goneSignal(response: Response): AbortSignal {
+  const gone = new AbortController();
+  response.once('close', () => gone.abort());
+  return gone.signal;
+}
+
 const answer =
   (operation: Operation, services: Services, pages: OwnPages) =>
   async (request: Request, response: Response): Promise<void> => {
@@ -77,6 +83,7 @@ const answer =
       services,
       accepted: String(response.locals.accepted),
       caller: response.locals.caller,
+      signal: goneSignal(response),
       address: request.ip ?? '',
       refreshToken: pages.cookies.read(request).refresh,
     };

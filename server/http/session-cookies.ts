@@ -29,9 +29,10 @@ export class SessionCookies {
     return { ...(access && { access }), ...(refresh && { refresh }) };
   }
 
-  set(response: Response, { access, refresh }: Tokens): void {
+  set(response: Response, { access, refresh }: Partial<Tokens> & Pick<Tokens, 'access'>): void {
     const { options } = this;
     response.cookie(this.access, access, { ...options, maxAge: accessSeconds * 1_000 });
+    if (refresh === undefined) return;
     response.cookie(this.refresh, refresh, { ...options, maxAge: sessionDays * 86_400_000 });
   }
 

@@ -15,10 +15,9 @@ export function apiDescription({ document, https }: Options): Router {
     response.setHeader('Cache-Control', 'no-cache');
     response.type('application/json').send(json);
   });
-  router.use(
-    '/docs',
-    securityHeaders({ styles: ["'unsafe-inline'"], https }),
-    swaggerUi.serve,
+  router.use('/docs', securityHeaders({ styles: ["'unsafe-inline'"], https }), swaggerUi.serve);
+  router.get(
+    '/docs/',
     swaggerUi.setup(document, {
       customSiteTitle: 'Stepwell API',
       swaggerOptions: { validatorUrl: null, persistAuthorization: false },

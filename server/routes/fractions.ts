@@ -18,12 +18,17 @@ export const fractionsForms = [json, csv];
 
 const answers = z.union([fractionsAnswer, manyFractionsAnswer, dryRunAnswer]);
 
+interface Asked {
+  readonly accepted: string;
+  readonly signal: AbortSignal;
+}
+
 /** Where a call stands: who asks, how much it may cost, in which form the answer goes. */
-export const fractionsTerms = (reader: string | undefined, mostCost: number, accepted: string) => ({
-  reader,
-  mostCost,
-  asCsv: accepted === csv,
-});
+export const fractionsTerms = (
+  reader: string | undefined,
+  mostCost: number,
+  { accepted, signal }: Asked,
+) => ({ reader, mostCost, asCsv: accepted === csv, signal });
 
 /** A finished body in the form agreed upon; a dry run is JSON always. */
 export const fractionsReply = (body: Uint8Array, accepted: string, dryRun = false): Reply => ({
@@ -47,7 +52,8 @@ export const fractions = operation({
     'Fractions, neighbour ratios, mean charge and predominance of one system, or of up to 100, ' +
     'at one pH, a list, or a grid. Every digit is right: the exact value for the constants as ' +
     'given, rounded half to even. A system is given in full, or by the id of a stored one, whose ' +
-    'constants are then in `model`. `Accept: text/csv` gives a line a system and pH.',
+    'constants are then in `model`. `Accept: text/csv` gives a line a system and pH, numbers ' +
+    'alone: ask for JSON, or a dry run, for the constants, their sources and the warnings.',
   tag: 'Compute',
   access: { scope: 'compute' },
   callsPerMinute: limits.keyedCallsPerMinute,
@@ -78,9 +84,10 @@ export const fractions = operation({
       dryRun: true,
     }),
   },
-  handle: async ({ body, accepted, caller, services }) => {
-    const terms = fractionsTerms(caller.organizationId, limits.cost, accepted);
-    return fractionsReply(await services.fractions.answer(body, terms), accepted, body.dryRun);
+  handle: async ({ body, caller, services, ...asked }) => {
+    const terms = fractionsTerms(caller.organizationId, limits.cost, asked);
+    const answer = await services.fractions.answer(body, terms);
+    return fractionsReply(answer, asked.accepted, body.dryRun);
   },
 });
 
@@ -106,9 +113,9 @@ export const publicFractions = operation({
       digits: 10,
     }),
   },
-  handle: async ({ body, accepted, services }) => {
-    const terms = fractionsTerms(undefined, limits.publicCost, accepted);
-    const request = { ...body, dryRun: false };
-    return fractionsReply(await services.fractions.answer(request, terms), accepted);
+  handle: async ({ body, services, ...asked }) => {
+    const terms = fractionsTerms(undefined, limits.publicCost, asked);
+    const answer = await services.fractions.answer({ ...body, dryRun: false }, terms);
+    return fractionsReply(answer, asked.accepted);
   },
 });

@@ -52,12 +52,12 @@ export const listKeys = operation({
   handle: async ({ query: { limit, cursor }, caller, services }) => {
     const [createdAt, id] = cursor === undefined ? [] : readCursor(cursor, position);
     const after = createdAt && id ? { createdAt: new Date(createdAt), id } : undefined;
-    const list = await services.keyConsole.list(caller, { limit, after });
-    const last = list.items.at(limit - 1);
+    const { items, hasMore } = await services.keyConsole.list(caller, { limit, after });
+    const last = hasMore ? items.at(-1) : undefined;
     const next = last && writeCursor([last.createdAt, last.id]);
     return {
       type: json,
-      body: JSON.stringify(list),
+      body: JSON.stringify({ items }),
       ...(next && { headers: nextLink('/v1/keys', { limit: `${limit}`, cursor: next }) }),
     };
   },

@@ -57,8 +57,8 @@ export const refreshSession = operation({
   operationId: 'refreshSession',
   summary: 'Stay signed in',
   description:
-    'Renews both cookies. A refresh token presented again later than ten seconds after it was ' +
-    'replaced ends the session: it was stolen.',
+    'Renews both cookies. The refresh token before the last, within ten seconds, is two tabs at ' +
+    'once; any other that was replaced was stolen, and ends the session.',
   tag: 'People',
   access: 'own-pages',
   callsPerMinute: 60,

@@ -126,9 +126,10 @@ export const systemFractions = operation({
   examples: {
     tris: oneLineExample('Tris at pH 7.4', 'tris', { pH: '7.4', digits: '10' }),
   },
-  handle: async ({ params: { id }, query, accepted, caller, services }) => {
-    const terms = fractionsTerms(caller.organizationId, limits.cost, accepted);
-    return fractionsReply(await services.fractions.answerAbout(id, query, terms), accepted);
+  handle: async ({ params: { id }, query, caller, services, ...asked }) => {
+    const terms = fractionsTerms(caller.organizationId, limits.cost, asked);
+    const answer = await services.fractions.answerAbout(id, query, terms);
+    return fractionsReply(answer, asked.accepted);
   },
 });
 

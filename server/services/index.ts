@@ -1,3 +1,4 @@
+import { availableParallelism } from 'node:os';
 import type { DataSource } from 'typeorm';
 import type { Config } from '../config';
 import { ComputePool } from './compute/compute-pool';
@@ -12,7 +13,8 @@ import { SystemService } from './systems/system-service';
 
 /** What the routes may call. */
 export interface Services {
-  readonly compute: ComputePool;
+  /** Lets go of the worker threads. */
+  readonly close: () => Promise<void>;
   readonly fractions: FractionsService;
   readonly keys: KeyGuard;
   readonly keyConsole: KeyConsole;
@@ -26,10 +28,14 @@ type Settings = Pick<Config, 'computeThreads' | 'keyPeppers' | 'sessionSecret'>;
 /** The services over a connected database. */
 export function createServices(database: DataSource, config: Settings, issuer: string): Services {
   const digests = new KeyDigests(config.keyPeppers);
-  const compute = new ComputePool(config.computeThreads);
+  const threads = config.computeThreads ?? availableParallelism();
+  // Apart, so that no crowd on the public page keeps a key waiting.
+  const compute = { keyed: new ComputePool(threads), public: new ComputePool(1) };
   const systems = new SystemService(database);
   return {
-    compute,
+    close: async () => {
+      await Promise.all([compute.keyed.close(), compute.public.close()]);
+    },
     fractions: new FractionsService(systems, compute),
     keys: new KeyGuard(database, digests),
     keyConsole: new KeyConsole(database, digests),

@@ -91,7 +91,8 @@ test('inverted constants are computed with a warning that points at them', async
   expect(body.model.warnings).toEqual([
     {
       code: 'inverted-constants',
-      message: 'pKa 1 (9) is greater than pKa 2 (4): species 1 never predominates.',
+      message:
+        'pKa 1 (9) is greater than pKa 2 (4): species 1 never predominates, and others beside it may not either.',
       pointer: '/system/pKa/0',
     },
   ]);

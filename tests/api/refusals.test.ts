@@ -82,7 +82,7 @@ const wrongBodies: [name: string, body: unknown, fault: string][] = [
   [
     'a NUL in a name',
     { system: { ...system, name: 'a\u0000b' }, pH: '7' },
-    '/system/name nul-character',
+    '/system/name unfit-character',
   ],
   ['an empty name', { system: { ...system, name: '  ' }, pH: '7' }, '/system/name out-of-range'],
 ];
@@ -126,6 +126,27 @@ test.each(wrongBytes)('%s is refused in words', async (_name, body, type, status
   expect(answer.body.requestId).toBe(answer.headers['x-request-id']);
 });
 
+test.each(['gzip', 'br', 'deflate', 'x-other'])(
+  'a body with Content-Encoding %s is refused in words',
+  async (encoding) => {
+    const { status, body } = await postWithKey(server, '/v1/fractions')
+      .set({ 'Content-Type': 'application/json', 'Content-Encoding': encoding })
+      .serialize(String)
+      .send('{}');
+    expect([status, body.detail]).toEqual([415, 'Send the body without Content-Encoding.']);
+  },
+);
+
+test('a name that comes twice is refused, not the last one taken', async () => {
+  const { status, body } = await send('{"system":{"pKa":["7"],"pKa":["3"]},"pH":"7"}');
+  expect([status, ...faultsIn(body)]).toEqual([400, '/system/pKa duplicate-field']);
+});
+
+test('a refusal does not throw a large body back', async () => {
+  const { text } = await send(`{"${'k'.repeat(900_000)}":1}`);
+  expect(text.length).toBeLessThan(2_000);
+});
+
 test('deep nesting is refused, not followed', async () => {
   const { status } = await send('['.repeat(400_000) + ']'.repeat(400_000));
   expect(status).toBe(400);
@@ -164,6 +185,17 @@ test('an answer in a form we do not have is a 406', async () => {
     .send({ system, pH: '7' });
   expect(answer.status).toBe(406);
 });
+
+test.each(['0x10', '1e1', '+5', '5.0', '', ' 5', 'true'])(
+  'digits=%s is no whole number in a query',
+  async (digits) => {
+    const path = `/v1/systems/tris/fractions?pH=7&digits=${encodeURIComponent(digits)}`;
+    const { status, body } = await request(server.url)
+      .get(path)
+      .set('Authorization', `Bearer ${server.key}`);
+    expect([status, ...faultsIn(body)]).toEqual([400, '?digits wrong-type']);
+  },
+);
 
 test('a query parameter that nobody reads is a 400', async () => {
   const answer = await postWithKey(server, '/v1/fractions?digits=3').send({ system, pH: '7' });

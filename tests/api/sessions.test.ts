@@ -147,14 +147,17 @@ describe('tokens', () => {
     const first = await open();
     const second = await sessions().refresh(first.refresh);
     expect(second.refresh).not.toBe(first.refresh);
-    await expect(sessions().refresh(second.refresh)).resolves.toBeDefined();
+    await expect(sessions().refresh(second.refresh ?? '')).resolves.toBeDefined();
   });
 
   test('raced within ten seconds stay good', async () => {
     const first = await open();
-    await sessions().refresh(first.refresh);
+    const second = await sessions().refresh(first.refresh);
     after(9);
-    await expect(sessions().refresh(first.refresh)).resolves.toBeDefined();
+    const raced = await sessions().refresh(first.refresh);
+    expect(raced.refresh).toBeUndefined();
+    expect(await sessions().callerOf(raced.access)).toBeDefined();
+    await expect(sessions().refresh(second.refresh ?? '')).resolves.toBeDefined();
   });
 
   test('used again later end the whole session: they were stolen', async () => {
@@ -164,10 +167,20 @@ describe('tokens', () => {
     await expect(sessions().refresh(first.refresh)).rejects.toMatchObject({
       code: 'sign-in-needed',
     });
-    await expect(sessions().refresh(second.refresh)).rejects.toMatchObject({
+    await expect(sessions().refresh(second.refresh ?? '')).rejects.toMatchObject({
       code: 'sign-in-needed',
     });
     expect(await sessions().callerOf(second.access)).toBeUndefined();
+  });
+
+  test('however old, used again end the session', async () => {
+    const first = await open();
+    const second = await sessions().refresh(first.refresh);
+    const third = await sessions().refresh(second.refresh ?? '');
+    after(1);
+    const again = sessions().refresh(first.refresh);
+    await expect(again).rejects.toMatchObject({ code: 'sign-in-needed' });
+    expect(await sessions().callerOf(third.access)).toBeUndefined();
   });
 
   test('die with their session after fourteen days', async () => {

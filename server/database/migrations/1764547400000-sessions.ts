@@ -9,7 +9,7 @@ export class Sessions1764547400000 implements MigrationInterface {
         id uuid PRIMARY KEY,
         person_id uuid NOT NULL REFERENCES people,
         organization_id uuid NOT NULL REFERENCES organizations,
-        refresh_digest bytea NOT NULL UNIQUE,
+        refresh_digest bytea NOT NULL,
         previous_digest bytea,
         rotated_at timestamptz NOT NULL,
         created_at timestamptz NOT NULL,
@@ -17,7 +17,6 @@ export class Sessions1764547400000 implements MigrationInterface {
         ended_at timestamptz
       );
       CREATE INDEX sessions_person ON sessions (person_id);
-      CREATE INDEX sessions_previous ON sessions (previous_digest);
       ALTER TABLE api_keys ADD COLUMN last_used_at timestamptz;
       CREATE INDEX api_keys_newest ON api_keys (organization_id, created_at DESC, id DESC);
       DROP INDEX api_keys_organization;

@@ -1,34 +1,36 @@
 import path from 'node:path';
 import { Piscina } from 'piscina';
-import { Refusal } from '../../refusal';
+import { Queue } from './queue';
 import type { TaskName, TaskRequest } from './tasks';
 
 // The worker stands beside this file, compiled or not as this file is.
 const extension = path.extname(__filename);
 const filename = path.join(__dirname, `worker${extension}`);
 const loader = extension === '.ts' ? { execArgv: ['--require', 'tsx/cjs'] } : {};
-const waitingAtMost = 256;
+
+/** What a call weighs, and whether its caller is still there. */
+export interface Load {
+  readonly cost: number;
+  readonly signal: AbortSignal;
+}
 
 /** Runs the engine in worker threads, never on the event loop. */
 export class ComputePool {
   private readonly pool: Piscina;
+  private readonly queue: Queue;
 
-  constructor(threads?: number) {
-    this.pool = new Piscina({
-      filename,
-      ...loader,
-      ...(threads === undefined ? {} : { minThreads: threads, maxThreads: threads }),
-      maxQueue: waitingAtMost,
-      idleTimeout: 60_000,
-    });
+  constructor(threads: number) {
+    this.queue = new Queue(threads);
+    this.pool = new Piscina({ filename, ...loader, maxThreads: threads, idleTimeout: 60_000 });
   }
 
-  /** The finished body of an answer. Refused with `unavailable` when too many calls wait. */
-  async run<Name extends TaskName>(name: Name, request: TaskRequest<Name>): Promise<Uint8Array> {
-    if (this.pool.queueSize >= waitingAtMost) {
-      throw new Refusal('unavailable', 'Too many calls are waiting. Try again in a second.');
-    }
-    return (await this.pool.run({ name, request })) as Uint8Array;
+  /** The finished body of an answer. Refused with `unavailable` when too much work waits. */
+  run<Name extends TaskName>(
+    name: Name,
+    request: TaskRequest<Name>,
+    { cost, signal }: Load,
+  ): Promise<Uint8Array> {
+    return this.queue.run(cost, signal, () => this.pool.run({ name, request }));
   }
 
   async close(): Promise<void> {

@@ -12,13 +12,15 @@ interface Terms {
   /** Most that the call may cost. */
   readonly mostCost: number;
   readonly asCsv: boolean;
+  /** Aborted when the caller has gone. */
+  readonly signal: AbortSignal;
 }
 
 /** Answers about species fractions: systems are looked up here, the maths is done by workers. */
 export class FractionsService {
   constructor(
     private readonly systems: SystemService,
-    private readonly compute: ComputePool,
+    private readonly compute: Readonly<Record<'keyed' | 'public', ComputePool>>,
   ) {}
 
   /** The finished body. Refused with `invalid-request` for an unknown system, or `over-limit`. */
@@ -34,12 +36,15 @@ export class FractionsService {
     return this.withinCost(resolved(request, new Map([[id, system]])), terms);
   }
 
-  private withinCost(request: ResolvedRequest, { mostCost, asCsv }: Terms): Promise<Uint8Array> {
+  private withinCost(request: ResolvedRequest, terms: Terms): Promise<Uint8Array> {
+    const { reader, mostCost, asCsv, signal } = terms;
     const cost = fractionsCost(request);
-    if (cost > mostCost) {
+    if (cost > mostCost && !request.dryRun) {
       const detail = `The cost, points × species × (digits + 20), is ${cost}; one call may ask for ${mostCost}.`;
       throw new Refusal('over-limit', detail, [{ pointer: '', code: 'cost-over-limit', detail }]);
     }
-    return this.compute.run(asCsv && !request.dryRun ? 'fractionsCsv' : 'fractions', request);
+    const pool = reader === undefined ? this.compute.public : this.compute.keyed;
+    const task = asCsv && !request.dryRun ? 'fractionsCsv' : 'fractions';
+    return pool.run(task, request, { cost: request.dryRun ? 0 : cost, signal });
   }
 }

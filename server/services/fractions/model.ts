@@ -14,7 +14,7 @@ const constantsUsed = ({
 }: ResolvedSystem): ConstantsUsed => ({
   ...(name === undefined ? {} : { name }),
   ...(stored
-    ? { system: { id: stored.id, revision: stored.revision } }
+    ? { system: { id: stored.id, revision: stored.revision }, note: stored.note }
     : { kind: 'thermodynamic' }),
   fullyProtonatedCharge,
   pKa: [...pKa],

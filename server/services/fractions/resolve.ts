@@ -12,6 +12,8 @@ interface Stored {
   readonly revision: number;
   readonly constants: readonly Constant[];
   readonly formulas: readonly (string | null)[];
+  /** What to know before using the constants. */
+  readonly note: string | null;
 }
 
 /** A system to compute with; `stored` where it was named by its id. */
@@ -39,6 +41,7 @@ const resolvedSystem = (system: StoredSystem): ResolvedSystem => ({
     revision: system.revision,
     constants: preferredConstants(system),
     formulas: system.species.map(({ formula }) => formula ?? null),
+    note: system.note,
   },
 });
 

@@ -56,7 +56,7 @@ const inversion = ({ pKa }: ResolvedSystem, i: number): Unplaced => ({
   code: 'inverted-constants',
   message:
     `pKa ${i + 1} (${pKa[i]}) is greater than pKa ${i + 2} (${pKa[i + 1]}): ` +
-    `species ${i + 1} never predominates.`,
+    `species ${i + 1} never predominates, and others beside it may not either.`,
 });
 
 function ofOneSystem(system: ResolvedSystem, place: string): Warning[] {

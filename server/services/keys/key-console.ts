@@ -56,16 +56,18 @@ export class KeyConsole {
     return { id, key, publicId, name, scopes, expiresAt: expiresAt.toISOString() };
   }
 
-  /** Keys, newest first. */
-  async list(person: Member, page: Page): Promise<KeyList> {
-    const query = this.rows(person).limit(page.limit);
+  /** Keys, newest first, and whether there are more. */
+  async list(person: Member, page: Page): Promise<KeyList & { hasMore: boolean }> {
+    const query = this.rows(person).limit(page.limit + 1);
     if (page.after) {
       query.andWhere('(key.createdAt, key.id) < (:createdAt, :afterId)', {
         createdAt: page.after.createdAt,
         afterId: page.after.id,
       });
     }
-    return { items: (await this.fetch(query)).map((row) => this.answer(row)) };
+    const rows = await this.fetch(query);
+    const items = rows.slice(0, page.limit).map((row) => this.answer(row));
+    return { items, hasMore: rows.length > page.limit };
   }
 
   /** One key that this person may see. */

@@ -8,7 +8,7 @@ import { Refusal } from '../../refusal';
 import type { Member, SessionCaller } from '../caller';
 import type { AccessTokens } from './access-token';
 import { passwordIs } from './passwords';
-import { digestOf, makeRefreshToken } from './refresh-token';
+import { digestOf, makeRefreshToken, sessionOfToken } from './refresh-token';
 import type { Attempt, SignInThrottle } from './sign-in-throttle';
 import { accountIn, firstPlace, roleIn } from './standing';
 
@@ -21,6 +21,9 @@ export interface Tokens {
   readonly access: string;
   readonly refresh: string;
 }
+
+type SignedIn = Tokens & { readonly account: AccountAnswer };
+type Renewed = Partial<Tokens> & Omit<SignedIn, 'refresh'>;
 
 interface Parts {
   readonly database: DataSource;
@@ -39,10 +42,7 @@ export class SessionService {
   }
 
   /** Signs in. Unknown person, wrong password and nowhere to belong are one and the same answer. */
-  async signIn({
-    password,
-    ...attempt
-  }: Attempt & { password: string }): Promise<Tokens & { account: AccountAnswer }> {
+  async signIn({ password, ...attempt }: Attempt & { password: string }): Promise<SignedIn> {
     const { database, throttle } = this.parts;
     await throttle.check(attempt);
     const person = await database
@@ -60,35 +60,43 @@ export class SessionService {
     return this.open(person.id, place);
   }
 
-  /** Renews both tokens. The token before, presented late, ends the session: it was stolen. */
-  async refresh(token: string): Promise<Tokens & { account: AccountAnswer }> {
-    const digest = digestOf(token);
+  /**
+   * Renews both tokens. The token before, within ten seconds, is a race of two tabs and gets a new
+   * access token alone. Any other token that names the session is a stolen one: the session ends.
+   */
+  async refresh(token: string): Promise<Renewed> {
+    const id = sessionOfToken(token);
+    if (id === undefined) throw notSignedIn();
     const answer = await this.parts.database.transaction(async (manager) => {
       const session = await manager.getRepository(Session).findOne({
-        where: [
-          { refreshDigest: digest, endedAt: IsNull() },
-          { previousDigest: digest, endedAt: IsNull() },
-        ],
+        where: { id, endedAt: IsNull() },
         lock: { mode: 'pessimistic_write' },
       });
       if (!session || session.expiresAt <= this.now()) return undefined;
-      const isLate = this.now().getTime() - session.rotatedAt.getTime() > graceMs;
-      if (!session.refreshDigest.equals(digest) && isLate) {
-        await manager.update(Session, session.id, { endedAt: this.now() });
+      const use = this.useOf(session, digestOf(token));
+      const account = await accountIn(manager, session.personId, session.organizationId);
+      if (use === 'stolen' || !account) {
+        await manager.update(Session, id, { endedAt: this.now() });
         return undefined;
       }
-      const account = await accountIn(manager, session.personId, session.organizationId);
-      if (!account) return undefined;
-      const refresh = makeRefreshToken();
-      await manager.update(Session, session.id, {
+      const access = this.access(session);
+      if (use === 'race') return { account, access };
+      const refresh = makeRefreshToken(id);
+      await manager.update(Session, id, {
         refreshDigest: digestOf(refresh),
         previousDigest: session.refreshDigest,
         rotatedAt: this.now(),
       });
-      return { account, refresh, access: this.access(session) };
+      return { account, access, refresh };
     });
     if (!answer) throw notSignedIn();
     return answer;
+  }
+
+  private useOf(session: Session, digest: Buffer): 'renewal' | 'race' | 'stolen' {
+    if (session.refreshDigest.equals(digest)) return 'renewal';
+    const isRecent = this.now().getTime() - session.rotatedAt.getTime() <= graceMs;
+    return isRecent && session.previousDigest?.equals(digest) ? 'race' : 'stolen';
   }
 
   /** Ends a session; its tokens are dead at their next use. */
@@ -142,10 +150,11 @@ export class SessionService {
 
   private async open(personId: string, organizationId: string) {
     const account = await this.account({ personId, organizationId });
-    const refresh = makeRefreshToken();
+    const id = randomUUID();
+    const refresh = makeRefreshToken(id);
     const now = this.now();
     const session = {
-      id: randomUUID(),
+      id,
       personId,
       organizationId,
       refreshDigest: digestOf(refresh),

@@ -29,7 +29,7 @@ export class SignInThrottle {
     for (const [row, most] of this.rows(attempt)) {
       if ((await this.failures.hitsOf(row)) >= most) {
         const detail = 'Too many failed attempts. Wait a quarter of an hour.';
-        throw new Refusal('too-many-requests', detail);
+        throw new Refusal('too-many-requests', detail, undefined, windowMs / 1_000);
       }
     }
   }

@@ -155,10 +155,10 @@ test('an unknown system is a 400 that points at its id', async () => {
 test('cost counts the protons of the system that is named', async () => {
   const pH = { from: '0', to: '14', step: '0.01' };
   const { body } = await ask({ system: { id: 'edta' }, pH, digits: 34, dryRun: true });
-  expect(body.cost).toBe(1401 * 7 * 34);
+  expect(body.cost).toBe(1401 * 7 * 54);
   const openly = await request(server.url)
     .post('/v1/public/fractions')
-    .send({ system: { id: 'edta' }, pH, digits: 60 });
+    .send({ system: { id: 'edta' }, pH: { ...pH, step: '0.005' }, digits: 60 });
   expect([openly.status, openly.body.errors[0].code]).toEqual([422, 'cost-over-limit']);
 });
 

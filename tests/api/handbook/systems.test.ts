@@ -155,7 +155,7 @@ describe('refusals of a list', () => {
     [{ limit: '101' }, '?limit out-of-range'],
     [{ limit: 'ten' }, '?limit wrong-type'],
     [{ query: '' }, '?query out-of-range'],
-    [{ query: 'a\u0000' }, '?query nul-character'],
+    [{ query: 'a\u0000' }, '?query unfit-character'],
     [{ query: 'x'.repeat(101) }, '?query out-of-range'],
     [{ q: 'acid' }, '?q unknown-field'],
   ];

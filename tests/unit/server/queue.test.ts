@@ -1,0 +1,65 @@
+import { Queue } from '../../../server/services/compute/queue';
+
+/** Work that ends when told to. */
+function work() {
+  let end = () => {};
+  const ended = new Promise<void>((resolve) => {
+    end = resolve;
+  });
+  return { run: () => ended, end };
+}
+const here = () => new AbortController().signal;
+
+test('so many work at once, the others in the order they came', async () => {
+  const queue = new Queue(2);
+  const started: number[] = [];
+  const works = [0, 1, 2, 3].map(work);
+  const runs = works.map(({ run }, i) =>
+    queue.run(1, here(), () => {
+      started.push(i);
+      return run();
+    }),
+  );
+  await Promise.resolve();
+  expect(started).toEqual([0, 1]);
+  works[1]?.end();
+  await runs[1];
+  expect(started).toEqual([0, 1, 2]);
+  for (const { end } of works) end();
+  await Promise.all(runs);
+  expect(started).toEqual([0, 1, 2, 3]);
+});
+
+test('work that fails gives its place to the next', async () => {
+  const queue = new Queue(1);
+  const failing = queue.run(1, here(), () => Promise.reject(new Error('no')));
+  const next = queue.run(1, here(), () => Promise.resolve('done'));
+  await expect(failing).rejects.toThrow('no');
+  await expect(next).resolves.toBe('done');
+});
+
+test('a caller who goes away leaves the queue', async () => {
+  const queue = new Queue(1);
+  const first = work();
+  const running = queue.run(1, here(), first.run);
+  const gone = new AbortController();
+  const never = jest.fn();
+  const waiting = queue.run(1, gone.signal, never);
+  gone.abort();
+  await expect(waiting).rejects.toMatchObject({ code: 'unavailable' });
+  first.end();
+  await running;
+  expect(never).not.toHaveBeenCalled();
+});
+
+test('more waiting work than some seconds’ worth is refused', async () => {
+  const queue = new Queue(1);
+  const first = work();
+  const running = [queue.run(12_000_000, here(), first.run)];
+  for (let i = 0; i < 3; i += 1)
+    running.push(queue.run(12_000_000, here(), () => Promise.resolve()));
+  const refused = queue.run(1, here(), () => Promise.resolve());
+  await expect(refused).rejects.toMatchObject({ code: 'unavailable' });
+  first.end();
+  await Promise.all(running);
+});
