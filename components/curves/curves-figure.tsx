@@ -64,7 +64,7 @@ export function CurvesFigure(props: CurvesFigureProps) {
           )}
           {layout.charge && <ChargeLine {...shared} rect={layout.charge} />}
           {layout.fractions && (
-            <FractionLines {...shared} rect={layout.fractions} cursor={placing} />
+            <FractionLines {...shared} rect={layout.fractions} cursor={cursor} placing={placing} />
           )}
           <PhAxis
             x={x}

@@ -1,9 +1,5 @@
-import type { z } from 'zod';
-import type { systemInFull } from '../../shared/system';
 import { examples } from './examples';
-
-/** A system as the contract takes it: decimals as text, nothing rounded. */
-export type SystemText = z.input<typeof systemInFull>;
+import type { SystemText } from './system-text';
 
 /** What can be drawn on the one pH axis. */
 export const layers = ['fractions', 'predominance', 'charge'] as const;

@@ -1,4 +1,4 @@
-import type { SystemText } from './curves-state';
+import type { SystemText } from './system-text';
 
 /** A system to look at before any is typed: its constants, where they are from, how it is written. */
 export interface Example {

@@ -1,5 +1,6 @@
-import type { Choice, SystemText } from './curves-state';
+import type { Choice } from './curves-state';
 import { exampleOf, systemOf } from './curves-state';
+import type { SystemText } from './system-text';
 
 /** `^2-`, `^+`, or nothing for a neutral form. */
 const chargeSign = (charge: number) =>
