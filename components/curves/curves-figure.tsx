@@ -113,5 +113,5 @@ function useCursorWhenDrawn(drawn: DrawnCurve, cursor: number): number {
 }
 
 const styles = StyleSheet.create({
-  plot: webStyle({ touchAction: 'pan-y', cursor: 'ew-resize', userSelect: 'none' }),
+  plot: webStyle({ touchAction: 'pan-y pinch-zoom', cursor: 'ew-resize', userSelect: 'none' }),
 });
