@@ -13,10 +13,14 @@ interface CurveNamesProps {
   readonly formulas: readonly string[];
   /** Index of the form that predominates at the cursor, set bold. */
   readonly strong: number;
+  /** x of the cursor, px: its own marker takes the place of one that it comes near. */
+  readonly cursor: number;
 }
 
+const markerRoom = 14;
+
 /** Names at their curves, each with its marker and, where it stands away, a leader. */
-export function CurveNames({ names, formulas, strong }: CurveNamesProps) {
+export function CurveNames({ names, formulas, strong, cursor }: CurveNamesProps) {
   const { colours, series } = useTheme();
   return (
     <>
@@ -32,13 +36,15 @@ export function CurveNames({ names, formulas, strong }: CurveNamesProps) {
               strokeWidth={1}
             />
           )}
-          <Marker
-            shape={series(key).marker}
-            x={anchor.x}
-            y={anchor.y}
-            colour={series(key).colour}
-            ring={colours.page}
-          />
+          {Math.abs(anchor.x - cursor) > markerRoom && (
+            <Marker
+              shape={series(key).marker}
+              x={anchor.x}
+              y={anchor.y}
+              colour={series(key).colour}
+              ring={colours.page}
+            />
+          )}
           <FormulaText
             formula={formulas[key] ?? ''}
             x={box.x}

@@ -50,7 +50,7 @@ const costs = {
 const unnamed = 220;
 const anchorRoom = 14;
 const anchorStep = 4;
-/** A marker at the very edge would be cut in half, px. */
+/** A marker nearer to the edge or to what is written would be cut or cover it, px. */
 const edgeRoom = 8;
 
 /**
@@ -91,13 +91,16 @@ function cheapest(
 ): PlacedName | undefined {
   const { peak, columns, left } = name.curve;
   const half = (panel.zero - peak.y) / 2;
-  const inside = ({ x }: Point) => x >= left + edgeRoom && x <= right(panel.bounds) - edgeRoom;
+  const clear = ({ x, y }: Point) =>
+    x >= left + edgeRoom &&
+    x <= right(panel.bounds) - edgeRoom &&
+    !panel.taken?.some((box) => overlaps(inflate(box, edgeRoom), { x, y, width: 0, height: 0 }));
   const anchors = columns
     .map((y, i) => ({ x: left + i, y }))
     .filter(({ y }, i) => i % anchorStep === 0 && panel.zero - y >= half);
   let best: Candidate | undefined;
   let least: number = unnamed;
-  for (const anchor of [peak, ...anchors].filter(inside)) {
+  for (const anchor of [peak, ...anchors].filter(clear)) {
     const far = distance(anchor, peak);
     if (far >= least) continue;
     for (const candidate of candidatesAt(anchor, name)) {

@@ -11,12 +11,14 @@ export interface StairLabel {
 const inset = 6;
 const endInset = 3;
 const cursorGap = 5;
+/** Keeps rounding from counting a label that was just moved away as hit. */
+const epsilon = 0.01;
 /** With lower steps than this, a name that leaves its tread could meet another, px. */
 const namedDrop = 16;
 const nameBaseline = 15;
 
 const hits = (cursor: number, x: number, width: number) =>
-  cursor > x - cursorGap && cursor < x + width + cursorGap;
+  cursor > x - cursorGap + epsilon && cursor < x + width + cursorGap;
 
 interface NameOptions {
   readonly widthOf: (index: number) => number;
@@ -53,6 +55,8 @@ interface MarkOptions {
 }
 
 const markGap = 3;
+/** A value farther from its tick than this would be taken for another’s, px. */
+const markReach = 20;
 
 /**
  * The constants along the base, each right of its tick. One that the cursor crosses stands right of
@@ -69,8 +73,10 @@ export function stairMarks(stair: Stair, { marks, cursor, after }: MarkOptions):
     const clearOfLast = (x: number) => x > (marks[i - 1]?.x ?? -Infinity) + 1;
     const plain = tick + markGap;
     const toLeft = tick - markGap - width;
-    const x = [plain, cursor + cursorGap, toLeft].find((at, k) =>
-      k === 1 ? hits(cursor, plain, width) && fits(at) : free(at) && clearOfLast(at),
+    const beside = cursor + cursorGap;
+    const besideIsNear = hits(cursor, plain, width) && beside - tick <= markReach;
+    const x = [plain, ...(besideIsNear ? [beside] : []), toLeft].find(
+      (at) => free(at) && clearOfLast(at),
     );
     const chosen = x ?? (fits(plain) ? plain : undefined);
     if (chosen === undefined) return;

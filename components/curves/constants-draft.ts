@@ -1,6 +1,6 @@
 import { limits } from '../../shared/limits';
 import { systemInFull } from '../../shared/system';
-import type { SystemText } from './curves-state';
+import type { SystemText } from './system-text';
 import { plainDecimal } from './ph-steps';
 import { wellFormed } from './well-formed';
 

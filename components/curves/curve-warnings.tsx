@@ -5,7 +5,6 @@ import { trueMinus } from './rounded';
 import type { Curves } from './use-curves';
 
 const titles: Readonly<Record<Warning['code'], string>> = {
-  'system-note': 'Worth knowing',
   'inverted-constants': 'Computed as given',
   'estimated-constant': 'An estimate',
   'constants-at-their-medium': 'Constants of their own medium',

@@ -64,7 +64,7 @@ export function CurvesFigure(props: CurvesFigureProps) {
           )}
           {layout.charge && <ChargeLine {...shared} rect={layout.charge} />}
           {layout.fractions && (
-            <FractionLines {...shared} rect={layout.fractions} cursor={placing} />
+            <FractionLines {...shared} rect={layout.fractions} cursor={cursor} placing={placing} />
           )}
           <PhAxis
             x={x}
@@ -113,5 +113,5 @@ function useCursorWhenDrawn(drawn: DrawnCurve, cursor: number): number {
 }
 
 const styles = StyleSheet.create({
-  plot: webStyle({ touchAction: 'pan-y', cursor: 'ew-resize', userSelect: 'none' }),
+  plot: webStyle({ touchAction: 'pan-y pinch-zoom', cursor: 'ew-resize', userSelect: 'none' }),
 });

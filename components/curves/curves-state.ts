@@ -1,8 +1,6 @@
 import type { z } from 'zod';
-import type { systemInFull, systemInput } from '../../shared/system';
-
-/** A system as the contract takes it: decimals as text, nothing rounded. */
-export type SystemText = z.input<typeof systemInFull>;
+import type { systemInput } from '../../shared/system';
+import type { SystemText } from './system-text';
 
 /** What can be drawn on the one pH axis. */
 export const layers = ['fractions', 'predominance', 'charge'] as const;

@@ -1,7 +1,8 @@
 import type { StairRange } from '../chart/stair';
 import type { FractionsAnswer } from '../../shared/fractions';
 import type { Constant } from '../../shared/constant';
-import type { Choice, SystemText } from './curves-state';
+import type { Choice } from './curves-state';
+import type { SystemText } from './system-text';
 import { givenConstants } from './curves-state';
 import type { Curve } from './follow-curve';
 import { curveOf } from './follow-curve';

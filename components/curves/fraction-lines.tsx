@@ -1,4 +1,4 @@
-import { memo, useMemo } from 'react';
+import { useMemo } from 'react';
 import { CurveNames, nameHeight, nameSize } from '../chart/curve-names';
 import type { Rect } from '../chart/geometry';
 import { bottom } from '../chart/geometry';
@@ -37,14 +37,15 @@ interface FractionLinesProps {
   readonly rect: Rect;
   readonly x: Scale;
   readonly strong: number;
-  /** Where the cursor stood when the curve came, px: names keep out of its way. */
   readonly cursor: number;
+  /** Where the cursor stood when the curve came, px: names keep out of its way. */
+  readonly placing: number;
   readonly compact: boolean;
 }
 
 /** The fraction of each form over pH, with its name at the curve. */
-export const FractionLines = memo(function FractionLines(props: FractionLinesProps) {
-  const { drawn, rect, x, strong, cursor, compact } = props;
+export function FractionLines(props: FractionLinesProps) {
+  const { drawn, rect, x, strong, cursor, placing, compact } = props;
   const { series } = useTheme();
   const lines = useMemo(() => {
     const y = alphaScale(rect);
@@ -72,11 +73,19 @@ export const FractionLines = memo(function FractionLines(props: FractionLinesPro
         {
           bounds: { ...rect, y: rect.y - headroom, height: rect.height + headroom },
           zero: bottom(rect),
-          cursor,
+          cursor: placing,
           taken: compact ? numerals(rect) : [],
         },
       ),
-    [lines, drawn, rect, cursor, compact],
+    [lines, drawn, rect, placing, compact],
+  );
+  // Drawn once, not at each move of the cursor: there may be dozens.
+  const drawnLines = useMemo(
+    () =>
+      lines.map(({ index, d }) => (
+        <SeriesLine key={index} d={d} style={series(index)} strong={index === strong} />
+      )),
+    [lines, series, strong],
   );
   return (
     <>
@@ -92,10 +101,8 @@ export const FractionLines = memo(function FractionLines(props: FractionLinesPro
           kind: value === 0 ? 'axis' : value === 1 ? 'bound' : 'grid',
         }))}
       />
-      {lines.map(({ index, d }) => (
-        <SeriesLine key={index} d={d} style={series(index)} strong={index === strong} />
-      ))}
-      <CurveNames names={names} formulas={drawn.formulas} strong={strong} />
+      {drawnLines}
+      <CurveNames names={names} formulas={drawn.formulas} strong={strong} cursor={cursor} />
     </>
   );
-});
+}

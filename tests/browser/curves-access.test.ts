@@ -71,7 +71,7 @@ test.each([
       if (!element || element === document.body) return undefined;
       const { outlineStyle, outlineWidth } = getComputedStyle(element);
       const { top, bottom, width } = element.getBoundingClientRect();
-      const name = element.getAttribute('aria-label') ?? element.textContent ?? '';
+      const name = element.getAttribute('aria-label') ?? element.textContent;
       const labelled = document.getElementById(element.getAttribute('aria-labelledby') ?? '');
       return {
         name: `${element.getAttribute('role') ?? element.tagName} ${labelled?.textContent ?? name}`,

@@ -68,7 +68,7 @@ export async function startTestServer({ withApp = false } = {}): Promise<TestSer
     },
     close: async () => {
       await Promise.all([server, ...others].map((running) => running.close()));
-      await services.compute.close();
+      await services.close();
       await database.destroy();
       await drop();
     },

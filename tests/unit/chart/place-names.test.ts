@@ -56,6 +56,11 @@ describe('names at the curves', () => {
     for (const { box } of placeNames(phosphoric, { ...panel, taken })) {
       expect(taken.some((other) => overlaps(other, box))).toBe(false);
     }
+    for (const { anchor } of placeNames(phosphoric, { ...panel, taken })) {
+      expect(taken.some((other) => overlaps(other, { ...anchor, width: 0, height: 0 }))).toBe(
+        false,
+      );
+    }
   });
 
   test('a crowd is named only at its edges', () => {

@@ -118,6 +118,12 @@ describe('constants along the base', () => {
     expect(at(30, [mark(0, 20), mark(1, 60)])).toMatchObject({ x: 23, halo: true });
   });
 
+  test('none is moved so far that it would be read at another tick', () => {
+    const marks = [mark(0, 100), mark(1, 180)];
+    const [label] = stairMarks(stair, { marks, cursor: 135, after: 16 });
+    expect(label).toMatchObject({ x: 100 - 3 - 36, halo: false });
+  });
+
   test('the last one stands left of its tick where the plot ends', () => {
     const [label] = stairMarks(stair, { marks: [mark(0, 350)], cursor: 0, after: 16 });
     expect(label?.x).toBe(350 - 3 - 36);
