@@ -30,7 +30,7 @@ const keysAt = async (page: Page, name: string): Promise<void> => {
     const input = document.activeElement;
     const id = input?.getAttribute('aria-activedescendant');
     const active = id ? document.getElementById(id) : null;
-    return input?.getAttribute('role') === 'combobox' && active?.textContent?.startsWith(wanted);
+    return input?.getAttribute('role') === 'combobox' && active?.textContent.startsWith(wanted);
   }, name);
 };
 
