@@ -24,6 +24,16 @@ const option = (page: Page, name: string | RegExp) => page.getByRole('option', {
 const drawn = (page: Page, name: string) =>
   page.getByRole('heading', { level: 1, name: new RegExp(name) }).waitFor();
 
+/** Sends the focus to the field, whose text is then selected as a whole. */
+async function enterField(page: Page): Promise<void> {
+  await field(page).focus();
+  await page.waitForFunction(() => {
+    const input = document.activeElement;
+    if (!(input instanceof HTMLInputElement)) return false;
+    return input.selectionStart === 0 && input.selectionEnd === input.value.length;
+  });
+}
+
 /** Waits until the option that the keys are at is this one, as a screen reader follows them. */
 const keysAt = async (page: Page, name: string): Promise<void> => {
   await page.waitForFunction((wanted) => {
@@ -80,7 +90,7 @@ describe('the search by keyboard', () => {
 
   test('typing replaces what is chosen and stands at the best match', async () => {
     const { page } = await openCurves(server, wide);
-    await field(page).focus();
+    await enterField(page);
     await page.keyboard.type('glycine');
     await keysAt(page, 'Glycine');
     expect(await field(page).inputValue()).toBe('glycine');
@@ -98,7 +108,7 @@ describe('the search by keyboard', () => {
       await held;
       await route.continue();
     });
-    await field(page).focus();
+    await enterField(page);
     await page.keyboard.type('boric');
     await page.keyboard.press('Enter');
     release();
@@ -107,7 +117,7 @@ describe('the search by keyboard', () => {
 
   test('Escape closes the list, and leaving the field keeps the system', async () => {
     const { page } = await openCurves(server, wide);
-    await field(page).focus();
+    await enterField(page);
     await page.keyboard.type('citric');
     await option(page, /^Citric acid/).waitFor();
     await page.keyboard.press('Escape');
