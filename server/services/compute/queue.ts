@@ -23,14 +23,16 @@ export class Queue {
     try {
       return await work();
     } finally {
-      this.working -= 1;
-      this.waiting.shift()?.start();
+      const next = this.waiting.shift();
+      if (next) next.start();
+      else this.working -= 1;
     }
   }
 
   private async turn(cost: number, signal: AbortSignal): Promise<void> {
+    // Whoever waits is handed the place of one that is done.
     if (this.working >= this.places) await this.wait(cost, signal);
-    this.working += 1;
+    else this.working += 1;
   }
 
   private wait(cost: number, signal: AbortSignal): Promise<void> {

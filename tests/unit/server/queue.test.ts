@@ -8,6 +8,8 @@ function work() {
   });
   return { run: () => ended, end };
 }
+/** Every promise that can go on has gone on. */
+const settled = () => new Promise((resolve) => setImmediate(resolve));
 const here = () => new AbortController().signal;
 
 test('so many work at once, the others in the order they came', async () => {
@@ -20,10 +22,11 @@ test('so many work at once, the others in the order they came', async () => {
       return run();
     }),
   );
-  await Promise.resolve();
+  await settled();
   expect(started).toEqual([0, 1]);
   works[1]?.end();
   await runs[1];
+  await settled();
   expect(started).toEqual([0, 1, 2]);
   for (const { end } of works) end();
   await Promise.all(runs);
