@@ -29,7 +29,7 @@ interface Typing {
 const resting: Typing = { text: undefined, open: false, moved: undefined };
 const shownAtMost = 20;
 /** px; a column of inputs is narrower than a formula and its constants. */
-const leastWidth = 320;
+const leastWidth = 280;
 
 /** Finds a system while it is typed. */
 export function SystemCombobox({ label, value, onPick, onTypeOwn }: SystemComboboxProps) {

@@ -4,6 +4,7 @@ import { StyleSheet, View } from 'react-native';
 import { Icon } from '../ui/icon';
 import { space } from '../ui/theme';
 import { useLayout } from '../ui/use-layout';
+import { useScrollKept } from '../ui/use-scroll-kept';
 import { Words } from '../ui/words';
 
 /**
@@ -12,11 +13,11 @@ import { Words } from '../ui/words';
  */
 export function SystemColumn({ children }: { readonly children: ReactNode }) {
   const { rail, readOutAside: beside } = useLayout();
+  useScrollKept();
   const column = useRef<HTMLElement>(null);
   useEffect(() => {
     const isOpened = document.activeElement === document.body;
     if (!beside || isOpened) return;
-    window.scrollTo(0, 0);
     // After the shell has sent the focus to the page, whose first part is the list.
     queueMicrotask(() => column.current?.focus({ preventScroll: true }));
   }, [beside]);

@@ -52,5 +52,5 @@ const styles = StyleSheet.create({
     ...webStyle({ position: 'sticky', top: 0, height: '100dvh', overflowY: 'auto' }),
   },
   head: { minHeight: 76, justifyContent: 'center' },
-  detail: { flex: 1, minWidth: 0 },
+  detail: { flex: 1, minWidth: 520 },
 });

@@ -4,6 +4,7 @@ import { Page } from '../shell/page';
 import { Empty } from '../ui/empty';
 import { space } from '../ui/theme';
 import { useLayout } from '../ui/use-layout';
+import { useScrollKept } from '../ui/use-scroll-kept';
 import { SystemsList } from './systems-list';
 import { useSearchText } from './use-search-text';
 
@@ -15,6 +16,7 @@ export function SystemsScreen() {
 
 function ListPage() {
   const [text, setText] = useSearchText(true);
+  useScrollKept();
   return (
     <Page title="Systems">
       <View style={styles.list}>

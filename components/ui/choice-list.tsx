@@ -61,10 +61,13 @@ export function ChoiceList<Value extends string>({
     visualViewport?.addEventListener('resize', place);
     window.addEventListener('resize', place);
     window.addEventListener('scroll', place, true);
+    // A sheet may still be on its way up.
+    window.addEventListener('animationend', place);
     return () => {
       visualViewport?.removeEventListener('resize', place);
       window.removeEventListener('resize', place);
       window.removeEventListener('scroll', place, true);
+      window.removeEventListener('animationend', place);
     };
   }, [anchor, leastWidth]);
 

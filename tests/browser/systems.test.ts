@@ -176,6 +176,28 @@ describe('the list', () => {
     expect(server.logs.join('')).not.toContain('#find');
   });
 
+  test('is where it was on the way back; a system begins at its top, read before or not', async () => {
+    const { page } = await openSystems(phone);
+    const stands = (y: number) => page.waitForFunction((wanted) => window.scrollY === wanted, y);
+    await link(page, 'Acetic acid').scrollIntoViewIfNeeded();
+    await page.waitForFunction(() => window.scrollY > 1000);
+    const before = await page.evaluate(() => window.scrollY);
+    for (const visit of ['first', 'second']) {
+      await link(page, 'Acetic acid').tap();
+      await title(page, 'Acetic acid');
+      await page.getByRole('slider', { name: 'pH cursor' }).waitFor();
+      expect([visit, await page.evaluate(() => window.scrollY)]).toEqual([visit, 0]);
+      await page.goBack();
+      await title(page, 'Systems');
+      await stands(before);
+    }
+    await page.getByRole('navigation').getByRole('link', { name: 'Notes' }).tap();
+    await page.waitForURL(`${server.url}/notes`);
+    await page.getByRole('navigation').getByRole('link', { name: 'Systems' }).tap();
+    await title(page, 'Systems');
+    await stands(0);
+  });
+
   test('stays beside the system on a wide screen, where the focus goes', async () => {
     const { page } = await openSystems(wide);
     await search(page).fill('phosph');
