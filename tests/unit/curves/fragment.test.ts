@@ -4,7 +4,7 @@ import { firstState, givenConstants, layers, views } from '../../../components/c
 import { rangeOf } from '../../../components/curves/curve-grid';
 import { formatFragment, parseFragment } from '../../../components/curves/fragment';
 import { pHAt } from '../../../components/curves/ph-steps';
-import { wellFormed } from '../../../components/curves/well-formed';
+import { text } from '../../../shared/text';
 
 const pKa = fc
   .record({ whole: fc.integer({ min: -49, max: 69 }), decimals: fc.integer({ min: 0, max: 999 }) })
@@ -12,8 +12,8 @@ const pKa = fc
 
 const name = fc
   .string({ unit: 'binary', minLength: 1, maxLength: 60 })
-  .map((text) => wellFormed(text).replaceAll('\u0000', '').trim())
-  .filter((text) => text !== '' && text.length <= 200);
+  .map((written) => written.replace(/[\p{Cc}\p{Cs}\p{Bidi_Control}]/gu, '').trim())
+  .filter((written) => text(200).safeParse(written).success);
 
 const typed = fc.record({
   kind: fc.constant('typed' as const),
