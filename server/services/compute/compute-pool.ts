@@ -21,7 +21,13 @@ export class ComputePool {
 
   constructor(threads: number) {
     this.queue = new Queue(threads);
-    this.pool = new Piscina({ filename, ...loader, minThreads: 1, maxThreads: threads, idleTimeout: 60_000 });
+    this.pool = new Piscina({
+      filename,
+      ...loader,
+      minThreads: 1,
+      maxThreads: threads,
+      idleTimeout: 60_000,
+    });
   }
 
   /** The finished body of an answer. Refused with `unavailable` when too much work waits. */
