@@ -1,4 +1,4 @@
-import { useRef } from 'react';
+import { useEffect, useRef } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { useSystemSearch } from '../handbook/handbook-queries';
 import { Button } from '../ui/button';
@@ -19,6 +19,8 @@ import { SystemsTable } from './systems-table';
 
 const pageSize = 50;
 
+type Search = ReturnType<typeof useSystemSearch>;
+
 interface SystemsListProps {
   readonly text: string;
   readonly onText: (text: string) => void;
@@ -33,6 +35,7 @@ export function SystemsList({ text, onText, chosen }: SystemsListProps) {
   const search = useSystemSearch(text, pageSize);
   const { systems, query, error, isFetching, hasNextPage, isFetchingNextPage } = search;
   const retry = search.isFetchNextPageError ? search.fetchNextPage : search.refetch;
+  const more = useMore(search);
   const List = rail ? SystemsTable : SystemCards;
   return (
     <View style={styles.list}>
@@ -55,7 +58,9 @@ export function SystemsList({ text, onText, chosen }: SystemsListProps) {
       {systems && systems.length > 0 && <List systems={systems} chosen={chosen} />}
       {systems && (
         <View style={styles.foot}>
-          {hasNextPage && <More search={search} shown={systems.map(({ id }) => id)} />}
+          {hasNextPage && (
+            <Button label={isFetchingNextPage ? 'Fetching more …' : 'Show more'} onPress={more} />
+          )}
           <View role="status" style={systems.length === 0 && styles.said}>
             <Words kind="help">
               {isFetchingNextPage ? '' : countInWords(systems.length, hasNextPage, query)}
@@ -67,32 +72,26 @@ export function SystemsList({ text, onText, chosen }: SystemsListProps) {
   );
 }
 
-interface MoreProps {
-  readonly search: ReturnType<typeof useSystemSearch>;
-  readonly shown: readonly string[];
-}
-
-/** Fetches the next page; the focus goes to the first of what came, not to where the button was. */
-function More({ search, shown }: MoreProps) {
-  const pressed = useRef(false);
-  const more = async () => {
-    if (pressed.current) return;
-    pressed.current = true;
-    const { data } = await search.fetchNextPage();
-    pressed.current = false;
-    const all = data?.pages.flatMap(({ items }) => items) ?? [];
-    const first = all[shown.length];
-    if (!first) return;
-    requestAnimationFrame(() =>
-      document.getElementById(systemLinkId(first.id))?.focus({ preventScroll: true }),
-    );
+/**
+ * Fetches the next page; once it is drawn the focus goes to the first of what came, not to where the
+ * button was. What is awaited is the drawn row, not the answer: the row comes later.
+ */
+function useMore({ systems, query, isFetchingNextPage, fetchNextPage }: Search) {
+  const awaited = useRef<number>(undefined);
+  useEffect(() => {
+    awaited.current = undefined;
+  }, [query]);
+  useEffect(() => {
+    const fresh = awaited.current === undefined ? undefined : systems?.[awaited.current];
+    if (!fresh) return;
+    awaited.current = undefined;
+    document.getElementById(systemLinkId(fresh.id))?.focus({ preventScroll: true });
+  }, [systems]);
+  return () => {
+    if (isFetchingNextPage) return;
+    awaited.current = systems?.length;
+    void fetchNextPage();
   };
-  return (
-    <Button
-      label={search.isFetchingNextPage ? 'Fetching more …' : 'Show more'}
-      onPress={() => void more()}
-    />
-  );
 }
 
 const styles = StyleSheet.create({
