@@ -6,8 +6,12 @@ import { requireNode } from './lib/node-version.mjs';
 import { installPackages } from './lib/packages.mjs';
 import { inRoot } from './lib/paths.mjs';
 import { requireOwnFolders } from './lib/privileges.mjs';
+import { findProgram } from './lib/program.mjs';
 import { say, step } from './lib/steps.mjs';
 import { throwAwayCluster } from './lib/throw-away-cluster.mjs';
+
+/** Runs the calls that are copied from the pages, as a pipeline would. */
+const curl = { names: ['curl'], packageName: 'curl', what: 'curl, which runs the copied calls,' };
 
 let counts = { passed: 0, failed: 1, skipped: 0 };
 
@@ -22,6 +26,7 @@ await command(
       return `${database.major} on 127.0.0.1:${database.port}`;
     });
     const browser = await step('Chromium', findChromium);
+    await step('curl', () => findProgram(curl));
     await step('Server', buildServer);
     await step('Web app', buildWeb);
     say();
