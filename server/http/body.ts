@@ -2,6 +2,7 @@ import { isUtf8 } from 'node:buffer';
 import express, { type Request, type RequestHandler, type Response } from 'express';
 import { limits } from '../../shared/limits';
 import { Refusal } from '../refusal';
+import { faultsAtMost } from './faults';
 import { silentAlterations } from './json-text';
 
 const isJson = /^application\/json\s*(?:;\s*charset\s*=\s*"?([^\s;"]+)"?\s*)?$/i;
@@ -34,7 +35,7 @@ function read(body: unknown): unknown {
   if (!isUtf8(buffer)) throw new Refusal('malformed-json', 'The body is not valid UTF-8.');
   const text = buffer.toString();
   const value = parse(text);
-  const errors = silentAlterations(text).slice(0, 50);
+  const errors = silentAlterations(text).slice(0, faultsAtMost);
   if (errors.length > 0) {
     throw new Refusal('invalid-request', 'Parts of the body would be altered silently.', errors);
   }

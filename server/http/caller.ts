@@ -3,6 +3,7 @@ import { roles, scopesOfRole, type Role } from '../../shared/scopes';
 import { Refusal } from '../refusal';
 import type { Services } from '../services';
 import type { Caller } from '../services/caller';
+import { notSignedIn } from '../services/sessions/session-service';
 import { bearerOf } from './bearer';
 import type { Access } from './operation';
 import { requireOwnOrigin } from './origin';
@@ -17,14 +18,12 @@ export interface OwnPages {
 const notYourRole = (allowed: readonly Role[]) =>
   new Refusal('role-insufficient', `This is for whoever is ${allowed.join(' or ')} here.`);
 
-const signIn = () => new Refusal('sign-in-needed', 'Sign in, then try again.');
-
 async function sessionOf(request: Request, services: Services, pages: OwnPages) {
   const { access } = pages.cookies.read(request);
   if (access === undefined) return undefined;
   requireOwnOrigin(request, pages.origins);
   const caller = await services.sessions.callerOf(access);
-  if (!caller) throw signIn();
+  if (!caller) throw notSignedIn();
   return caller;
 }
 
@@ -50,7 +49,7 @@ export async function callerOf(
       throw new Refusal('sign-in-needed', 'Keys cannot do this: it takes a person, signed in.');
     }
     const person = await sessionOf(request, services, pages);
-    if (!person) throw signIn();
+    if (!person) throw notSignedIn();
     if (!access.roles.includes(person.role)) throw notYourRole(access.roles);
     return person;
   }

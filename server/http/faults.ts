@@ -1,17 +1,10 @@
 import type { z } from 'zod';
 import { decimalFaults } from '../../shared/decimal';
 import type { Fault } from '../../shared/problem';
+import { jsonPointer } from './json-pointer';
 
 type Issue = z.core.$ZodIssue;
 type Path = readonly PropertyKey[];
-
-/** RFC 6901. */
-const pointerLongest = 200;
-const pointerOf = (path: Path) =>
-  path
-    .map((part) => `/${String(part).replaceAll('~', '~0').replaceAll('/', '~1')}`)
-    .join('')
-    .slice(0, pointerLongest);
 
 const ownCode = (issue: Issue): string | undefined => {
   const code: unknown = issue.code === 'custom' ? issue.params?.code : undefined;
@@ -52,7 +45,7 @@ function meantBranch(branches: readonly (readonly Issue[])[]) {
 function faultsOfIssue(issue: Issue, parents: Path): Fault[] {
   const path = [...parents, ...issue.path];
   if (isMissing(issue)) {
-    return [{ pointer: pointerOf(path), code: 'missing', detail: 'This field is needed.' }];
+    return [{ pointer: jsonPointer(path), code: 'missing', detail: 'This field is needed.' }];
   }
   if (issue.code === 'invalid_union') {
     const branch = meantBranch(issue.errors);
@@ -60,15 +53,16 @@ function faultsOfIssue(issue: Issue, parents: Path): Fault[] {
   }
   if (issue.code === 'unrecognized_keys') {
     return issue.keys.map((key) => ({
-      pointer: pointerOf([...path, key]),
+      pointer: jsonPointer([...path, key]),
       code: 'unknown-field',
       detail: 'This operation does not take this field.',
     }));
   }
-  return [{ pointer: pointerOf(path), code: codeOf(issue), detail: issue.message }];
+  return [{ pointer: jsonPointer(path), code: codeOf(issue), detail: issue.message }];
 }
 
-const faultsAtMost = 50;
+/** A body can be wrong in thousands of places; this many are told. */
+export const faultsAtMost = 50;
 
 /**
  * What is wrong with a request, field by field, with RFC 6901 pointers; at most 50 faults. The error

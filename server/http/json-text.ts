@@ -1,4 +1,5 @@
 import type { Fault } from '../../shared/problem';
+import { jsonPointer } from './json-pointer';
 
 const token = /"(?:[^"\\]|\\.)*"|-?\d[\d.eE+-]*|[{}[\],:]/g;
 const plainInteger = /^-?\d{1,15}$/;
@@ -6,9 +7,8 @@ const plainInteger = /^-?\d{1,15}$/;
 /** Where the scan stands: an object with the names so far, or a list with the index. */
 type Level = { readonly names: Set<string>; name: string } | { index: number };
 
-const step = (level: Level) => ('index' in level ? `${level.index}` : level.name);
-const pointerOf = (levels: readonly Level[]) =>
-  levels.map((level) => `/${step(level).replaceAll('~', '~0').replaceAll('/', '~1')}`).join('');
+const pointerTo = (levels: readonly Level[]) =>
+  jsonPointer(levels.map((level) => ('index' in level ? level.index : level.name)));
 
 /**
  * What parsing valid JSON would alter without a word: a name that comes twice in an object, of which
@@ -29,12 +29,12 @@ export function silentAlterations(text: string): Fault[] {
       level.name = JSON.parse(last) as string;
       if (level.names.has(level.name)) {
         const detail = 'This name comes twice in its object.';
-        faults.push({ pointer: pointerOf(levels), code: 'duplicate-field', detail });
+        faults.push({ pointer: pointerTo(levels), code: 'duplicate-field', detail });
       }
       level.names.add(level.name);
     } else if (isAlteredInteger(found)) {
       const detail = 'Write integers without point or exponent, and decimals as strings.';
-      faults.push({ pointer: pointerOf(levels), code: 'not-a-plain-integer', detail });
+      faults.push({ pointer: pointerTo(levels), code: 'not-a-plain-integer', detail });
     }
     last = found;
   }

@@ -2,13 +2,9 @@ import type { ErrorRequestHandler, Request, Response } from 'express';
 import { problemTypes, type Problem, type ProblemName } from '../../shared/problem';
 import { Refusal } from '../refusal';
 
-/** Errors of the body parser and the router, by their own names. */
+/** Errors of the body's reader, by their own names. */
 const knownErrors: Readonly<Record<string, ProblemName>> = {
-  'entity.parse.failed': 'malformed-json',
-  'entity.verify.failed': 'malformed-json',
   'entity.too.large': 'body-too-large',
-  'encoding.unsupported': 'unsupported-media-type',
-  'charset.unsupported': 'unsupported-media-type',
   'request.size.invalid': 'malformed-json',
 };
 

@@ -1,7 +1,7 @@
 import { accountAnswer, organizationChoice, signInRequest } from '../../shared/account';
 import { roles } from '../../shared/scopes';
 import { operation } from '../http/operation';
-import { Refusal } from '../refusal';
+import { notSignedIn } from '../services/sessions/session-service';
 
 const json = 'application/json';
 const exampleAccount = {
@@ -67,7 +67,7 @@ export const refreshSession = operation({
   refuses: ['sign-in-needed'],
   examples: {},
   handle: async ({ refreshToken, services }) => {
-    if (refreshToken === undefined) throw new Refusal('sign-in-needed', 'Sign in, then try again.');
+    if (refreshToken === undefined) throw notSignedIn();
     const { account, ...session } = await services.sessions.refresh(refreshToken);
     return { type: json, body: JSON.stringify(account), session };
   },

@@ -32,7 +32,8 @@ interface Parts {
   readonly now?: () => Date;
 }
 
-const notSignedIn = () => new Refusal('sign-in-needed', 'Sign in, then try again.');
+/** Nobody is signed in, or no longer. */
+export const notSignedIn = () => new Refusal('sign-in-needed', 'Sign in, then try again.');
 
 export class SessionService {
   private readonly now: () => Date;
