@@ -1,7 +1,7 @@
 /** The model's version, raised whenever a digit of an answer changes. */
 export const engineVersion = '1';
 
-export { type AcidBaseSystem, effectivePKa, invertedNeighbours, speciesOf } from './system';
-export type { PHPoints } from './ph-points';
-export { type FractionPoint, fractionPoints, fractionRows } from './fraction-points';
-export { predominanceRanges } from './predominance';
+export { type AcidBaseSystem, effectivePKa, invertedNeighbours, speciesOf } from './forms/system';
+export type { PHPoints } from './forms/ph-points';
+export { type FractionPoint, fractionPoints, fractionRows } from './forms/fraction-points';
+export { predominanceRanges } from './forms/predominance';

@@ -1,6 +1,6 @@
 import Decimal from 'decimal.js';
 import { fractionPoints } from '../../../server/chem';
-import { contextOf, Exact } from '../../../server/chem/contexts';
+import { contextOf, Exact } from '../../../server/chem/decimals/contexts';
 
 describe('contexts', () => {
   test('a context has at least the precision asked for, and rounds half-even', () => {

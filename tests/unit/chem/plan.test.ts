@@ -1,13 +1,13 @@
-import { alongPoints } from '../../../server/chem/along-points';
-import { Exact } from '../../../server/chem/contexts';
-import type { PHPoints } from '../../../server/chem/ph-points';
-import { anchorEvery, planFor } from '../../../server/chem/plan';
+import { alongPoints } from '../../../server/chem/forms/along-points';
+import { Exact } from '../../../server/chem/decimals/contexts';
+import type { PHPoints } from '../../../server/chem/forms/ph-points';
+import { anchorEvery, planFor } from '../../../server/chem/forms/plan';
 import {
   fractionQuantities,
   meanChargeQuantity,
   ratioQuantities,
-} from '../../../server/chem/quantities';
-import { unitExponent } from '../../../server/chem/rounding';
+} from '../../../server/chem/forms/quantities';
+import { unitExponent } from '../../../server/chem/decimals/rounding';
 import type { AcidBaseSystem } from '../../../server/chem';
 
 const sixty = (i: number) =>

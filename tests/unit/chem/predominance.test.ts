@@ -1,6 +1,6 @@
 import { predominanceRanges } from '../../../server/chem';
-import { Exact } from '../../../server/chem/contexts';
-import { boundariesOf, predominantAt } from '../../../server/chem/predominance';
+import { Exact } from '../../../server/chem/decimals/contexts';
+import { boundariesOf, predominantAt } from '../../../server/chem/forms/predominance';
 
 const system = (...pKa: string[]) => ({ fullyProtonatedCharge: 0, pKa });
 const ranges = (...pKa: string[]) =>

@@ -1,4 +1,4 @@
-import { Exact } from '../../../server/chem/contexts';
+import { Exact } from '../../../server/chem/decimals/contexts';
 import {
   keptForPlaces,
   roundsOneWay,
@@ -6,7 +6,7 @@ import {
   tieNear,
   writePlaces,
   writeSignificant,
-} from '../../../server/chem/rounding';
+} from '../../../server/chem/decimals/rounding';
 
 describe('digits behind the rounding place', () => {
   test('are the seven that follow in the coefficient, wherever words begin', () => {

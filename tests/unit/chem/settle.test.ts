@@ -1,7 +1,7 @@
-import { alongPoints } from '../../../server/chem/along-points';
-import { planFor } from '../../../server/chem/plan';
-import { fractionQuantities, meanChargeQuantity } from '../../../server/chem/quantities';
-import { type Quantity, settle } from '../../../server/chem/settle';
+import { alongPoints } from '../../../server/chem/forms/along-points';
+import { planFor } from '../../../server/chem/forms/plan';
+import { fractionQuantities, meanChargeQuantity } from '../../../server/chem/forms/quantities';
+import { type Quantity, settle } from '../../../server/chem/forms/settle';
 import type { AcidBaseSystem } from '../../../server/chem';
 
 const acid = (...pKa: string[]): AcidBaseSystem => ({ fullyProtonatedCharge: 0, pKa });

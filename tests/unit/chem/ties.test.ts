@@ -1,5 +1,5 @@
-import { Exact } from '../../../server/chem/contexts';
-import { exponentsAt, fractionIs, meanChargeIs, vanishes } from '../../../server/chem/ties';
+import { Exact } from '../../../server/chem/decimals/contexts';
+import { exponentsAt, fractionIs, meanChargeIs, vanishes } from '../../../server/chem/forms/ties';
 
 const decimals = (...values: (string | number)[]) => values.map((value) => new Exact(value));
 const at = (pH: string, ...pKa: string[]) => {

@@ -1,6 +1,6 @@
 import { alongPoints } from './along-points';
 import { planFor } from './plan';
-import { nth } from './nth';
+import { nth } from '../decimals/nth';
 import { labelsOf, type PHPoints } from './ph-points';
 import { boundariesOf, predominantAt } from './predominance';
 import { fractionQuantities, meanChargeQuantity, ratioQuantities } from './quantities';

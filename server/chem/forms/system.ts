@@ -1,6 +1,6 @@
 import type Decimal from 'decimal.js';
-import { Exact } from './contexts';
-import { writeSignificant } from './rounding';
+import { Exact } from '../decimals/contexts';
+import { writeSignificant } from '../decimals/rounding';
 
 /**
  * A polyprotic acid–base system: n = 1…64 stepwise constants in the order in which protons leave,

@@ -1,9 +1,9 @@
 import type Decimal from 'decimal.js';
 import { Composition, type Factors, factorsOf, termsAt } from './composition';
-import { Exact } from './contexts';
+import { Exact } from '../decimals/contexts';
 import { anchorEvery, type Plan } from './plan';
 import { type PHPoints, valuesOf } from './ph-points';
-import { powerOfTen } from './powers-of-ten';
+import { powerOfTen } from '../decimals/powers-of-ten';
 import type { Refinable } from './settle';
 import { type AcidBaseSystem, constantsOf } from './system';
 

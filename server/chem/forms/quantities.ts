@@ -1,4 +1,4 @@
-import { keptForPlaces, writePlaces, writeSignificant } from './rounding';
+import { keptForPlaces, writePlaces, writeSignificant } from '../decimals/rounding';
 import type { Quantity } from './settle';
 import { type AcidBaseSystem, cumulativeConstants } from './system';
 import { exponentsAt, fractionIs, meanChargeIs } from './ties';

@@ -1,6 +1,6 @@
 import { decimalsOf, type PHPoints } from './ph-points';
-import { powerOfTenError } from './powers-of-ten';
-import { clearance } from './rounding';
+import { powerOfTenError } from '../decimals/powers-of-ten';
+import { clearance } from '../decimals/rounding';
 import { type AcidBaseSystem, constantsOf } from './system';
 
 /** Points of a grid that terms are carried along by products before they are made afresh. */

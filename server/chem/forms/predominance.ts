@@ -1,7 +1,7 @@
 import type Decimal from 'decimal.js';
-import { contextOf } from './contexts';
-import { nth } from './nth';
-import { writeSignificant } from './rounding';
+import { contextOf } from '../decimals/contexts';
+import { nth } from '../decimals/nth';
+import { writeSignificant } from '../decimals/rounding';
 import { type AcidBaseSystem, cumulativeConstants } from './system';
 
 /** The range of pH in which one species has the largest fraction; null where it has no end. */

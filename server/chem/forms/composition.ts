@@ -1,7 +1,7 @@
 import type Decimal from 'decimal.js';
-import { type Context, contextOf } from './contexts';
-import { nth } from './nth';
-import { powerOfTen } from './powers-of-ten';
+import { type Context, contextOf } from '../decimals/contexts';
+import { nth } from '../decimals/nth';
+import { powerOfTen } from '../decimals/powers-of-ten';
 
 /** What a system contributes at one precision, whatever the pH. */
 export interface Factors {

@@ -1,6 +1,6 @@
 import type Decimal from 'decimal.js';
-import { Exact } from './contexts';
-import { writePlaces } from './rounding';
+import { Exact } from '../decimals/contexts';
+import { writePlaces } from '../decimals/rounding';
 
 /**
  * Where to answer: pH values as written (any order, repeats allowed), or an even grid. Each pH lies

@@ -1,5 +1,5 @@
 import type Decimal from 'decimal.js';
-import { Exact } from './contexts';
+import { Exact } from '../decimals/contexts';
 
 /**
  * Whether Σ c_j·10^(e_j) = 0, decided exactly for decimal c_j and e_j.

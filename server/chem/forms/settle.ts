@@ -1,7 +1,7 @@
 import type Decimal from 'decimal.js';
 import type { Composition } from './composition';
-import { Exact } from './contexts';
-import { roundsOneWay, tieNear, unitExponent } from './rounding';
+import { Exact } from '../decimals/contexts';
+import { roundsOneWay, tieNear, unitExponent } from '../decimals/rounding';
 
 /** A number of the answer: where it is found and how it is rounded. */
 export interface Quantity {
