@@ -18,7 +18,8 @@ const exponentWithin = (value: string) => {
 };
 
 const form = `Write a decimal string such as "7.40" or "1.5e-3": at most ${decimalLongest} characters, the exponent within ±${decimalExponent}.`;
-const asString = 'Write this decimal as a string: a JSON number would lose digits silently.';
+/** What a JSON number in place of a decimal is told. */
+export const asString = 'Write this decimal as a string: a JSON number would lose digits silently.';
 
 /** Our codes for what zod finds wrong with a decimal, by its message. */
 export const decimalFaults: ReadonlyMap<string, string> = new Map([
@@ -33,21 +34,26 @@ export const decimalString = z
   .regex(decimalPattern, { error: form, abort: true })
   .refine(exponentWithin, { error: form, abort: true });
 
-interface Range {
+export interface DecimalRange {
   readonly from: string;
   readonly to: string;
   readonly decimals: number;
 }
 
+/** Whether a decimal lies within a closed range and has no more places than it may. */
+export function isWithin(value: Decimal.Value, { from, to, decimals }: DecimalRange): boolean {
+  const number = new Exact(value);
+  return !number.lessThan(from) && !number.greaterThan(to) && number.decimalPlaces() <= decimals;
+}
+
 /** A decimal within a closed range and with a bounded number of places. Code: `out-of-range`. */
-export const decimalWithin = ({ from, to, decimals }: Range) =>
+export const decimalWithin = (range: DecimalRange) =>
   decimalString.superRefine((value, context) => {
-    const number = new Exact(value);
-    if (number.lessThan(from) || number.greaterThan(to) || number.decimalPlaces() > decimals) {
+    if (!isWithin(value, range)) {
       context.addIssue({
         code: 'custom',
         params: { code: 'out-of-range' },
-        message: `Must lie between ${from} and ${to} and have at most ${decimals} decimals.`,
+        message: `Must lie between ${range.from} and ${range.to} and have at most ${range.decimals} decimals.`,
       });
     }
   });
