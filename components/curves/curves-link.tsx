@@ -1,7 +1,7 @@
 import { Link } from 'expo-router';
 import type { ReactNode } from 'react';
 import { StyleSheet, View, type StyleProp, type ViewStyle } from 'react-native';
-import type { Choice } from './curves-state';
+import type { Choice } from '../constants/choice';
 import { firstState } from './curves-state';
 import { formatFragment } from './fragment';
 import { openNext } from './use-address';

@@ -5,6 +5,7 @@ import { Page } from '../shell/page';
 import { Button } from '../ui/button';
 import { Dialog } from '../ui/dialog';
 import { Formula } from '../ui/formula';
+import { drawerHeights, RequestDrawer } from '../request/request-drawer';
 import { space, useTheme } from '../ui/theme';
 import { useLayout } from '../ui/use-layout';
 import { webStyle } from '../ui/web-style';
@@ -14,8 +15,7 @@ import { CurvePlot } from './curve-plot';
 import { ExportButtons } from './export-buttons';
 import { LayerBoxes } from './layer-boxes';
 import { NumbersTable } from './numbers-table';
-import { curveRequest } from './request/curve-request';
-import { drawerHeights, RequestDrawer } from './request/request-drawer';
+import { curveRequest } from './curve-request';
 import { SidePanel } from './side-panel';
 import { SystemInputs } from './system-inputs';
 import { linkTo } from './use-address';
@@ -90,6 +90,7 @@ export function CurvesWide({ curves }: { readonly curves: Curves }) {
       </Page>
       <RequestDrawer
         request={curveRequest(state.choice, globalThis.location.origin)}
+        gives="this curve"
         open={drawer}
         onToggle={() => setDrawer(!drawer)}
         inputsWidth={inputs}

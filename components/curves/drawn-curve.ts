@@ -1,8 +1,8 @@
 import type { StairRange } from '../chart/stair';
 import type { FractionsAnswer } from '../../shared/fractions';
 import type { Constant } from '../../shared/constant';
-import type { Choice } from './curves-state';
-import type { SystemText } from './system-text';
+import type { Choice } from '../constants/choice';
+import type { SystemText } from '../constants/system-text';
 import { givenConstants } from './curves-state';
 import type { Curve } from './follow-curve';
 import { curveOf } from './follow-curve';

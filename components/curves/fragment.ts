@@ -1,15 +1,13 @@
 import { systemInFull, systemReference } from '../../shared/system';
-import type { Choice, CurvesState, Layer } from './curves-state';
+import type { Choice } from '../constants/choice';
+import type { ReadFragment } from '../fragment/address';
+import { formatPairs, readValues, type Pair } from '../fragment/pairs';
+import type { CurvesState, Layer } from './curves-state';
 import { firstState, givenConstants, layers, views } from './curves-state';
 import { rangeOf } from './curve-grid';
 import { pHWithin, typedPH } from './ph-steps';
-import { wellFormed } from './well-formed';
 
-/** Form encoding, with the commas of lists left readable. */
-const encode = (text: string) =>
-  encodeURIComponent(wellFormed(text)).replace(/%20/g, '+').replace(/%2C/g, ',');
-
-const choicePairs = (choice: Choice): [string, string | undefined][] =>
+const choicePairs = (choice: Choice): Pair[] =>
   choice.kind === 'stored'
     ? [['system', choice.id]]
     : [
@@ -20,29 +18,20 @@ const choicePairs = (choice: Choice): [string, string | undefined][] =>
 
 /** The state as an address's fragment, without the `#`; what is as on a first visit is left out. */
 export function formatFragment({ choice, pH, layers: shown, view }: CurvesState): string {
-  const pairs = [
+  return formatPairs([
     ...choicePairs(choice),
     ['pH', pH],
     ['layers', shown.length < layers.length ? shown.join(',') : undefined],
     ['view', view === firstState.view ? undefined : view],
-  ] as const;
-  return pairs
-    .flatMap(([key, value]) => (value === undefined ? [] : [`${key}=${encode(value)}`]))
-    .join('&');
-}
-
-/** What a fragment asks for. `faulty` where a part of it could not be used. */
-export interface ReadFragment {
-  readonly state: CurvesState;
-  readonly faulty: boolean;
+  ]);
 }
 
 /**
  * Reads a fragment. What it leaves out is as on a first visit; so is, part by part, whatever in it
  * cannot be used, and `faulty` says so: an address is never a reason to show nothing.
  */
-export function parseFragment(fragment: string): ReadFragment {
-  const { values, faulty: broken } = readPairs(fragment.replace(/^#/, ''));
+export function parseFragment(fragment: string): ReadFragment<CurvesState> {
+  const { values, faulty: broken } = readValues(fragment, keys);
   const choice = readChoice(values);
   const drawn = choice === 'unusable' ? firstState.choice : choice;
   const range = rangeOf(givenConstants(drawn));
@@ -61,27 +50,6 @@ export function parseFragment(fragment: string): ReadFragment {
 }
 
 const keys = new Set(['system', 'name', 'charge', 'pKa', 'pH', 'layers', 'view']);
-
-function readPairs(text: string) {
-  const values = new Map<string, string>();
-  let faulty = false;
-  for (const pair of text === '' ? [] : text.split('&')) {
-    const [key = '', ...rest] = pair.split('=');
-    const value = decode(rest.join('='));
-    if (value === undefined || !keys.has(key) || values.has(key)) faulty = true;
-    else values.set(key, value);
-  }
-  return { values, faulty };
-}
-
-/** Undoes `encode`; undefined for a broken escape. */
-function decode(text: string): string | undefined {
-  try {
-    return decodeURIComponent(text.replace(/\+/g, '%20'));
-  } catch {
-    return undefined;
-  }
-}
 
 function readChoice(values: ReadonlyMap<string, string>): Choice | 'unusable' {
   const id = values.get('system');

@@ -1,11 +1,12 @@
 import './no-eval';
 import { useState } from 'react';
 import { View } from 'react-native';
+import type { Choice } from '../constants/choice';
 import { Skeleton } from '../ui/skeleton';
 import { conditionsInFigure } from './conditions';
 import { useCurve, useReading } from './curve-queries';
 import { CurvesFigure } from './curves-figure';
-import { firstState, type Choice, type Layer } from './curves-state';
+import { firstState, type Layer } from './curves-state';
 
 interface LiveFigureProps {
   /** The same object as long as the system is the same. */

@@ -1,5 +1,6 @@
 import { decimalPattern, Exact } from '../../shared/decimal';
 import { pHValue } from '../../shared/ph';
+import { plainDecimal } from '../ui/plain-decimal';
 
 export type PHRange = readonly [from: number, to: number];
 
@@ -26,16 +27,6 @@ export const pHEnd = (to: 'start' | 'end', range: PHRange) =>
 
 type TypedPH =
   { readonly ok: true; readonly pH: string } | { readonly ok: false; readonly error: string };
-
-/**
- * A number as the contract writes it: papers print a true minus, and many keyboards have only a
- * comma for the point.
- */
-export const plainDecimal = (text: string) =>
-  text
-    .trim()
-    .replace(/[\u2212\u2013]/g, '-')
-    .replace(/^(-?\d+),(\d+)$/, '$1.$2');
 
 /** A pH as somebody typed it, or what to type instead. */
 export function typedPH(text: string, range: PHRange): TypedPH {

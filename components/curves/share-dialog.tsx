@@ -4,9 +4,9 @@ import { Dialog } from '../ui/dialog';
 import { space } from '../ui/theme';
 import { Words } from '../ui/words';
 import { ExportButtons } from './export-buttons';
-import { curveRequest } from './request/curve-request';
-import { requestCode } from './request/request-code';
-import { RequestView, useLanguage } from './request/request-view';
+import { requestCode } from '../request/request-code';
+import { aboutRequest, RequestView, useLanguage } from '../request/request-view';
+import { curveRequest } from './curve-request';
 import { linkTo } from './use-address';
 import { useCopy } from '../ui/use-copy';
 import type { Curves } from './use-curves';
@@ -39,9 +39,7 @@ export function ShareDialog({ open, onClose, curves, exports }: ShareDialogProps
           <Words kind="section" heading={3}>
             The request
           </Words>
-          <Words kind="help">
-            The call that gives this curve. Put your key in the variable; it is never written here.
-          </Words>
+          <Words kind="help">{aboutRequest('this curve')}</Words>
           <RequestView request={request} language={language} onLanguage={setLanguage} />
           <Button
             icon="copy"

@@ -1,5 +1,5 @@
 import type { Species } from '../../shared/species';
-import type { SystemText } from './system-text';
+import type { SystemText } from '../constants/system-text';
 
 /** `^2-`, `^+`, or nothing for a neutral form. */
 const chargeSign = (charge: number) =>

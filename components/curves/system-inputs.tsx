@@ -1,7 +1,7 @@
 import { StyleSheet, View } from 'react-native';
+import { ConstantsEditor } from '../constants/constants-editor';
 import { space } from '../ui/theme';
 import { Words } from '../ui/words';
-import { ConstantsEditor } from './constants-editor';
 import { ConstantsList } from './constants-list';
 import { CurveWarnings } from './curve-warnings';
 import { SystemChoice } from './system-choice';

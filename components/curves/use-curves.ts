@@ -1,14 +1,14 @@
 import { useState } from 'react';
 import { ProblemError } from '../../shared/client';
+import { plainSystem, type Choice } from '../constants/choice';
+import { useConstantsDraft } from '../constants/use-constants-draft';
 import { systemTitle } from '../handbook/system-title';
 import { rangeOf } from './curve-grid';
 import { useCurve, useReading } from './curve-queries';
-import type { Choice } from './curves-state';
-import { firstState, givenConstants, plainSystem } from './curves-state';
+import { firstState, givenConstants } from './curves-state';
 import type { DrawnCurve } from './drawn-curve';
 import { pHWithin } from './ph-steps';
 import { useAddress } from './use-address';
-import { useConstantsDraft } from './use-constants-draft';
 
 /** Everything the Curves screen shows and does, whichever way it is laid out. */
 export function useCurves() {

@@ -1,6 +1,6 @@
 import { StyleSheet } from 'react-native';
 import { CurvesLink } from '../curves/curves-link';
-import { plainSystem } from '../curves/curves-state';
+import { plainSystem } from '../constants/choice';
 import { Empty } from '../ui/empty';
 import { Words } from '../ui/words';
 

@@ -1,6 +1,7 @@
 import { useMemo } from 'react';
 import { StyleSheet, View } from 'react-native';
-import type { Choice, Layer } from '../curves/curves-state';
+import type { Choice } from '../constants/choice';
+import type { Layer } from '../curves/curves-state';
 import { LiveFigure } from '../curves/live-figure';
 import { space } from '../ui/theme';
 import { useLayout } from '../ui/use-layout';

@@ -1,5 +1,5 @@
-import { checkDraft, draftOf } from '../../../components/curves/constants-draft';
-import { pastedConstants } from '../../../components/curves/pasted-constants';
+import { checkDraft, draftOf } from '../../../components/constants/constants-draft';
+import { pastedConstants } from '../../../components/constants/pasted-constants';
 
 const draft = { name: 'Larkmoor buffer', charge: '0', pKa: ['2.148', '7.198', '12.35'] };
 

@@ -1,5 +1,6 @@
 import fc from 'fast-check';
-import type { Choice, CurvesState } from '../../../components/curves/curves-state';
+import type { Choice } from '../../../components/constants/choice';
+import type { CurvesState } from '../../../components/curves/curves-state';
 import { firstState, givenConstants, layers, views } from '../../../components/curves/curves-state';
 import { rangeOf } from '../../../components/curves/curve-grid';
 import { formatFragment, parseFragment } from '../../../components/curves/fragment';

@@ -1,6 +1,6 @@
 import { curveCsv } from '../../../components/curves/curve-csv';
 import { conditionsText } from '../../../components/curves/conditions-of';
-import type { Choice } from '../../../components/curves/curves-state';
+import type { Choice } from '../../../components/constants/choice';
 import { describeCurve, describeReading } from '../../../components/curves/describe';
 import { drawnCurve } from '../../../components/curves/drawn-curve';
 import { figureLayout } from '../../../components/curves/figure-layout';

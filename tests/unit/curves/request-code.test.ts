@@ -1,8 +1,8 @@
 import { spawnSync } from 'node:child_process';
 import fc from 'fast-check';
 import ts from 'typescript';
-import { languages, requestCode } from '../../../components/curves/request/request-code';
-import { curveRequest } from '../../../components/curves/request/curve-request';
+import { languages, requestCode } from '../../../components/request/request-code';
+import { curveRequest } from '../../../components/curves/curve-request';
 import { publicFractionsRequest } from '../../../shared/fractions';
 
 const url = 'https://stepwell.larkmoor.example/v1/fractions';
@@ -36,7 +36,7 @@ function argumentsOf(command: string): string[] {
 describe('the request as curl', () => {
   test.each([...hostile, 'phosphoric acid'])('%j reaches the server as it is', (name) => {
     const body = bodyNamed(name);
-    const given = argumentsOf(requestCode.curl({ url, body }));
+    const given = argumentsOf(requestCode.curl({ url, body, result: 'curve' }));
     expect(given.slice(0, -1)).toEqual([
       url,
       '-H',
@@ -51,7 +51,7 @@ describe('the request as curl', () => {
   test('holds no control character but its line ends', () => {
     fc.assert(
       fc.property(names, (name) => {
-        const code = requestCode.curl({ url, body: bodyNamed(name) });
+        const code = requestCode.curl({ url, body: bodyNamed(name), result: 'curve' });
         expect(code).not.toMatch(/[^\P{Cc}\n]|[\u2028\u2029\u202a-\u202e\ufeff]/u);
       }),
     );
@@ -63,7 +63,7 @@ describe('the request as TypeScript', () => {
     fc.assert(
       fc.property(names, (name) => {
         const body = bodyNamed(name);
-        const code = requestCode.TypeScript({ url, body });
+        const code = requestCode.TypeScript({ url, body, result: 'curve' });
         const { diagnostics } = ts.transpileModule(code, {
           reportDiagnostics: true,
           compilerOptions: { module: ts.ModuleKind.ESNext, target: ts.ScriptTarget.ESNext },
@@ -81,7 +81,7 @@ describe('the request as R', () => {
     fc.assert(
       fc.property(names, (name) => {
         const body = bodyNamed(name);
-        const code = requestCode.R({ url, body });
+        const code = requestCode.R({ url, body, result: 'curve' });
         const literal = /req_body_raw\('((?:[^'\\]|\\['\\])*)', type = /.exec(code)?.[1];
         expect(literal).toBeDefined();
         expect(JSON.parse((literal ?? '').replace(/\\(['\\])/g, '$1'))).toEqual(body);
@@ -95,7 +95,7 @@ describe('the request as Python', () => {
     fc.assert(
       fc.property(names, (name) => {
         const body = bodyNamed(name);
-        const code = requestCode.Python({ url, body });
+        const code = requestCode.Python({ url, body, result: 'curve' });
         const literal = /json\.dumps\(([\s\S]*)\)\.encode\(\)/.exec(code)?.[1] ?? '';
         expect(JSON.parse(literal)).toEqual(body);
       }),
@@ -120,7 +120,9 @@ describe('the request as Python', () => {
       ].join('\n');
       const bodies = hostile.map(bodyNamed);
       const { stdout, stderr } = spawnSync('python3', ['-c', program], {
-        input: JSON.stringify(bodies.map((body) => requestCode.Python({ url, body }))),
+        input: JSON.stringify(
+          bodies.map((body) => requestCode.Python({ url, body, result: 'curve' })),
+        ),
       });
       expect(stderr.toString()).toBe('');
       const sent = JSON.parse(stdout.toString()) as [string, string, string][];
@@ -133,7 +135,7 @@ describe('the request as Python', () => {
 
 test('no language writes a key', () => {
   for (const language of languages) {
-    const code = requestCode[language]({ url, body: bodyNamed('x') });
+    const code = requestCode[language]({ url, body: bodyNamed('x'), result: 'curve' });
     expect(code).toContain('STEPWELL_KEY');
     expect(code).not.toContain('stepwell_');
   }
@@ -145,6 +147,7 @@ test('the request of a curve fits the contract', () => {
   expect(byId).toEqual({
     url: `${origin}/v1/fractions`,
     body: { system: { id: 'edta' }, pH: { from: '0', to: '14', step: '0.02' }, digits: 6 },
+    result: 'curve',
   });
   const system = { name: undefined, fullyProtonatedCharge: 0, pKa: ['0.0', '7.198'] };
   const inFull = curveRequest({ kind: 'typed', system }, origin);

@@ -1,8 +1,8 @@
 import { limits } from '../../shared/limits';
 import { systemInFull } from '../../shared/system';
+import { wellFormed } from '../fragment/well-formed';
+import { plainDecimal } from '../ui/plain-decimal';
 import type { SystemText } from './system-text';
-import { plainDecimal } from './ph-steps';
-import { wellFormed } from './well-formed';
 
 /** A system while it is typed: anything may stand in its fields. */
 export interface ConstantsDraft {

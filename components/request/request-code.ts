@@ -4,6 +4,8 @@ import { jsonText } from './json-text';
 export interface WrittenRequest {
   readonly url: string;
   readonly body: object;
+  /** What the answer is called: a word that every language takes as a variable. */
+  readonly result: string;
 }
 
 const inSingleQuotes = {
@@ -16,7 +18,7 @@ const curl = ({ url, body }: WrittenRequest) => `curl ${url} \\
   -H "Content-Type: application/json" \\
   -d ${inSingleQuotes.shell(jsonText(body))}`;
 
-const python = ({ url, body }: WrittenRequest) => `import json
+const python = ({ url, body, result }: WrittenRequest) => `import json
 import os
 import urllib.request
 
@@ -29,9 +31,13 @@ request = urllib.request.Request(
     },
 )
 with urllib.request.urlopen(request) as response:
-    curve = json.load(response)`;
+    ${result} = json.load(response)`;
 
-const typescript = ({ url, body }: WrittenRequest) => `const response = await fetch("${url}", {
+const typescript = ({
+  url,
+  body,
+  result,
+}: WrittenRequest) => `const response = await fetch("${url}", {
   method: "POST",
   headers: {
     Authorization: \`Bearer \${process.env.STEPWELL_KEY}\`,
@@ -40,11 +46,11 @@ const typescript = ({ url, body }: WrittenRequest) => `const response = await fe
   body: JSON.stringify(${jsonText(body, '  ')}),
 });
 if (!response.ok) throw new Error(await response.text());
-const curve = await response.json();`;
+const ${result} = await response.json();`;
 
-const r = ({ url, body }: WrittenRequest) => `library(httr2)
+const r = ({ url, body, result }: WrittenRequest) => `library(httr2)
 
-curve <- request("${url}") |>
+${result} <- request("${url}") |>
   req_auth_bearer_token(Sys.getenv("STEPWELL_KEY")) |>
   req_body_raw(${inSingleQuotes.r(jsonText(body))}, type = "application/json") |>
   req_perform() |>

@@ -1,8 +1,7 @@
 import { useState } from 'react';
+import { plainSystem, type Choice } from './choice';
 import type { ConstantsDraft, DraftFaults } from './constants-draft';
 import { checkDraft, draftOf } from './constants-draft';
-import type { Choice } from './curves-state';
-import { plainSystem } from './curves-state';
 
 export interface DraftEditing {
   readonly draft: ConstantsDraft;

@@ -1,7 +1,7 @@
 import { useId, useState } from 'react';
 import { View } from 'react-native';
-import { CodeBlock } from '../../ui/code-block';
-import { Tabs } from '../../ui/tabs';
+import { CodeBlock } from '../ui/code-block';
+import { Tabs } from '../ui/tabs';
 import type { Language, WrittenRequest } from './request-code';
 import { languages, requestCode } from './request-code';
 
@@ -29,6 +29,10 @@ export function RequestView({ request, language, onLanguage }: RequestViewProps)
     </View>
   );
 }
+
+/** What the code is, in words; `gives` says what for: `this curve`. */
+export const aboutRequest = (gives: string) =>
+  `The call that gives ${gives}. Put your key in the variable; it is never written here.`;
 
 /** The language last looked at, for as long as the screen is open. */
 export const useLanguage = () => useState<Language>('curl');

@@ -1,13 +1,13 @@
 import { StyleSheet, View } from 'react-native';
-import { Button } from '../../ui/button';
-import { Numerals } from '../../ui/numerals';
-import { space, useTheme } from '../../ui/theme';
-import { webStyle } from '../../ui/web-style';
-import { Words } from '../../ui/words';
-import { useCopy } from '../../ui/use-copy';
+import { Button } from '../ui/button';
+import { Numerals } from '../ui/numerals';
+import { space, useTheme } from '../ui/theme';
+import { webStyle } from '../ui/web-style';
+import { Words } from '../ui/words';
+import { useCopy } from '../ui/use-copy';
 import type { WrittenRequest } from './request-code';
 import { requestCode } from './request-code';
-import { RequestView, useLanguage } from './request-view';
+import { aboutRequest, RequestView, useLanguage } from './request-view';
 
 /** Heights of the drawer, px: opening it shrinks the plot and never covers it. */
 export const drawerHeights = { closed: 48, open: 240 } as const;
@@ -19,12 +19,14 @@ interface RequestDrawerProps {
   readonly request: WrittenRequest;
   readonly open: boolean;
   readonly onToggle: () => void;
+  /** What the call gives: `this curve`. */
+  readonly gives: string;
   /** Width of the inputs column, whose edges the drawer keeps. */
   readonly inputsWidth: number;
 }
 
-/** The call that gives the curve on the screen, at the foot of a wide window. */
-export function RequestDrawer({ request, open, onToggle, inputsWidth }: RequestDrawerProps) {
+/** The call that gives what is on the screen, at the foot of a wide window. */
+export function RequestDrawer({ request, gives, open, onToggle, inputsWidth }: RequestDrawerProps) {
   const { colours } = useTheme();
   const [language, setLanguage] = useLanguage();
   const copy = useCopy();
@@ -42,11 +44,7 @@ export function RequestDrawer({ request, open, onToggle, inputsWidth }: RequestD
         <Words kind="button" heading={2}>
           The request
         </Words>
-        {open && (
-          <Words kind="help">
-            The call that gives this curve. Put your key in the variable; it is never written here.
-          </Words>
-        )}
+        {open && <Words kind="help">{aboutRequest(gives)}</Words>}
       </View>
       <View style={styles.code}>
         {open ? (
@@ -54,7 +52,7 @@ export function RequestDrawer({ request, open, onToggle, inputsWidth }: RequestD
         ) : (
           <View style={styles.line}>
             <Numerals size={13} tone="inkSoft">
-              POST /v1/fractions
+              POST {new URL(request.url).pathname}
             </Numerals>
           </View>
         )}

@@ -8,7 +8,7 @@ import { Words } from '../ui/words';
 import { ConstantRow } from './constant-row';
 import type { DraftEditing } from './use-constants-draft';
 
-/** A system of one's own: name, charge, constants. The curve follows each edit it can. */
+/** A system of one's own: name, charge, constants. What is shown follows each edit it can. */
 export function ConstantsEditor({ draft, faults, edit }: DraftEditing) {
   const inputs = useRef<(TextInput | null)[]>([]);
   const { pKa } = draft;
