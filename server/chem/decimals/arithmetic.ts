@@ -17,6 +17,7 @@ export interface Arithmetic<N> {
   readonly ln: (a: N) => N;
   readonly exp: (a: N) => N;
   readonly powerOfTen: (a: N) => N;
+  readonly isZero: (a: N) => boolean;
 }
 
 export const doubles: Arithmetic<number> = {
@@ -29,7 +30,12 @@ export const doubles: Arithmetic<number> = {
   ln: Math.log,
   exp: Math.exp,
   powerOfTen: (a) => 10 ** a,
+  isZero: (a) => a === 0,
 };
+
+/** Σ of the terms, one after the other; 0 of none. */
+export const sum = <N>({ of, plus }: Arithmetic<N>, terms: readonly N[]): N =>
+  terms.reduce((all, term) => plus(all, term), of(0));
 
 const made = new Map<Context, Arithmetic<Decimal>>();
 
@@ -50,6 +56,7 @@ export function decimals(precision: number): Arithmetic<Decimal> {
       ln: (a) => a.ln(),
       exp: (a) => a.exp(),
       powerOfTen: (a) => powerOfTen(context, a.toDecimalPlaces(places)),
+      isZero: (a) => a.isZero(),
     };
     made.set(context, arithmetic);
   }
