@@ -29,18 +29,19 @@ const written = (formula: string, size: number, sign: string) =>
 /** With `^`, what follows it is the charge: "SO4^2-", "K^+". */
 const marked = /^([^^]+)\^([1-6]?)([+-])$/;
 /** One symbol, one digit: "Ca2+". */
-const simple = /^([A-Z][a-z]?)([1-6])([+-])$/;
+const simple = /^([A-Z][a-z]?)([1-9])([+-])$/;
 /** The sign alone: "NH4+". Two digits before it would be a charge run into a count: "SO42-". */
 const plain = /^([^^]*[^^\d][1-9]?)([+-])$/;
 
 /** Formula, size of the charge and its sign; undefined where it may be read in two ways, or none. */
 function split(ion: string): readonly [string, number, string] | undefined {
-  const [, formula, size, sign] = marked.exec(ion) ?? [];
-  if (formula !== undefined && sign !== undefined) return [formula, Number(size || 1), sign];
+  const [, formula, number, sign] = marked.exec(ion) ?? [];
+  if (formula !== undefined && sign !== undefined) return [formula, Number(number || 1), sign];
   const [, symbol, digit, after] = simple.exec(ion) ?? [];
   if (symbol !== undefined && after !== undefined) {
-    const means = after === '+' || (digit === '2' && chalcogens.has(symbol));
-    return means ? [symbol, Number(digit), after] : undefined;
+    const size = Number(digit);
+    const means = after === '+' ? size <= highestCharge : size === 2 && chalcogens.has(symbol);
+    return means ? [symbol, size, after] : undefined;
   }
   const [, body, alone] = plain.exec(ion) ?? [];
   return body !== undefined && alone !== undefined ? [body, 1, alone] : undefined;
