@@ -14,6 +14,8 @@ interface ChoiceProps<Value extends string> {
   readonly value: Value;
   readonly onChange: (value: Value) => void;
   readonly help?: string;
+  /** What is wrong with the choice; takes the place of the help. */
+  readonly error?: string;
   readonly hideLabel?: boolean;
   readonly width?: DimensionValue;
 }
@@ -25,6 +27,7 @@ export function Choice<Value extends string>({
   value,
   onChange,
   help,
+  error,
   hideLabel = false,
   width,
 }: ChoiceProps<Value>) {
@@ -85,7 +88,8 @@ export function Choice<Value extends string>({
         tabIndex={0}
         aria-label={hideLabel ? label : undefined}
         aria-labelledby={hideLabel ? undefined : `${id}-label`}
-        aria-describedby={help ? `${id}-message` : undefined}
+        aria-describedby={(error ?? help) ? `${id}-message` : undefined}
+        aria-invalid={error !== undefined || undefined}
         aria-haspopup="listbox"
         aria-expanded={state.open}
         aria-controls={state.open ? list : undefined}
@@ -93,7 +97,14 @@ export function Choice<Value extends string>({
         onKeyDown={press}
         onClick={() => setState({ open: !state.open, at: Math.max(chosen, 0) })}
         onBlur={() => setState({ ...state, open: false })}
-        style={[styles.box, { backgroundColor: colours.page, borderColor: colours.edge }]}
+        style={[
+          styles.box,
+          {
+            backgroundColor: colours.page,
+            borderColor: error === undefined ? colours.edge : colours.bad,
+          },
+          error !== undefined && styles.invalid,
+        ]}
       >
         <View style={styles.value}>
           <Words numberOfLines={1}>{options[chosen]?.label ?? ''}</Words>
@@ -112,7 +123,9 @@ export function Choice<Value extends string>({
           onTake={take}
         />
       )}
-      {(help !== undefined || !hideLabel) && <FieldMessage id={`${id}-message`} help={help} />}
+      {(error !== undefined || help !== undefined || !hideLabel) && (
+        <FieldMessage id={`${id}-message`} help={help} error={error} />
+      )}
     </View>
   );
 }
@@ -130,5 +143,7 @@ const styles = StyleSheet.create({
     cursor: 'pointer',
     userSelect: 'none',
   },
+  // The 2 px border takes its extra px from the padding: nothing shifts.
+  invalid: { borderWidth: 2, paddingHorizontal: space[3] - 1 },
   value: { flex: 1, minWidth: 0 },
 });
