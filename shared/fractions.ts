@@ -1,21 +1,13 @@
 import { z } from 'zod';
+import { conditions } from './conditions';
+import { digits } from './digits';
+import { dryRun } from './dry-run';
 import { limits } from './limits';
-import { model, warning } from './model';
+import { model } from './model';
 import { pHInput, pHValue } from './ph';
 import { species } from './species';
 import { queryInteger } from './query-integer';
 import { systemInput } from './system';
-
-const digits = z
-  .int()
-  .min(limits.digits.from)
-  .max(limits.digits.to)
-  .default(limits.digits.default)
-  .meta({
-    description:
-      'Digits of the answer, all of them right: significant digits of fractions and ratios, places after the point of the charge.',
-    example: 16,
-  });
 
 /** Query of GET /v1/systems/{id}/fractions: the one-line form of the same question. */
 export const fractionsQuery = z.strictObject({
@@ -23,11 +15,6 @@ export const fractionsQuery = z.strictObject({
   digits: queryInteger(limits.digits.from, limits.digits.to)
     .default(limits.digits.default)
     .meta({ description: 'Digits of the answer, all of them right.', example: 16 }),
-});
-
-const dryRun = z.boolean().default(false).meta({
-  description: 'Answer cost and warnings only.',
-  example: false,
 });
 
 const pH = pHInput.meta({
@@ -43,6 +30,7 @@ export const fractionsRequest = z
       description: 'Up to 100 systems, answered in this order.',
     }),
     pH,
+    conditions: conditions.optional(),
     digits,
     dryRun,
   })
@@ -60,7 +48,7 @@ export const fractionsRequest = z
 
 /** Body of POST /v1/public/fractions: one system, at a lower cost bound, no key. */
 export const publicFractionsRequest = z
-  .strictObject({ system: systemInput, pH, digits })
+  .strictObject({ system: systemInput, pH, conditions: conditions.optional(), digits })
   .meta({ id: 'PublicFractionsRequest', description: 'Asks for one system’s species fractions.' });
 
 const point = z
@@ -140,18 +128,6 @@ export const manyFractionsAnswer = z
   })
   .meta({ id: 'ManyFractionsAnswer', description: 'Species fractions of several systems.' });
 
-/** Answer to a call with `dryRun`. */
-export const dryRunAnswer = z
-  .strictObject({
-    dryRun: z.literal(true).meta({ description: 'Nothing was computed.', example: true }),
-    cost: z
-      .int()
-      .meta({ description: 'Points × species × (digits + 20), summed.', example: 302616 }),
-    computeUnits: z.int().meta({ description: 'What the call would count.', example: 1 }),
-    warnings: z.array(warning).meta({ description: 'What the answer would warn of.' }),
-  })
-  .meta({ id: 'DryRunAnswer', description: 'Cost and warnings of a call that was not made.' });
-
 export type FractionsRequest = z.infer<typeof fractionsRequest>;
 export type FractionsQuery = z.infer<typeof fractionsQuery>;
 export type FractionsRequestInput = z.input<typeof fractionsRequest>;
@@ -160,4 +136,3 @@ export type FractionPoint = z.infer<typeof point>;
 export type SystemFractions = z.infer<typeof systemFractions>;
 export type FractionsAnswer = z.infer<typeof fractionsAnswer>;
 export type ManyFractionsAnswer = z.infer<typeof manyFractionsAnswer>;
-export type DryRunAnswer = z.infer<typeof dryRunAnswer>;

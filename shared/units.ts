@@ -46,9 +46,16 @@ const table = {
     units: [unit('°C', '1'), { spellings: ['K'], factor: '1', offset: '-273.15' }],
   },
   pressure: {
-    own: 'atm',
-    units: [unit('atm', '1'), unit('matm', '1e-3'), micro('atm', '1e-6')],
-    note: 'A pascal, a bar or a torr is no exact decimal of an atmosphere (101325 Pa): divide first.',
+    own: 'Pa',
+    // The pascal, because one has no finite decimal in atmospheres.
+    units: [
+      unit('Pa', '1'),
+      unit('kPa', '1e3'),
+      unit('bar', '1e5'),
+      unit('mbar', '1e2'),
+      unit('atm', '101325'),
+      micro('atm', '0.101325'),
+    ],
   },
   volume: {
     own: 'L',

@@ -1,6 +1,6 @@
 import { z } from 'zod';
+import { dryRunAnswer } from '../../shared/dry-run';
 import {
-  dryRunAnswer,
   fractionsAnswer,
   fractionsRequest,
   manyFractionsAnswer,

@@ -111,7 +111,10 @@ export function coefficientsOf(ions: readonly SizedIon[], choice: ActivityChoice
       return byInteractions(ions, specificInteractionAmong(ions), choice);
     case 'pitzer':
       return byInteractions(ions, pitzerAmong(ions), choice);
-    default:
+    case 'debye-huckel':
+    case 'extended-debye-huckel':
+    case 'guntelberg':
+    case 'davies':
       return debyeHuckel(ions, choice.model, choice);
   }
 }

@@ -1,6 +1,6 @@
 import { computeUnitsOf } from '../../../shared/limits';
+import type { DryRunAnswer } from '../../../shared/dry-run';
 import type {
-  DryRunAnswer,
   FractionsAnswer,
   ManyFractionsAnswer,
   SystemFractions,
