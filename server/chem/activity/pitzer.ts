@@ -23,9 +23,11 @@ const mixingAmong = (ions: readonly Ion[]) =>
 const unlikeAmong = (ions: readonly Ion[]) =>
   ions.flatMap((first, i) =>
     ions.flatMap((second, j) =>
-      i < j && first.charge * second.charge > 0 && first.charge !== second.charge ? [[i, j]] : [],
+      i < j && first.charge * second.charge > 0 && first.charge !== second.charge
+        ? [[i, j] as const]
+        : [],
     ),
-  ) as [number, number][];
+  );
 
 const b = '1.2';
 /** α of β1, smaller between ions that are both divalent, and of β2, (kg/mol)^½. */
