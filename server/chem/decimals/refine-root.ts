@@ -35,7 +35,7 @@ export function refineRoot({ context, start, residual, slope, accuracy }: Root):
   for (let iterations = 1; iterations <= mostIterations; iterations++) {
     const { mantissa, exponent } = ratioOf(residual(u), slope(u));
     if (!Number.isFinite(mantissa)) return { ok: false, reason: 'no-convergence' };
-    const step = new context(`${-mantissa}e${exponent}`);
+    const step = new context(-mantissa).times(`1e${exponent}`);
     if (step.isZero()) return { ok: true, value: u, iterations };
     const held = step.abs().greaterThan(2) ? new context(step.isNegative() ? -2 : 2) : step;
     u = held.abs().lessThan('1e-9')

@@ -25,16 +25,19 @@ export function factorsOf(pKa: readonly Decimal[], precision: number): Factors {
   };
 }
 
-/** Terms t_j = Π_{i≤j} h·10^−pKa_i of species 1…n against species 0, h = 10^pH. */
-export function termsAt({ context, constants }: Factors, pH: Decimal): Decimal[] {
-  const h = powerOfTen(context, pH);
+/** Terms t_j = Π_{i≤j} u·10^−pKa_i of species 1…n against species 0, u = 10^pH = 1/a(H⁺). */
+export function termsOfActivity({ constants }: Factors, u: Decimal): Decimal[] {
   const terms: Decimal[] = [];
   for (const constant of constants) {
-    const ratio = h.times(constant);
+    const ratio = u.times(constant);
     terms.push(terms.at(-1)?.times(ratio) ?? ratio);
   }
   return terms;
 }
+
+/** The same at a pH. */
+export const termsAt = (factors: Factors, pH: Decimal): Decimal[] =>
+  termsOfActivity(factors, powerOfTen(factors.context, pH));
 
 /**
  * A system at one pH: t_0 = 1, α_j = t_j/Σ_k t_k. Products, sums and one quotient of positive

@@ -7,11 +7,12 @@ export interface DoubleSystem {
   readonly lnSums: readonly number[];
 }
 
-export const ln10 = Math.LN10;
+/** ln 10, in doubles. */
+export const lnOfTen = Math.LN10;
 
 export function doubleSystem(pKa: readonly number[]): DoubleSystem {
   const lnSums = [0];
-  for (const constant of pKa) lnSums.push((lnSums.at(-1) ?? 0) + constant * ln10);
+  for (const constant of pKa) lnSums.push((lnSums.at(-1) ?? 0) + constant * lnOfTen);
   return { lnSums };
 }
 

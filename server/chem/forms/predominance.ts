@@ -58,9 +58,9 @@ export function predominantAt(boundaries: readonly Boundary[], pH: Decimal): num
 }
 
 /**
- * A boundary is a quotient of a decimal (60 places) by at most 64. Unless it is a tie itself, it
- * lies at least 1/128 of 10⁻⁶⁰, or of a unit in the place rounded to, from one: quotients of 200
- * digits round as the exact ones do.
+ * A boundary is a quotient of a decimal (150 places at most) by at most 64. Unless it is a tie
+ * itself, it lies at least 1/128 of 10⁻¹⁵⁰, or of a unit in the place rounded to, from one:
+ * quotients of 200 digits round as the exact ones do.
  */
 const quotientDigits = 200;
 

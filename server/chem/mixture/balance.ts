@@ -1,10 +1,8 @@
 import type { ActivityChoice, SizedIon } from '../activity/coefficients';
+import type { ConstantKind } from '../constants/constant-kind';
 import { Exact } from '../decimals/contexts';
 import { nth } from '../decimals/nth';
 import type Decimal from 'decimal.js';
-
-/** What activities and concentrations a constant is written in. */
-export type ConstantKind = 'thermodynamic' | 'mixed' | 'concentration';
 
 /** An acid–base system in a solution. Decimals as strings, taken as exact and validated. */
 export interface Acid {

@@ -93,6 +93,18 @@ export class DecimalBalance {
     }, this.leftover.plus(hydrogen).minus(hydroxide));
   }
 
+  /** Total of every acid and the fraction of it that each species is. */
+  acidsAt(u: Decimal, at: AtState): { total: Decimal; fractions: Decimal[] }[] {
+    return this.acids.map(({ acid, amount }, k) => {
+      const { terms, total } = termsOf(u, nth(at.constants, k), acid);
+      const sum = acid.held ? terms.reduce((all, term) => all.plus(term)) : total;
+      return {
+        total: acid.held ? amount.times(sum).dividedBy(total) : amount,
+        fractions: terms.map((term) => term.dividedBy(sum)),
+      };
+    });
+  }
+
   /** Concentrations of all ions and neutral species, in the order of `ionsOf`. */
   molalities(u: Decimal, at: AtState): Decimal[] {
     return [
@@ -115,14 +127,11 @@ export class DecimalBalance {
 /** K′_i = K_i γ_{i−1}/γ_i of thermodynamic, K_i γ(H⁺) of concentration, K_i of mixed constants. */
 function effective({ acid, constants, first }: PreparedAcid, gamma: readonly Decimal[]): Decimal[] {
   return constants.map((constant, i) => {
-    switch (acid.kinds[i]) {
-      case 'thermodynamic':
-        return constant.times(nth(gamma, first + i)).dividedBy(nth(gamma, first + i + 1));
-      case 'concentration':
-        return constant.times(nth(gamma, 0));
-      default:
-        return constant;
+    const kind = acid.kinds[i];
+    if (kind === 'thermodynamic') {
+      return constant.times(nth(gamma, first + i)).dividedBy(nth(gamma, first + i + 1));
     }
+    return kind === 'concentration' ? constant.times(nth(gamma, 0)) : constant;
   });
 }
 

@@ -1,11 +1,11 @@
 import { type Coefficients, coefficientsOf } from '../activity/coefficients';
 import { doubles } from '../decimals/arithmetic';
 import { nth } from '../decimals/nth';
-import { fallingRoot, ln10, lnTerms } from '../forms/doubles';
+import { fallingRoot, lnOfTen, lnTerms } from '../forms/doubles';
 import { type Acid, type Balance, ionsOf, leftoverCharge } from './balance';
 
 /** Beyond these pH no double tells [H⁺] or [OH⁻] from nothing or everything. */
-const farthest = 290 * ln10;
+const farthest = 290 * lnOfTen;
 
 interface Evaluated {
   /** Charge over, mol/L: falls with pH. */
@@ -34,7 +34,7 @@ function lnSumsOf(acid: Acid, lgGamma: readonly number[], lgGammaH: number): num
         : kind === 'concentration'
           ? -lgGammaH
           : 0;
-    sums.push(nth(sums, i) + (Number(constant) + shift) * ln10);
+    sums.push(nth(sums, i) + (Number(constant) + shift) * lnOfTen);
   });
   return sums;
 }
@@ -62,7 +62,7 @@ export class DoubleBalance {
     this.leftover = Number(leftoverCharge(balance));
     this.amounts = balance.acids.map(({ amount }) => Number(amount));
     this.inert = balance.inert.map(({ concentration }) => Number(concentration));
-    this.lnKw = balance.pKw === undefined ? undefined : -Number(balance.pKw) * ln10;
+    this.lnKw = balance.pKw === undefined ? undefined : -Number(balance.pKw) * lnOfTen;
   }
 
   /** lg γ of every ion for a state. */
@@ -99,8 +99,8 @@ export class DoubleBalance {
   private water(lnU: number, lgGamma: readonly number[]): [number, number] {
     if (this.lnKw === undefined) return [0, 0];
     return [
-      Math.exp(-lnU - nth(lgGamma, 0) * ln10),
-      Math.exp(lnU + this.lnKw - nth(lgGamma, 1) * ln10),
+      Math.exp(-lnU - nth(lgGamma, 0) * lnOfTen),
+      Math.exp(lnU + this.lnKw - nth(lgGamma, 1) * lnOfTen),
     ];
   }
 
@@ -140,7 +140,7 @@ export class DoubleBalance {
 }
 
 /** The root of the balance: the bracket grows around the start until the sign differs. */
-function bracketed(at: (lnU: number) => Evaluated, start = 7 * ln10): number {
+function bracketed(at: (lnU: number) => Evaluated, start = 7 * lnOfTen): number {
   const here = at(start).value;
   if (here === 0) return start;
   const direction = here > 0 ? 1 : -1;
