@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react';
 import { Path } from 'react-native-svg';
 import { useTheme } from '../ui/theme';
+import { clipCurve } from './clip-curve';
 import type { Rect } from './geometry';
 import { bottom } from './geometry';
 import { linePath } from './line-path';
@@ -10,13 +11,20 @@ import { linearScale } from './scale';
 import type { StairRange } from './stair';
 import { wholeSteps } from './whole-steps';
 
+interface ChargePoint {
+  readonly pH: number;
+  readonly charge: number;
+}
+
 interface ChargePanelProps {
   readonly rect: Rect;
   readonly x: Scale;
   /** Charge of the fully protonated and of the fully deprotonated form. */
   readonly charges: readonly [number, number];
   readonly ranges: readonly StairRange[];
-  readonly points: readonly { readonly pH: number; readonly charge: number }[];
+  readonly points: readonly ChargePoint[];
+  /** Curves that are compared with, thin. */
+  readonly ghosts?: readonly { readonly key: string; readonly points: readonly ChargePoint[] }[];
   readonly head?: ReactNode;
   readonly inside?: boolean;
 }
@@ -31,7 +39,7 @@ const minus = '\u2212';
  * the buffer region.
  */
 export function ChargePanel(props: ChargePanelProps) {
-  const { rect, x, charges, ranges, points, head, inside = false } = props;
+  const { rect, x, charges, ranges, points, ghosts = [], head, inside = false } = props;
   const { colours } = useTheme();
   const y = chargeScale(charges, rect);
   const ghost = ranges
@@ -41,7 +49,15 @@ export function ChargePanel(props: ChargePanelProps) {
       return `L${start} ${y(charge)}H${end}`;
     })
     .join('');
-  const curve = points.map(({ pH, charge }) => ({ x: x(pH), y: y(charge), drawn: true }));
+  const [least, most] = [Math.min(...charges), Math.max(...charges)];
+  // A curve beside may carry charges that the axis of this one does not reach.
+  const pathOf = (curve: readonly ChargePoint[]) =>
+    linePath(
+      clipCurve(
+        curve.map(({ pH, charge }) => ({ x: x(pH), y: charge })),
+        [least, most],
+      ).map((point) => ({ ...point, y: y(point.y) })),
+    );
   return (
     <>
       <PanelFrame
@@ -56,7 +72,17 @@ export function ChargePanel(props: ChargePanelProps) {
         }))}
       />
       <Path d={`M${ghost.slice(1)}`} stroke={colours.edge} strokeWidth={1} fill="none" />
-      <Path d={linePath(curve)} stroke={colours.ink} strokeWidth={2.25} fill="none" />
+      {ghosts.map(({ key, points: curve }) => (
+        <Path
+          key={key}
+          d={pathOf(curve)}
+          stroke={colours.inkSoft}
+          strokeWidth={1.25}
+          strokeDasharray="5 3"
+          fill="none"
+        />
+      ))}
+      <Path d={pathOf(points)} stroke={colours.ink} strokeWidth={2.25} fill="none" />
     </>
   );
 }

@@ -5,6 +5,8 @@ const italic = { fontFamily: fonts.numbers, fontStyle: 'italic' } as const;
 
 /** Signs of quantities inside a FigureText: italic as quantities are, in the face that has them. */
 export const alphaSign = <TSpan {...italic}>α</TSpan>;
+export const betaSign = <TSpan {...italic}>β</TSpan>;
+export const concentrationSign = <TSpan {...italic}>c</TSpan>;
 export const meanChargeSign = <TSpan {...italic}>{'z\u0304'}</TSpan>;
 export const activitySign = <TSpan {...italic}>a</TSpan>;
 export const ionicStrengthSign = <TSpan {...italic}>I</TSpan>;
