@@ -1,7 +1,7 @@
 import type Decimal from 'decimal.js';
 import type { Context } from '../decimals/contexts';
 import { gasConstant } from '../water/physical-constants';
-import { type Relation, toDigits } from '../water/right-digits';
+import { type Relation, toDigits } from '../decimals/right-digits';
 
 /** θ in K: the temperature that constants and enthalpies are tabulated at. */
 export const referenceKelvin = '298.15';

@@ -1,5 +1,12 @@
 import type Decimal from 'decimal.js';
-import { clearance, keptForPlaces, roundsOneWay, writePlaces, writeSignificant } from './rounding';
+import {
+  clearance,
+  keptForPlaces,
+  roundsOneWay,
+  tieNear,
+  writePlaces,
+  writeSignificant,
+} from './rounding';
 
 /** How a number of an answer is rounded and written. */
 interface Form {
@@ -41,7 +48,15 @@ const mostDoublings = 3;
 /** Digits behind the last one kept that a tie is told by. */
 const tieDigits = 40;
 
-const decided = ({ value, form }: Found) => value.isZero() || roundsOneWay(value, form.kept(value));
+/** Whether everything within 10^−`sure` of a unit in the first digit rounds to the same. */
+function decided({ value, form }: Found, sure: number): boolean {
+  const kept = form.kept(value);
+  if (value.isZero() || roundsOneWay(value, kept)) return true;
+  return tieNear(value, kept)
+    .minus(value)
+    .abs()
+    .greaterThan(`1e${value.e - sure}`);
+}
 
 /**
  * Numbers rounded half-even, every digit right. Where an error interval holds a tie, precision is
@@ -52,13 +67,14 @@ export function settleAll({ digits, loss, at }: Finding): string[] {
   const planned = digits + loss + clearance;
   let found = at(planned);
   const written: (string | undefined)[] = found.map((one) =>
-    decided(one) ? one.form.write(one.value) : undefined,
+    decided(one, planned - loss) ? one.form.write(one.value) : undefined,
   );
   for (let doubling = 1; written.includes(undefined); doubling++) {
-    found = at(Math.max(planned * 2 ** doubling, planned + 2 * tieDigits));
+    const precision = Math.max(planned * 2 ** doubling, planned + 2 * tieDigits);
+    found = at(precision);
     found.forEach((one, i) => {
       if (written[i] !== undefined) return;
-      if (decided(one)) written[i] = one.form.write(one.value);
+      if (decided(one, precision - loss)) written[i] = one.form.write(one.value);
       else if (doubling === mostDoublings) {
         const tie = one.value.toSignificantDigits(
           Math.max(1, one.form.kept(one.value)) + tieDigits,

@@ -150,7 +150,9 @@ function rootAt(problem: Balance, doubles: DoubleBalance, state: readonly number
       const { exponent, mantissas } = scaled(rest);
       const by = solveLinear(matrix, mantissas);
       if (!by) throw new Diverged('no-convergence');
-      now = now.map((x, i) => x.plus(new context(nth(by, i) * nth(scale, i)).times(`1e${exponent}`)));
+      now = now.map((x, i) =>
+        x.plus(new context(nth(by, i) * nth(scale, i)).times(`1e${exponent}`)),
+      );
       at = balance.at(now);
       settle();
       const largest = Math.max(...by.map(Math.abs));

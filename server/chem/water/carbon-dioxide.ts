@@ -1,6 +1,6 @@
 import type Decimal from 'decimal.js';
 import type { Context } from '../decimals/contexts';
-import { toDigits } from './right-digits';
+import { toDigits } from '../decimals/right-digits';
 
 /** lg K = a + b T + c/T + d lg T + e/T², T in K. */
 const coefficients = {

@@ -8,7 +8,7 @@ import {
   electricConstant,
   elementaryCharge,
 } from './physical-constants';
-import { type Relation, toDigits } from './right-digits';
+import { type Relation, toDigits } from '../decimals/right-digits';
 
 /** A in (kg/mol)^½ for lg γ, and B in (kg/mol)^½/nm. */
 export interface DebyeHuckelConstants {

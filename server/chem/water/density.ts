@@ -1,7 +1,7 @@
 import type Decimal from 'decimal.js';
 import { type Context, Exact } from '../decimals/contexts';
 import { zeroCelsius } from './kelvin';
-import { type Relation, toDigits } from './right-digits';
+import { type Relation, toDigits } from '../decimals/right-digits';
 
 /** Coefficients of t^0 … t^5 in the numerator, kg/m³ and °C; of t in the denominator. */
 const numerator = [

@@ -1,7 +1,7 @@
 import type Decimal from 'decimal.js';
 import type { Context } from '../decimals/contexts';
 import { densityIn } from './density';
-import { type Relation, toDigits } from './right-digits';
+import { type Relation, toDigits } from '../decimals/right-digits';
 
 /** Waters around the two ions. */
 const coordination = 6;

@@ -1,7 +1,7 @@
 import type Decimal from 'decimal.js';
 import type { Context } from '../decimals/contexts';
 import { densityIn } from './density';
-import { type Relation, toDigits } from './right-digits';
+import { type Relation, toDigits } from '../decimals/right-digits';
 
 /** N of the term N (ρ/ρc)^i (Tc/T)^j, with i and 4j as integers. */
 const terms: readonly (readonly [coefficient: string, i: number, quartersOfJ: number])[] = [

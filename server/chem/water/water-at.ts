@@ -5,7 +5,7 @@ import { densityRelation } from './density';
 import { ionProductRelation } from './ion-product';
 import { kelvinOf } from './kelvin';
 import { permittivityRelation } from './permittivity';
-import { toPlaces } from './right-digits';
+import { toPlaces } from '../decimals/right-digits';
 
 /**
  * What an answer prints of its solvent. The engine takes these very decimals as exact, so that a

@@ -1,5 +1,5 @@
 import type Decimal from 'decimal.js';
-import { type Context, contextOf, Exact } from '../decimals/contexts';
+import { type Context, contextOf, Exact } from './contexts';
 import {
   clearance,
   keptForPlaces,
@@ -7,7 +7,7 @@ import {
   tieNear,
   unitExponent,
   writePlaces,
-} from '../decimals/rounding';
+} from './rounding';
 
 /** A number that a formula fixes for its arguments, which are exact. */
 export interface Relation {

@@ -1,12 +1,12 @@
-import { contextOf, Exact } from '../../../../server/chem/decimals/contexts';
-import { pKRelation } from '../../../../server/chem/constants/pk-at-temperature';
-import { henryExponent } from '../../../../server/chem/water/carbon-dioxide';
-import { debyeHuckel, debyeHuckelRelations } from '../../../../server/chem/water/debye-huckel';
-import { density, densityRelation } from '../../../../server/chem/water/density';
-import { ionProductExponent, ionProductRelation } from '../../../../server/chem/water/ion-product';
-import { kelvinOf } from '../../../../server/chem/water/kelvin';
-import { permittivity, permittivityRelation } from '../../../../server/chem/water/permittivity';
-import { type Relation, toDigits, toPlaces } from '../../../../server/chem/water/right-digits';
+import { contextOf, Exact } from '../../../server/chem/decimals/contexts';
+import { pKRelation } from '../../../server/chem/constants/pk-at-temperature';
+import { henryExponent } from '../../../server/chem/water/carbon-dioxide';
+import { debyeHuckel, debyeHuckelRelations } from '../../../server/chem/water/debye-huckel';
+import { density, densityRelation } from '../../../server/chem/water/density';
+import { ionProductExponent, ionProductRelation } from '../../../server/chem/water/ion-product';
+import { kelvinOf } from '../../../server/chem/water/kelvin';
+import { permittivity, permittivityRelation } from '../../../server/chem/water/permittivity';
+import { type Relation, toDigits, toPlaces } from '../../../server/chem/decimals/right-digits';
 
 const decimal = (value: string) => new Exact(value);
 const temperatures = ['0', '0.01', '3.98', '25', '25.00000000000000000001', '37', '61.7', '100'];
