@@ -57,7 +57,7 @@ export function CapacityPanel(props: CapacityPanelProps) {
     [lines, x, y, top],
   );
   const under = useMemo(() => {
-    const whole = filled ? lines.find(({ kind }) => kind === 'whole') : undefined;
+    const whole = filled ? lines.find(({ kind, style }) => kind === 'whole' && !style) : undefined;
     if (!whole) return undefined;
     const edge = whole.values.map((value, i) => ({
       x: x(whole.pH[i] ?? 0),

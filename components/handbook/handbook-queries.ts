@@ -1,6 +1,7 @@
 import {
   infiniteQueryOptions,
   keepPreviousData,
+  queryOptions,
   useInfiniteQuery,
   useQuery,
   useQueryClient,
@@ -61,10 +62,12 @@ export function useSystemSearch(text: string, limit: number, enabled = true) {
 
 export type SystemSearch = ReturnType<typeof useSystemSearch>;
 
-/** One system with every determination. */
-export const useSystem = (id: string) =>
-  useQuery<StoredSystem, ProblemError>({
+export const systemQuery = (id: string) =>
+  queryOptions<StoredSystem, ProblemError>({
     queryKey: ['system', id],
     queryFn: ({ signal }) => client.publicSystems.read(id, { signal }),
     staleTime: Infinity,
   });
+
+/** One system with every determination. */
+export const useSystem = (id: string) => useQuery(systemQuery(id));

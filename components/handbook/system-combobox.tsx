@@ -1,4 +1,4 @@
-import { useId, useRef, useState } from 'react';
+import { useEffect, useId, useRef, useState } from 'react';
 import { View, type TextInput } from 'react-native';
 import { ChoiceList } from '../ui/choice-list';
 import { Field, type FieldKey } from '../ui/field';
@@ -16,6 +16,8 @@ interface SystemComboboxProps {
   readonly value: string;
   readonly onPick: (id: string) => void;
   readonly onTypeOwn: () => void;
+  /** It was asked for a moment ago: the next key is its. */
+  readonly startsFocused?: boolean;
 }
 
 interface Typing {
@@ -32,7 +34,13 @@ const shownAtMost = 20;
 const leastWidth = 280;
 
 /** Finds a system while it is typed. */
-export function SystemCombobox({ label, value, onPick, onTypeOwn }: SystemComboboxProps) {
+export function SystemCombobox({
+  label,
+  value,
+  onPick,
+  onTypeOwn,
+  startsFocused = false,
+}: SystemComboboxProps) {
   const id = useId();
   const input = useRef<TextInput>(null);
   const latest = useRef<string>(undefined);
@@ -42,6 +50,10 @@ export function SystemCombobox({ label, value, onPick, onTypeOwn }: SystemCombob
   const isTyped = text !== undefined && text.trim() !== '';
   const search = useSystemSearch(text ?? '', shownAtMost, open && isTyped);
   const isSlow = useLong(isTyped && online && !search.isCurrent && !search.error);
+
+  useEffect(() => {
+    if (startsFocused) input.current?.focus();
+  }, [startsFocused]);
 
   const options = systemOptions(isTyped ? (search.systems ?? []) : undefined);
   const hasMatch = isTyped && search.isCurrent && options.length > 1;

@@ -3,7 +3,7 @@ import type { IconName } from '../ui/icon';
 
 /** A place of the app and the question it answers. */
 export interface Place {
-  readonly href: '/' | '/systems' | '/keys' | '/api' | '/notes';
+  readonly href: '/' | '/mixture' | '/systems' | '/keys' | '/api' | '/notes';
   readonly label: string;
   readonly question: string;
   readonly icon: IconName;
@@ -18,6 +18,12 @@ const places: readonly Place[] = [
     label: 'Curves',
     question: 'What forms are present at this pH?',
     icon: 'curves',
+  },
+  {
+    href: '/mixture',
+    label: 'Mixture',
+    question: 'What will the pH be?',
+    icon: 'mixture',
   },
   {
     href: '/systems',

@@ -10,6 +10,8 @@ import { Words } from './words';
 export interface Option<Value extends string> {
   readonly value: Value;
   readonly label: string;
+  /** Stands in the label's place, as a formula does; the label is still what letters find. */
+  readonly shown?: ReactNode;
   readonly note?: ReactNode;
 }
 
@@ -103,7 +105,7 @@ export function ChoiceList<Value extends string>({
             style={[styles.option, index === at && { backgroundColor: colours.wash }]}
           >
             <View style={styles.words}>
-              <Words>{option.label}</Words>
+              <Words>{option.shown ?? option.label}</Words>
               {option.note !== undefined && <Words kind="help">{option.note}</Words>}
             </View>
             {index === chosen && <Icon name="check" size={16} tone="well" />}

@@ -107,7 +107,7 @@ export function Choice<Value extends string>({
         ]}
       >
         <View style={styles.value}>
-          <Words numberOfLines={1}>{options[chosen]?.label ?? ''}</Words>
+          <Words numberOfLines={1}>{options[chosen]?.shown ?? options[chosen]?.label ?? ''}</Words>
         </View>
         <Icon name="chevron-down" />
       </View>

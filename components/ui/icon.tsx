@@ -4,6 +4,8 @@ import { useTheme, type Colours } from './theme';
 /** Paths on a 24 grid, drawn with a 1.75 stroke. */
 const paths = {
   curves: 'M3 18h1.5C11 18 13 6 19.5 6H21M3 6h1.5C11 6 13 18 19.5 18H21',
+  mixture:
+    'M12 3.5c3.7 4.2 5.75 7.2 5.75 10.5a5.75 5.75 0 0 1-11.5 0C6.25 10.7 8.3 7.7 12 3.5ZM6.5 13.5h11',
   systems: 'M4.5 4.5h15v15h-15ZM4.5 9.5h15M4.5 14.5h15M9.5 9.5v10',
   code: 'M8.5 7 3.5 12l5 5M15.5 7l5 5-5 5M13.5 5l-3 14',
   notes: 'M6 3.5h8.5l4 4v13H6ZM14.5 3.5v4h4M9.5 12h5.5M9.5 16h5.5',

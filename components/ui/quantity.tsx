@@ -13,6 +13,7 @@ const quantities = {
   concentration: { italic: 'c', spoken: 'concentration' },
   ionicStrength: { italic: 'I', spoken: 'ionic strength' },
   activity: { italic: 'a', spoken: 'activity' },
+  activityCoefficient: { italic: '\u03b3', spoken: 'activity coefficient' },
   pK: { upright: 'p', italic: 'K', spoken: 'p K' },
   pKa: { upright: 'p', italic: 'K', index: 'a', spoken: 'p K a' },
   deltaH: { upright: 'Δ', italic: 'H', degree: true, spoken: 'standard enthalpy change' },
@@ -24,6 +25,9 @@ const quantities = {
     spoken: 'standard heat capacity change',
   },
   uncertainty: { italic: 'u', spoken: 'standard uncertainty' },
+  pKw: { upright: 'p', italic: 'K', index: 'w', spoken: 'p K w' },
+  pKStandard: { upright: 'p', italic: 'K', degree: true, spoken: 'p K standard' },
+  isoelectricPoint: { upright: 'p', italic: 'I', spoken: 'isoelectric point p I' },
   pKPrime: { upright: 'p', italic: 'K', prime: true, spoken: 'p K prime' },
 } as const;
 

@@ -1,0 +1,1 @@
+export { MixtureScreen as default } from '../../components/mixture/mixture-screen';

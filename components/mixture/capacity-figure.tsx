@@ -1,0 +1,102 @@
+import { useMemo, type ReactNode, type Ref } from 'react';
+import { View } from 'react-native';
+import Svg from 'react-native-svg';
+import { CapacityPanel, capacityScale, type CapacityLine } from '../chart/capacity-panel';
+import { FigureCursor, tabCentre } from '../chart/figure-cursor';
+import { right } from '../chart/geometry';
+import { PhAxis } from '../chart/ph-axis';
+import { linearScale } from '../chart/scale';
+import { betaSign } from '../chart/symbols';
+import { ValueDot } from '../chart/value-dot';
+import { useTheme } from '../ui/theme';
+import { CapacityNames } from './capacity-names';
+import type { DrawnCapacity } from './drawn-capacity';
+import { shownPH } from './rounded';
+
+interface CapacityFigureProps {
+  readonly drawn: DrawnCapacity;
+  /** The figure in words. */
+  readonly sentence: string;
+  readonly width: number;
+  readonly height: number;
+  readonly compact: boolean;
+  /** Conditions, printed under the axis where there is room. */
+  readonly caption: ReactNode;
+  readonly ref?: Ref<View>;
+}
+
+const room = {
+  wide: { left: 36, right: 14, top: 34, axis: 58 },
+  compact: { left: 16, right: 16, top: 28, axis: 42 },
+} as const;
+
+/** Buffer capacity of the mixture around its pH: the whole, and the part of each system. */
+export function CapacityFigure(props: CapacityFigureProps) {
+  const { drawn, sentence, width, height, compact, caption, ref } = props;
+  const { series } = useTheme();
+  const own = room[compact ? 'compact' : 'wide'];
+  const axis = height - own.axis;
+  const rect = useMemo(
+    () => ({
+      x: own.left,
+      y: own.top,
+      width: width - own.left - own.right,
+      height: axis - own.top,
+    }),
+    [own, width, axis],
+  );
+  const x = useMemo(() => linearScale(drawn.range, [rect.x, right(rect)]), [drawn, rect]);
+  const y = useMemo(() => capacityScale(rect, drawn.top), [rect, drawn]);
+  const lines = useMemo(
+    () => [
+      ...drawn.parts.map(({ series: index, values }): CapacityLine => ({
+        key: String(index),
+        pH: drawn.pH,
+        values,
+        kind: 'whole',
+        style: series(index),
+      })),
+      { key: 'whole', pH: drawn.pH, values: drawn.whole, kind: 'whole' } as const,
+    ],
+    [drawn, series],
+  );
+  const cursor = x(drawn.at.pH);
+  const pH = shownPH(String(drawn.at.pH)).replace('-', '\u2212');
+  const line = { x: cursor, top: own.top - 10, axis, width, text: pH };
+  return (
+    <View ref={ref} role="img" aria-label={sentence}>
+      <Svg width={width} height={height} aria-hidden>
+        <CapacityPanel
+          rect={rect}
+          x={x}
+          top={drawn.top}
+          lines={lines}
+          filled
+          inside={compact}
+          head={
+            <>
+              {betaSign}
+              {compact
+                ? '  in mmol/L per pH'
+                : '  buffer capacity of the mixture, in mmol/L per pH'}
+            </>
+          }
+        />
+        <PhAxis
+          x={x}
+          domain={drawn.range}
+          y={axis}
+          tab={tabCentre(cursor, width)}
+          titled={!compact}
+          caption={compact ? undefined : caption}
+        />
+        <FigureCursor {...line} part="line" />
+        <CapacityNames drawn={drawn} rect={rect} x={x} y={y} cursor={cursor} />
+        {drawn.at.value <= drawn.top && (
+          <ValueDot x={cursor} y={y(drawn.at.value)} limit={right(rect)} text={drawn.at.text} />
+        )}
+        <FigureCursor {...line} part="tab" />
+      </Svg>
+    </View>
+  );
+}
