@@ -5,19 +5,31 @@ import type { Scale } from '../chart/scale';
 import { meanChargeSign } from '../chart/symbols';
 import type { DrawnCurve } from './drawn-curve';
 import { endCharges } from './drawn-curve';
+import type { BesideCurve } from './figure-extras';
+
+const chargesOf = ({ curve }: DrawnCurve) =>
+  curve.pH.map((pH, i) => ({ pH, charge: curve.meanCharge[i] ?? 0 }));
 
 interface ChargeLineProps {
   readonly drawn: DrawnCurve;
+  readonly beside: readonly BesideCurve[];
   readonly rect: Rect;
   readonly x: Scale;
   readonly compact: boolean;
 }
 
 /** The mean charge over pH. */
-export const ChargeLine = memo(function ChargeLine({ drawn, rect, x, compact }: ChargeLineProps) {
-  const points = useMemo(
-    () => drawn.curve.pH.map((pH, i) => ({ pH, charge: drawn.curve.meanCharge[i] ?? 0 })),
-    [drawn],
+export const ChargeLine = memo(function ChargeLine({
+  drawn,
+  beside,
+  rect,
+  x,
+  compact,
+}: ChargeLineProps) {
+  const points = useMemo(() => chargesOf(drawn), [drawn]);
+  const ghosts = useMemo(
+    () => beside.map(({ name, drawn: other }) => ({ key: name, points: chargesOf(other) })),
+    [beside],
   );
   return (
     <ChargePanel
@@ -26,6 +38,7 @@ export const ChargeLine = memo(function ChargeLine({ drawn, rect, x, compact }: 
       charges={endCharges(drawn)}
       ranges={drawn.stair}
       points={points}
+      ghosts={ghosts}
       inside={compact}
       head={compact ? undefined : <>{meanChargeSign} mean charge</>}
     />

@@ -1,27 +1,34 @@
+import { modelInShort } from '../conditions/activity-models';
 import type { DrawnCurve } from './drawn-curve';
 
 /** What a curve holds for, each part as it is written. */
-export interface Conditions {
+export interface CurveHoldsFor {
   /** °C. */
   readonly temperature: string;
   /** mol/L; undefined where no constant's medium is stated. */
   readonly ionicStrength: string | undefined;
-  readonly model: 'ideal' | 'as given';
+  /** The activity model, or `as given`. */
+  readonly model: string;
 }
 
 const distinct = (values: readonly string[]) => [...new Set(values)].join(', ');
 
 /**
- * The model is ideal, at 25 °C. Constants that were measured in a medium or at another temperature
- * are drawn as given, and the curve holds there.
+ * The conditions of the answer; but where its constants were used as given, measured in a medium or
+ * at another temperature, the curve holds there, and nothing else is said of it.
  */
-export function conditionsOf({ constants, answer }: DrawnCurve): Conditions {
-  const { temperature, ionicStrength } = answer.model.conditions;
-  const isOfModel = constants.every(
-    (constant) =>
-      constant.kind === 'thermodynamic' && Number(constant.temperature) === Number(temperature),
+export function conditionsOf({ constants, answer }: DrawnCurve): CurveHoldsFor {
+  const { temperature, ionicStrength, activityModel } = answer.model.conditions;
+  const codes = new Set(answer.model.warnings.map(({ code }) => code));
+  const elsewhere = constants.some(
+    (constant) => Number(constant.temperature) !== Number(temperature),
   );
-  if (isOfModel) return { temperature, ionicStrength, model: 'ideal' };
+  const isDefault =
+    activityModel === 'ideal' && Number(ionicStrength) === 0 && temperature === '25';
+  const asGiven =
+    codes.has('constants-at-their-medium') ||
+    (isDefault && elsewhere && codes.has('pka-not-temperature-corrected'));
+  if (!asGiven) return { temperature, ionicStrength, model: modelInShort(activityModel) };
   const media = constants.flatMap((constant) => constant.ionicStrength ?? []);
   return {
     temperature: distinct(constants.map((constant) => constant.temperature)),

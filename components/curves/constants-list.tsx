@@ -7,34 +7,24 @@ import { Button } from '../ui/button';
 import { Quantity } from '../ui/quantity';
 import { space } from '../ui/theme';
 import { Words } from '../ui/words';
+import { isMoved, type DrawnCurve } from './drawn-curve';
+import { MovedConstants } from './moved-constants';
 import { ValueRow } from './read-out-row';
 
 interface ConstantsListProps {
   /** Id of the system whose constants they are. */
   readonly id: string;
-  readonly constants: readonly Constant[];
+  readonly drawn: DrawnCurve;
   readonly onTypeOwn: () => void;
 }
 
-/** A stored system's constants as given, and where they are from. */
-export function ConstantsList({ id, constants, onTypeOwn }: ConstantsListProps) {
+/** A stored system's constants as given, what conditions make of them, where they are from. */
+export function ConstantsList({ id, drawn, onTypeOwn }: ConstantsListProps) {
+  const { constants } = drawn;
   const bases = basesOf(constants);
   return (
     <View style={styles.list}>
-      <View role="table" aria-label="Constants">
-        {constants.map(({ step, value, estimate, approximate }) => (
-          <ValueRow
-            key={step}
-            label={
-              <Words>
-                <Quantity of="pKa" index={step} />
-                {estimate ? ' estimate' : approximate && ' approximate'}
-              </Words>
-            }
-            value={value}
-          />
-        ))}
-      </View>
+      {isMoved(drawn) ? <MovedConstants drawn={drawn} /> : <GivenConstants constants={constants} />}
       {bases.map((basis) => (
         <BasisInShort key={basis.steps[0]} basis={basis} count={constants.length} />
       ))}
@@ -46,6 +36,25 @@ export function ConstantsList({ id, constants, onTypeOwn }: ConstantsListProps) 
           </Words>
         </Link>
       </View>
+    </View>
+  );
+}
+
+function GivenConstants({ constants }: { readonly constants: readonly Constant[] }) {
+  return (
+    <View role="table" aria-label="Constants">
+      {constants.map(({ step, value, estimate, approximate }) => (
+        <ValueRow
+          key={step}
+          label={
+            <Words>
+              <Quantity of="pKa" index={step} />
+              {estimate ? ' estimate' : approximate && ' approximate'}
+            </Words>
+          }
+          value={value}
+        />
+      ))}
     </View>
   );
 }

@@ -12,13 +12,14 @@ export const curveDigits = 6;
 
 const steps = ['0.02', '0.05', '0.1'] as const;
 const pointsAtMost = 701;
-const lowest = Number(limits.pH.from);
-const highest = Number(limits.pH.to);
+
+/** What the contract takes. */
+export const widestRange = [Number(limits.pH.from), Number(limits.pH.to)] as const;
+const [lowest, highest] = widestRange;
 
 /**
  * The pH range a system is drawn over: 0 to 14 at least, widened to the whole number that leaves
- * one unit beside an outlying constant, within the contract's −20…40. A stored system, whose
- * constants come only with its curve, is drawn over 0 to 14.
+ * one unit beside an outlying constant, within the contract's −20…40.
  */
 export function rangeOf(pKa: readonly string[]): readonly [number, number] {
   const values = pKa.map(Number);

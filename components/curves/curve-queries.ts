@@ -1,45 +1,48 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { createClient, ProblemError } from '../../shared/client';
-import { curveDigits, gridOf } from './curve-grid';
-import { systemAsked, type Choice } from '../constants/choice';
-import { givenConstants } from './curves-state';
+import { computeClient, patience, typingRest } from '../answer/compute-client';
+import { systemAsked } from '../constants/choice';
+import { useSettled } from '../ui/use-settled';
+import { givenConstants, type CurveAsked } from './curve-asked';
+import { conditionsAsked, firstConditions } from './curve-conditions';
+import { gridOf, type CurveGrid } from './curve-grid';
+import { curveBody } from './curve-request';
 import { drawnCurve } from './drawn-curve';
 import type { DrawnCurve } from './drawn-curve';
 import type { Reading } from './follow-curve';
 import { exactReading, followCurve } from './follow-curve';
-import { useSettled } from '../ui/use-settled';
 
-const client = createClient({ baseUrl: '' });
-
-const retriesAtMost = 3;
-const isPassing = ({ problem }: ProblemError) =>
-  problem.status === 429 || problem.status === 0 || problem.status >= 500;
-
-/** What passes by itself is tried again, when the service says so where it does. */
-const patience = {
-  staleTime: Infinity,
-  retry: (failures: number, error: Error) =>
-    error instanceof ProblemError && isPassing(error) && failures < retriesAtMost,
-  retryDelay: (failures: number, error: Error) =>
-    1000 * ((error instanceof ProblemError && error.retryAfter) || 2 ** failures),
-} as const;
-
-/** A choice while it is typed is asked for once it rests. */
-const typingRest = 200;
 /** The exact answer is asked for once the cursor rests, ms. */
 const cursorRest = 150;
 
-/** The curve of a system; the last one stays until the new one is there, or where it is refused. */
-export function useCurve(choice: Choice) {
-  const settled = useSettled(choice, choice.kind === 'typed' ? typingRest : 0);
+/** One curve over a grid; a stored system's own range comes with its constants. */
+export async function fetchCurve(
+  asked: CurveAsked,
+  signal: AbortSignal,
+  grid?: CurveGrid,
+): Promise<DrawnCurve> {
+  const over = async (pH: CurveGrid) =>
+    drawnCurve(asked, await computeClient.publicFractions(curveBody(asked, pH), { signal }), pH);
+  if (grid) return over(grid);
+  const first = gridOf(givenConstants(asked.choice));
+  const drawn = await over(first);
+  const own = gridOf(drawn.system.pKa);
+  const reaches = own.from === first.from && own.to === first.to;
+  return reaches ? drawn : over(own);
+}
+
+const isTyped = ({ choice, conditions }: CurveAsked) =>
+  choice.kind === 'typed' || conditions !== firstConditions;
+
+/**
+ * The curve that is asked for; the last one stays until the new one is there, or where it is
+ * refused. `asked` is the same object as long as the question is the same.
+ */
+export function useCurve(asked: CurveAsked) {
+  const settled = useSettled(asked, isTyped(asked) ? typingRest : 0);
   const query = useQuery({
     queryKey: ['curve', settled],
-    queryFn: async ({ signal }) => {
-      const pH = gridOf(givenConstants(settled));
-      const body = { system: systemAsked(settled), pH, digits: curveDigits };
-      return drawnCurve(settled, await client.publicFractions(body, { signal }));
-    },
+    queryFn: ({ signal }) => fetchCurve(settled, signal),
     ...patience,
   });
   const [last, setLast] = useState(query.data);
@@ -47,8 +50,8 @@ export function useCurve(choice: Choice) {
   return {
     ...query,
     drawn: query.data ?? last,
-    /** What is drawn is the choice, and not the one before it. */
-    isCurrent: query.data !== undefined && settled === choice,
+    /** What is drawn is what is asked for, and not what was before. */
+    isCurrent: query.data !== undefined && settled === asked,
   };
 }
 
@@ -56,12 +59,13 @@ export function useCurve(choice: Choice) {
 export function useReading(drawn: DrawnCurve | undefined, pH: string): Reading | undefined {
   const settled = useSettled(pH, cursorRest);
   const { data } = useQuery({
-    queryKey: ['reading', drawn?.choice, settled],
+    queryKey: ['reading', drawn?.asked, settled],
     enabled: drawn !== undefined,
     queryFn: async ({ signal }) => {
       if (!drawn) return null;
-      const body = { system: systemAsked(drawn.choice), pH: settled };
-      return exactReading(await client.publicFractions(body, { signal })) ?? null;
+      const { choice, conditions } = drawn.asked;
+      const body = { system: systemAsked(choice), pH: settled, ...conditionsAsked(conditions) };
+      return exactReading(await computeClient.publicFractions(body, { signal })) ?? null;
     },
     ...patience,
   });

@@ -9,14 +9,18 @@ import { PhAxis } from '../chart/ph-axis';
 import { linearScale } from '../chart/scale';
 import { usePlotDrag } from '../chart/use-plot-drag';
 import { webStyle } from '../ui/web-style';
+import { CapacityCurve } from './capacity-curve';
 import { ChargeLine } from './charge-line';
 import { CursorMarks } from './cursor-marks';
-import type { Layer } from './curves-state';
-import { describeCurve, describeReading } from './describe';
+import { firstState, type Layer } from './curves-state';
+import { describeFigure, describeReading } from './describe';
 import type { DrawnCurve } from './drawn-curve';
+import { noExtras, type FigureExtras } from './figure-extras';
 import { figureLayout } from './figure-layout';
 import type { Reading } from './follow-curve';
 import { FractionLines } from './fraction-lines';
+import { IsoelectricMark } from './isoelectric-mark';
+import { LgCLines } from './lg-c-lines';
 import { pHAt, pHEnd, pHStep } from './ph-steps';
 import { PredominanceStair } from './predominance-stair';
 
@@ -24,6 +28,9 @@ interface CurvesFigureProps {
   readonly drawn: DrawnCurve;
   readonly reading: Reading;
   readonly layers: readonly Layer[];
+  readonly extras?: FigureExtras;
+  /** Total that lg c is drawn for, mol/L. */
+  readonly total?: number;
   readonly width: number;
   readonly height: number;
   readonly compact: boolean;
@@ -36,6 +43,7 @@ interface CurvesFigureProps {
 /** The layers on one pH axis, with the cursor over all of them. */
 export function CurvesFigure(props: CurvesFigureProps) {
   const { drawn, reading, layers, width, height, compact, caption, onMove, ref } = props;
+  const { extras = noExtras, total = Number(firstState.total) } = props;
   const { range } = drawn;
   const layout = useMemo(
     () => figureLayout({ width, height, layers, compact }),
@@ -49,22 +57,37 @@ export function CurvesFigure(props: CurvesFigureProps) {
     onMove('to' in move ? pHEnd(move.to, range) : pHStep(reading.pH, move.by, move.sign, range));
   const line = { x: cursor, top: 4, axis: layout.axis, width, text: reading.pH };
   const shared = { drawn, x, compact, strong: reading.predominant };
+  const named = { ...shared, cursor, placing };
+  const { panels } = layout;
+  const { beside, capacity, isoelectricPoint } = extras;
   return (
     <View style={{ width, height: layout.height }}>
-      <View ref={ref} role="img" aria-label={describeCurve(drawn, reading)}>
+      <View ref={ref} role="img" aria-label={describeFigure(drawn, reading, layers, extras)}>
         <Svg width={width} height={layout.height} aria-hidden>
-          {layout.stair && (
+          {panels.predominance && (
             <PredominanceStair
               part="stone"
-              rect={layout.stair}
+              rect={panels.predominance}
               reading={reading}
               drawn={drawn}
               x={x}
             />
           )}
-          {layout.charge && <ChargeLine {...shared} rect={layout.charge} />}
-          {layout.fractions && (
-            <FractionLines {...shared} rect={layout.fractions} cursor={cursor} placing={placing} />
+          {panels.charge && <ChargeLine {...shared} beside={beside} rect={panels.charge} />}
+          {panels.capacity && (
+            <CapacityCurve extras={extras} rect={panels.capacity} x={x} compact={compact} />
+          )}
+          {panels['lg-c'] && (
+            <LgCLines {...named} rect={panels['lg-c']} total={total} capacity={capacity} />
+          )}
+          {panels.fractions && <FractionLines {...named} beside={beside} rect={panels.fractions} />}
+          {isoelectricPoint !== undefined && layers.includes('isoelectric-point') && (
+            <IsoelectricMark
+              pH={isoelectricPoint}
+              drawn={drawn}
+              layout={layout}
+              x={x(Number(isoelectricPoint))}
+            />
           )}
           <PhAxis
             x={x}
@@ -75,16 +98,23 @@ export function CurvesFigure(props: CurvesFigureProps) {
             caption={compact ? undefined : caption}
           />
           <FigureCursor {...line} part="line" />
-          {layout.stair && (
+          {panels.predominance && (
             <PredominanceStair
               part="text"
-              rect={layout.stair}
+              rect={panels.predominance}
               reading={reading}
               drawn={drawn}
               x={x}
             />
           )}
-          <CursorMarks layout={layout} drawn={drawn} reading={reading} cursor={cursor} />
+          <CursorMarks
+            layout={layout}
+            drawn={drawn}
+            extras={extras}
+            total={total}
+            reading={reading}
+            cursor={cursor}
+          />
           <FigureCursor {...line} part="tab" />
         </Svg>
       </View>

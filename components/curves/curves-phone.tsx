@@ -10,6 +10,7 @@ import { Dialog } from '../ui/dialog';
 import { Formula } from '../ui/formula';
 import { Icon } from '../ui/icon';
 import { Numerals } from '../ui/numerals';
+import { Quantity } from '../ui/quantity';
 import { space, useTheme } from '../ui/theme';
 import { Tabs } from '../ui/tabs';
 import { webStyle } from '../ui/web-style';
@@ -19,8 +20,9 @@ import { conditionsText } from './conditions-of';
 import { CurveNotices } from './curve-notices';
 import { CurvePlot } from './curve-plot';
 import { CurveWarnings } from './curve-warnings';
-import type { Layer, View as CurvesView } from './curves-state';
+import type { View as CurvesView } from './curves-state';
 import type { DrawnCurve } from './drawn-curve';
+import { TotalField } from './layer-boxes';
 import { NumbersTable } from './numbers-table';
 import { PhControl } from './ph-control';
 import { ReadOut } from './read-out';
@@ -38,9 +40,11 @@ const underPlot = 170;
 /** Gutters, mark and button beside the line under the title, px. */
 const besideSubtitle = 128;
 
-const shown: Readonly<Record<CurvesView, readonly Layer[]>> = {
-  fractions: ['fractions', 'predominance'],
-  charge: ['charge', 'predominance'],
+const viewNames: Readonly<Record<CurvesView, string>> = {
+  fractions: 'Fractions',
+  charge: 'Charge',
+  capacity: 'Capacity',
+  'lg-c': 'lg c',
 };
 
 /** Below 900 px: one column, the pH docked at the thumb. */
@@ -104,29 +108,46 @@ export function CurvesPhone({ curves }: { readonly curves: Curves }) {
           <Tabs
             label="What is drawn"
             tabs={[
-              { key: 'fractions', label: 'Fractions' },
-              { key: 'charge', label: 'Charge' },
+              { key: 'fractions', label: viewNames.fractions },
+              { key: 'charge', label: viewNames.charge },
+              { key: 'capacity', label: viewNames.capacity },
+              {
+                key: 'lg-c',
+                label: (
+                  <>
+                    lg <Quantity of="concentration" />
+                  </>
+                ),
+              },
             ]}
             current={state.view}
             onChange={(view) => change({ view })}
             panel="figure"
           />
         </View>
-        <CurveNotices {...curves} />
-        <View id="figure" role="tabpanel" aria-label={state.view} style={styles.edge}>
+        <CurveNotices curves={curves} atFields={false} />
+        <View id="figure" role="tabpanel" aria-label={viewNames[state.view]} style={styles.edge}>
           <CurvePlot
             curves={curves}
-            layers={shown[state.view]}
+            layers={curves.shown}
             height={height}
             compact
             figure={exports.figure}
           />
         </View>
+        {(state.view === 'capacity' || state.view === 'lg-c') && <TotalField {...curves} />}
         <CurveWarnings {...curves} />
         {drawn && reading && (
-          <ReadOut drawn={drawn} reading={reading} columns={window.width >= twoColumns} />
+          <ReadOut
+            drawn={drawn}
+            reading={reading}
+            shown={curves.shown}
+            extras={curves.extras}
+            total={state.total}
+            columns={window.width >= twoColumns}
+          />
         )}
-        {drawn && <NumbersTable drawn={drawn} />}
+        {drawn && <NumbersTable {...curves} drawn={drawn} total={state.total} />}
       </View>
       {reading && drawn && (
         <View

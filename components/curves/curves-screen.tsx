@@ -6,7 +6,7 @@ import { useCurves } from './use-curves';
 
 /** Curves: what forms are present at this pH. */
 export function CurvesScreen() {
-  const curves = useCurves();
   const { rail } = useLayout();
+  const curves = useCurves({ rail });
   return rail ? <CurvesWide curves={curves} /> : <CurvesPhone curves={curves} />;
 }

@@ -1,29 +1,71 @@
-import type { Choice, StoredChoice } from '../constants/choice';
+import type { StoredChoice } from '../constants/choice';
+import { firstChoice, type CurveAsked } from './curve-asked';
+import { firstConditions } from './curve-conditions';
 
-/** What can be drawn on the one pH axis. */
-export const layers = ['fractions', 'predominance', 'charge'] as const;
+/** What can be drawn on the one pH axis, from above. */
+export const layers = [
+  'fractions',
+  'predominance',
+  'charge',
+  'capacity',
+  'lg-c',
+  'isoelectric-point',
+] as const;
 export type Layer = (typeof layers)[number];
 
-/** Which of two views a phone shows. */
-export const views = ['fractions', 'charge'] as const;
+/** Which view a phone shows. */
+export const views = ['fractions', 'charge', 'capacity', 'lg-c'] as const;
 export type View = (typeof views)[number];
 
+/** What each view draws. */
+export const layersOfView: Readonly<Record<View, readonly Layer[]>> = {
+  fractions: ['fractions', 'predominance'],
+  charge: ['predominance', 'charge', 'isoelectric-point'],
+  capacity: ['predominance', 'capacity'],
+  'lg-c': ['lg-c'],
+};
+
+/** How many curves may be drawn beside the first. */
+export const besideAtMost = 2;
+
 /** Everything that makes the Curves screen what it is; the address carries it. */
-export interface CurvesState {
-  readonly choice: Choice;
+export interface CurvesState extends CurveAsked {
   readonly pH: string;
   readonly layers: readonly Layer[];
   readonly view: View;
+  /** Total concentration that capacity and lg c are drawn for, mol/L. */
+  readonly total: string;
+  /** Curves to compare with. */
+  readonly beside: readonly CurveAsked[];
 }
 
 /** What a first visit shows: something worth reading, at once. */
 export const firstState: CurvesState & { readonly choice: StoredChoice } = {
-  choice: { kind: 'stored', id: 'phosphoric-acid' },
+  choice: firstChoice,
+  conditions: firstConditions,
   pH: '7.40',
-  layers,
+  layers: ['fractions', 'predominance', 'charge'],
   view: 'fractions',
+  total: '0.05',
+  beside: [],
 };
 
-/** Constants that are known before the service has answered: a stored system's are not. */
-export const givenConstants = (choice: Choice): readonly string[] =>
-  choice.kind === 'typed' ? choice.system.pKa : [];
+/**
+ * What is worth comparing with first: the same system in a salt solution such as a physiological
+ * one, or without salt where there is some; then at body temperature.
+ */
+export function nextBeside({ choice, conditions, beside }: CurvesState): CurveAsked {
+  if (beside.length > 0) return { choice, conditions: { ...conditions, temperature: '37' } };
+  if (Number(conditions.ionicStrength) > 0) {
+    return { choice, conditions: { ...conditions, ionicStrength: '0' } };
+  }
+  const { activityModel } = conditions;
+  return {
+    choice,
+    conditions: {
+      ...conditions,
+      ionicStrength: '0.15',
+      activityModel: activityModel === 'ideal' ? 'davies' : activityModel,
+    },
+  };
+}

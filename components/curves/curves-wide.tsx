@@ -15,13 +15,13 @@ import { CurvePlot } from './curve-plot';
 import { ExportButtons } from './export-buttons';
 import { LayerBoxes } from './layer-boxes';
 import { NumbersTable } from './numbers-table';
-import { curveRequest } from './curve-request';
 import { SidePanel } from './side-panel';
 import { SystemInputs } from './system-inputs';
 import { linkTo } from './use-address';
 import { useCopy } from '../ui/use-copy';
 import type { Curves } from './use-curves';
 import { useExports } from './use-exports';
+import { useScreenRequest } from './use-screen-request';
 
 const headHeight = 76;
 const inputsWidth = { narrow: 232, wide: 224 } as const;
@@ -32,12 +32,13 @@ const plotAtMost = 960;
 
 /** From 900 px: inputs left, plot right of them, read-out under it or, from 1200 px, at its right. */
 export function CurvesWide({ curves }: { readonly curves: Curves }) {
-  const { state, title, drawn, change } = curves;
+  const { state, title, drawn } = curves;
   const { readOutAside } = useLayout();
   const { colours } = useTheme();
   const window = useWindowDimensions();
   const copy = useCopy();
   const exports = useExports(curves, { captioned: true });
+  const screenRequest = useScreenRequest(curves);
   const [drawer, setDrawer] = useState(false);
   const [exporting, setExporting] = useState(false);
   const inputs = inputsWidth[readOutAside ? 'wide' : 'narrow'];
@@ -45,6 +46,7 @@ export function CurvesWide({ curves }: { readonly curves: Curves }) {
   const height = readOutAside
     ? clamp(free - space[2], 400, 900)
     : clamp(free - underPlot, 360, 620);
+  const numbers = drawn && <NumbersTable {...curves} drawn={drawn} total={state.total} />;
   return (
     <>
       <Page
@@ -66,31 +68,30 @@ export function CurvesWide({ curves }: { readonly curves: Curves }) {
         <View style={styles.columns}>
           <View style={[styles.inputs, { width: inputs }]}>
             <SystemInputs {...curves} />
-            <LayerBoxes shown={state.layers} onChange={(layers) => change({ layers })} />
+            <LayerBoxes {...curves} />
           </View>
           <View style={[styles.plot, readOutAside && styles.plotStays]}>
-            <CurveNotices {...curves} />
+            <CurveNotices curves={curves} atFields />
             <CurvePlot
               curves={curves}
-              layers={state.layers}
+              layers={curves.shown}
               height={height}
               compact={false}
               figure={exports.figure}
             />
             {!readOutAside && <SidePanel curves={curves} columns />}
-            {!readOutAside && curves.drawn && <NumbersTable drawn={curves.drawn} />}
+            {!readOutAside && numbers}
           </View>
           {readOutAside && (
             <View style={[styles.aside, { borderLeftColor: colours.rule }]}>
               <SidePanel curves={curves} columns={false} />
-              {curves.drawn && <NumbersTable drawn={curves.drawn} />}
+              {numbers}
             </View>
           )}
         </View>
       </Page>
       <RequestDrawer
-        request={curveRequest(state.choice, globalThis.location.origin)}
-        gives="this curve"
+        {...screenRequest}
         open={drawer}
         onToggle={() => setDrawer(!drawer)}
         inputsWidth={inputs}

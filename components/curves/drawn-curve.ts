@@ -1,12 +1,11 @@
 import type { StairRange } from '../chart/stair';
 import type { FractionsAnswer } from '../../shared/fractions';
 import type { Constant } from '../../shared/constant';
-import type { Choice } from '../constants/choice';
 import type { SystemText } from '../constants/system-text';
-import { givenConstants } from './curves-state';
+import type { CurveAsked } from './curve-asked';
 import type { Curve } from './follow-curve';
 import { curveOf } from './follow-curve';
-import { rangeOf } from './curve-grid';
+import { gridOf, type CurveGrid } from './curve-grid';
 import { shownConstant } from './rounded';
 import type { PHRange } from './ph-steps';
 import { formulasOf } from './species-formulas';
@@ -16,7 +15,8 @@ import { formulasOf } from './species-formulas';
  * own formulas and range until the new one is there.
  */
 export interface DrawnCurve {
-  readonly choice: Choice;
+  readonly asked: CurveAsked;
+  readonly grid: CurveGrid;
   readonly answer: FractionsAnswer;
   readonly curve: Curve;
   /** The system as it was computed. */
@@ -36,16 +36,29 @@ export interface Meeting {
   readonly before: number;
   readonly after: number;
   readonly pH: number;
-  /** The constant as given; where a form between them never predominates, the mean of several. */
+  /**
+   * The constant as given where nothing moved it, else pK′; where a form between them never
+   * predominates, the mean of several.
+   */
   readonly text: string;
 }
 
-function meetingsOf({ predominance }: FractionsAnswer, pKa: readonly string[]): Meeting[] {
+/** A constant for reading: as given, or pK′ where conditions moved it. */
+const constantText = (given: string, effective: string) =>
+  Number(given) === Number(effective) ? shownConstant(given) : Number(effective).toFixed(3);
+
+function meetingsOf(
+  { predominance, effectivePKa }: FractionsAnswer,
+  pKa: readonly string[],
+): Meeting[] {
   return predominance.flatMap(({ species, from }, i) => {
     const before = predominance[i - 1]?.species;
     if (from === null || before === undefined) return [];
     const given = species === before + 1 ? pKa[before] : undefined;
-    const text = shownConstant(given ?? String(Number(from)));
+    const text =
+      given === undefined
+        ? shownConstant(String(Number(from)))
+        : constantText(given, effectivePKa[before] ?? given);
     return [{ before, after: species, pH: Number(from), text }];
   });
 }
@@ -54,21 +67,29 @@ function meetingsOf({ predominance }: FractionsAnswer, pKa: readonly string[]): 
 const worthDrawing = 0.05;
 const seriesCount = 8;
 
-export function drawnCurve(choice: Choice, answer: FractionsAnswer): DrawnCurve {
+/** What to draw of an answer, over the grid that it was asked for. */
+export function drawnCurve(
+  asked: CurveAsked,
+  answer: FractionsAnswer,
+  grid?: CurveGrid,
+): DrawnCurve {
+  const { choice } = asked;
   const curve = curveOf(answer);
   const [used] = answer.model.constantsUsed;
   if (!used) throw new Error('The answer names no system.');
   const { name, fullyProtonatedCharge, pKa, constants = [] } = used;
   const system = choice.kind === 'typed' ? choice.system : { name, fullyProtonatedCharge, pKa };
+  const drawnOver = grid ?? gridOf(pKa);
   const bound = (end: string | null) => (end === null ? null : Number(end));
   return {
-    choice,
+    asked,
+    grid: drawnOver,
     answer,
     curve,
     system,
     constants,
     formulas: formulasOf(answer.species, system),
-    range: rangeOf(givenConstants(choice)),
+    range: [Number(drawnOver.from), Number(drawnOver.to)],
     stair: answer.predominance.map(({ species, from, to }) => ({
       index: species,
       charge: curve.charges[species] ?? 0,
@@ -81,6 +102,10 @@ export function drawnCurve(choice: Choice, answer: FractionsAnswer): DrawnCurve 
     ),
   };
 }
+
+/** Whether the conditions moved any constant: else pK′ is what was given. */
+export const isMoved = ({ answer, system }: DrawnCurve): boolean =>
+  answer.effectivePKa.some((effective, i) => Number(effective) !== Number(system.pKa[i]));
 
 /** Charges of the fully protonated and of the fully deprotonated form. */
 export const endCharges = ({ curve: { charges } }: DrawnCurve): readonly [number, number] => [

@@ -2,77 +2,105 @@ import type { Rect } from '../chart/geometry';
 import { clamp } from '../chart/geometry';
 import type { Layer } from './curves-state';
 
+/** A layer that has a panel of its own. */
+export type Panel = Exclude<Layer, 'isoelectric-point'>;
+
 /** Where the panels of the figure lie, px. */
 export interface FigureLayout {
   readonly width: number;
   readonly left: number;
   readonly right: number;
-  readonly fractions?: Rect;
-  readonly stair?: Rect;
-  readonly charge?: Rect;
+  readonly panels: Readonly<Partial<Record<Panel, Rect>>>;
   readonly axis: number;
   readonly height: number;
 }
 
 interface FigureSize {
   readonly width: number;
+  /** What there is; a figure with more panels than fit is higher. */
   readonly height: number;
   readonly layers: readonly Layer[];
   /** On a phone: no heads, numerals inside, the stair at its own height. */
   readonly compact: boolean;
 }
 
-/** Room above a panel for its head and, over the fractions, for names; below all for the axis. */
-const room = {
-  wide: { fractions: 42, predominance: 0, charge: 32, axis: 58, left: 36, right: 14 },
-  compact: { fractions: 26, predominance: 0, charge: 24, axis: 42, left: 16, right: 16 },
+type Heights = Readonly<Record<Panel, number>>;
+
+/** Room above a panel for its head and, over the fractions, for names. */
+const heads: Readonly<Record<'wide' | 'compact', Heights>> = {
+  wide: { fractions: 42, predominance: 0, charge: 32, capacity: 32, 'lg-c': 34 },
+  compact: { fractions: 26, predominance: 0, charge: 24, capacity: 28, 'lg-c': 24 },
+};
+/** Room below all for the axis, and beside the panels. */
+const edges = {
+  wide: { axis: 58, left: 36, right: 14 },
+  compact: { axis: 42, left: 16, right: 16 },
 } as const;
-const compactStair = 118;
+
+const isPanel = (layer: Layer): layer is Panel => layer !== 'isoelectric-point';
 
 /** Stacks the layers over one pH axis; the fractions take at least twice any other's height. */
 export function figureLayout({ width, height, layers, compact }: FigureSize): FigureLayout {
-  const own = room[compact ? 'compact' : 'wide'];
-  const heads = layers.reduce((sum, layer) => sum + own[layer], 0);
-  const free = height - own.axis - heads;
-  const shares = compact ? compactShares(layers, free) : wideShares(layers, free);
-  const rects: Partial<Record<Layer, Rect>> = {};
+  const kind = compact ? 'compact' : 'wide';
+  const [own, head] = [edges[kind], heads[kind]];
+  const shown = layers.filter(isPanel);
+  const free = height - own.axis - shown.reduce((sum, panel) => sum + head[panel], 0);
+  const shares = compact ? compactShares(shown, free) : wideShares(shown, free);
+  const panels: Partial<Record<Panel, Rect>> = {};
   let y = 0;
-  for (const layer of layers) {
-    y += own[layer];
-    rects[layer] = {
-      x: own.left,
-      y,
-      width: width - own.left - own.right,
-      height: shares[layer],
-    };
-    y += shares[layer];
+  for (const panel of shown) {
+    y += head[panel];
+    panels[panel] = { x: own.left, y, width: width - own.left - own.right, height: shares(panel) };
+    y += shares(panel);
   }
   return {
     width,
     left: own.left,
     right: width - own.right,
-    ...(rects.fractions && { fractions: rects.fractions }),
-    ...(rects.predominance && { stair: rects.predominance }),
-    ...(rects.charge && { charge: rects.charge }),
+    panels,
     axis: y,
     height: y + own.axis,
   };
 }
 
-type Shares = Readonly<Record<Layer, number>>;
+type Shares = (panel: Panel) => number;
 
-function wideShares(layers: readonly Layer[], free: number): Shares {
-  const has = (layer: Layer) => layers.includes(layer);
-  if (!has('fractions')) {
-    const half = Math.min(free / layers.length, 260);
-    return { fractions: 0, predominance: half, charge: half };
+/** Share of the free height, and least and greatest height, px, of a panel under the fractions. */
+const under = {
+  predominance: [0.22, 72, 150],
+  charge: [0.17, 48, 120],
+  capacity: [0.18, 56, 120],
+  'lg-c': [0.24, 96, 200],
+} as const;
+/** Most of the free height that they take together: the fractions keep twice the largest. */
+const underTogether = 0.52;
+/** Without fractions, px. */
+const aloneAtMost = { predominance: 260, charge: 260, capacity: 260, 'lg-c': 420 } as const;
+
+function wideShares(shown: readonly Panel[], free: number): Shares {
+  if (!shown.includes('fractions')) {
+    return (panel) => {
+      const most = panel === 'fractions' ? free : aloneAtMost[panel];
+      return Math.max(60, Math.min(free / shown.length, most));
+    };
   }
-  const predominance = has('predominance') ? clamp(free * 0.22, 72, 150) : 0;
-  const charge = has('charge') ? clamp(free * 0.17, 48, 120) : 0;
-  return { fractions: free - predominance - charge, predominance, charge };
+  const others = shown.flatMap((panel) => (panel === 'fractions' ? [] : [panel]));
+  const asked = others.reduce((sum, panel) => sum + under[panel][0], 0);
+  const thinned = Math.min(1, underTogether / asked);
+  const heightOf = (panel: keyof typeof under) => {
+    const [share, least, most] = under[panel];
+    return clamp(free * share * thinned, least, most);
+  };
+  const taken = others.reduce((sum, panel) => sum + heightOf(panel), 0);
+  const highest = Math.max(0, ...others.map(heightOf));
+  const fractions = Math.max(free - taken, 2 * highest);
+  return (panel) => (panel === 'fractions' ? fractions : heightOf(panel));
 }
 
-function compactShares(layers: readonly Layer[], free: number): Shares {
-  const predominance = layers.includes('predominance') ? compactStair : 0;
-  return { fractions: free - predominance, predominance, charge: free - predominance };
+const compactStair = 118;
+
+function compactShares(shown: readonly Panel[], free: number): Shares {
+  const stair = shown.includes('predominance') ? compactStair : 0;
+  const others = shown.filter((panel) => panel !== 'predominance').length;
+  return (panel) => (panel === 'predominance' ? stair : (free - stair) / others);
 }

@@ -13,6 +13,7 @@ import { trueMinus } from './rounded';
 interface FormsTableProps {
   readonly drawn: DrawnCurve;
   readonly reading: Reading;
+  readonly label?: string;
 }
 
 /** A system with more forms than this shows only those worth a row, and the rest when asked. */
@@ -20,7 +21,7 @@ const rowsAtMost = 8;
 const worthARow = 0.001;
 
 /** The forms in order of charge, with their fractions; the greatest is bold and never moved. */
-export function FormsTable({ drawn, reading }: FormsTableProps) {
+export function FormsTable({ drawn, reading, label = 'Forms at the cursor' }: FormsTableProps) {
   const { colours } = useTheme();
   const [all, setAll] = useState(false);
   const many = drawn.formulas.length > rowsAtMost;
@@ -29,7 +30,7 @@ export function FormsTable({ drawn, reading }: FormsTableProps) {
     .filter(({ fraction }) => !many || all || Number(fraction) >= worthARow);
   return (
     <View>
-      <View role="table" aria-label="Forms at the cursor">
+      <View role="table" aria-label={label}>
         <View role="row" style={[styles.head, { borderBottomColor: colours.edge }]}>
           <View role="columnheader">
             <Words kind="label" tone="inkSoft">

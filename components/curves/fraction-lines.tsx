@@ -11,7 +11,9 @@ import { SeriesLine } from '../chart/series-line';
 import { alphaSign } from '../chart/symbols';
 import { formulaWidth, numeralsWidth } from '../chart/text-width';
 import { useTheme } from '../ui/theme';
+import { BesideLines } from './beside-lines';
 import type { DrawnCurve } from './drawn-curve';
+import type { BesideCurve } from './figure-extras';
 
 export const alphaScale = (rect: Rect) => linearScale([0, 1], [bottom(rect), rect.y]);
 
@@ -34,6 +36,7 @@ const numerals = (rect: Rect): Rect[] =>
 
 interface FractionLinesProps {
   readonly drawn: DrawnCurve;
+  readonly beside: readonly BesideCurve[];
   readonly rect: Rect;
   readonly x: Scale;
   readonly strong: number;
@@ -45,7 +48,7 @@ interface FractionLinesProps {
 
 /** The fraction of each form over pH, with its name at the curve. */
 export function FractionLines(props: FractionLinesProps) {
-  const { drawn, rect, x, strong, cursor, placing, compact } = props;
+  const { drawn, beside, rect, x, strong, cursor, placing, compact } = props;
   const { series } = useTheme();
   const lines = useMemo(() => {
     const y = alphaScale(rect);
@@ -102,6 +105,14 @@ export function FractionLines(props: FractionLinesProps) {
         }))}
       />
       {drawnLines}
+      <BesideLines
+        drawn={drawn}
+        beside={beside}
+        rect={rect}
+        x={x}
+        placing={placing}
+        taken={names}
+      />
       <CurveNames names={names} formulas={drawn.formulas} strong={strong} cursor={cursor} />
     </>
   );

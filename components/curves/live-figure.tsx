@@ -1,12 +1,11 @@
 import './no-eval';
-import { useState } from 'react';
-import { View } from 'react-native';
+import { useMemo, useState } from 'react';
 import type { Choice } from '../constants/choice';
-import { Skeleton } from '../ui/skeleton';
-import { conditionsInFigure } from './conditions';
+import { firstConditions } from './curve-conditions';
 import { useCurve, useReading } from './curve-queries';
-import { CurvesFigure } from './curves-figure';
 import { firstState, type Layer } from './curves-state';
+import { MeasuredFigure } from './measured-figure';
+import { pHWithin } from './ph-steps';
 
 interface LiveFigureProps {
   /** The same object as long as the system is the same. */
@@ -17,29 +16,18 @@ interface LiveFigureProps {
 }
 
 /** A curve outside Curves, alive: its cursor moves, and starts where Curves starts. */
-export function LiveFigure({ choice, layers, height, compact }: LiveFigureProps) {
+export function LiveFigure({ choice, ...figure }: LiveFigureProps) {
   const [pH, setPH] = useState(firstState.pH);
-  const [width, setWidth] = useState(0);
-  const { drawn, isFetching } = useCurve(choice);
-  const reading = useReading(drawn, pH);
+  const asked = useMemo(() => ({ choice, conditions: firstConditions }), [choice]);
+  const { drawn, isFetching } = useCurve(asked);
+  const reading = useReading(drawn, drawn ? pHWithin(pH, drawn.range) : pH);
   return (
-    <View
-      onLayout={({ nativeEvent }) => setWidth(Math.floor(nativeEvent.layout.width))}
-      style={{ minHeight: height }}
-    >
-      {drawn && reading && width > 0 && (
-        <CurvesFigure
-          drawn={drawn}
-          reading={reading}
-          layers={layers}
-          width={width}
-          height={height}
-          compact={compact}
-          caption={conditionsInFigure(drawn)}
-          onMove={setPH}
-        />
-      )}
-      {!drawn && isFetching && <Skeleton label="The curve is being computed" lines={6} />}
-    </View>
+    <MeasuredFigure
+      {...figure}
+      drawn={drawn}
+      reading={reading}
+      isFetching={isFetching}
+      onMove={setPH}
+    />
   );
 }

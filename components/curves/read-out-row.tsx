@@ -56,7 +56,8 @@ export function ValueRow({ label, value }: ValueRowProps) {
   );
 }
 
-function Ruled({ children }: { readonly children: ReactNode }) {
+/** A row over a hairline. */
+export function Ruled({ children }: { readonly children: ReactNode }) {
   const { colours } = useTheme();
   return (
     <View role="row" style={[styles.row, { borderBottomColor: colours.rule }]}>

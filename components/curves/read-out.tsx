@@ -4,21 +4,29 @@ import { Formula } from '../ui/formula';
 import { Quantity } from '../ui/quantity';
 import { space } from '../ui/theme';
 import { Words } from '../ui/words';
+import { ComparisonReadOut } from './comparison-read-out';
+import type { Layer } from './curves-state';
 import { describeReading } from './describe';
 import type { DrawnCurve } from './drawn-curve';
 import { EqualForms } from './equal-forms';
+import type { FigureExtras } from './figure-extras';
 import type { Reading } from './follow-curve';
 import { FormsTable } from './forms-table';
+import { CapacityRow, HoldsBest, LgCRows } from './layer-rows';
 import { neighbourRatio } from './neighbours';
 import { ValueRow } from './read-out-row';
 import { readOutText } from './read-out-text';
-import { shownCharge, shownRatio } from './rounded';
+import { shownCharge, shownPH, shownRatio } from './rounded';
 import { useCopy } from '../ui/use-copy';
 import { useSettled } from '../ui/use-settled';
 
 interface ReadOutProps {
   readonly drawn: DrawnCurve;
   readonly reading: Reading;
+  readonly shown: readonly Layer[];
+  readonly extras: FigureExtras;
+  /** mol/L. */
+  readonly total: string;
   /** Two columns where the page is one wide column. */
   readonly columns: boolean;
 }
@@ -27,7 +35,10 @@ interface ReadOutProps {
 const announced = 700;
 
 /** What is present at the cursor. */
-export function ReadOut({ drawn, reading, columns }: ReadOutProps) {
+export function ReadOut(props: ReadOutProps) {
+  const { drawn, reading, shown, extras, total, columns } = props;
+  const { isoelectricPoint, beside } = extras;
+  const capacity = shown.includes('capacity') ? extras.capacity : undefined;
   const copy = useCopy();
   const sentence = useSettled(describeReading(drawn, reading), announced);
   const ratio = neighbourRatio(reading);
@@ -49,6 +60,17 @@ export function ReadOut({ drawn, reading, columns }: ReadOutProps) {
             }
             value={shownCharge(reading.meanCharge)}
           />
+          {capacity && <CapacityRow capacity={capacity} reading={reading} />}
+          {shown.includes('isoelectric-point') && isoelectricPoint !== undefined && (
+            <ValueRow
+              label={
+                <Words>
+                  isoelectric point <Quantity of="isoelectricPoint" />
+                </Words>
+              }
+              value={shownPH(isoelectricPoint)}
+            />
+          )}
           {ratio && (
             <ValueRow
               label={
@@ -67,9 +89,19 @@ export function ReadOut({ drawn, reading, columns }: ReadOutProps) {
             icon="copy"
             label="Copy all digits"
             disabled={!reading.exact}
-            onPress={() => copy('Read-out', readOutText(drawn, reading))}
+            onPress={() => copy('Read-out', readOutText(drawn, reading, shown, extras))}
           />
         </View>
+        <ComparisonReadOut drawn={drawn} beside={beside} pH={reading.pH} />
+        {shown.includes('lg-c') && (
+          <LgCRows
+            drawn={drawn}
+            reading={reading}
+            total={Number(total)}
+            capacity={extras.capacity}
+          />
+        )}
+        {capacity && <HoldsBest capacity={capacity} drawn={drawn} />}
         <EqualForms drawn={drawn} />
       </View>
     </View>

@@ -21,6 +21,17 @@ export function shownCharge(charge: string): string {
   return Number(text) === 0 ? text.replace('-', '') : text;
 }
 
+/** A computed pH to two decimals, with a true minus. */
+export const shownPH = (pH: string): string => trueMinus(new Exact(pH).toFixed(2));
+
+/** A capacity, mmol/L per pH, to three digits; plain from 0.001 to 10⁵. */
+export function shownCapacity(value: number): string {
+  const text = new Exact(value).toSignificantDigits(3);
+  return text.lessThan(smallest) || text.greaterThanOrEqualTo(1e5)
+    ? text.toExponential(2)
+    : text.toFixed(Math.max(0, 2 - Math.floor(Math.log10(value))));
+}
+
 /** A ratio to three digits, with an exponent from 10³ on and below 10⁻³. */
 export function shownRatio(ratio: string): string {
   const value = new Exact(ratio).toSignificantDigits(3);
@@ -39,3 +50,7 @@ export function shownConstant(pKa: string): string {
 
 /** A number with a true minus, for words and drawings. */
 export const trueMinus = (text: string) => text.replace(/-(?=\d)/g, '\u2212');
+
+/** A change of a fraction, with its sign. */
+export const signedChange = (change: number): string =>
+  trueMinus(`${change > 0 ? '+' : ''}${change.toFixed(3)}`);

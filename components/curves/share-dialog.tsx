@@ -6,11 +6,11 @@ import { Words } from '../ui/words';
 import { ExportButtons } from './export-buttons';
 import { requestCode } from '../request/request-code';
 import { aboutRequest, RequestView, useLanguage } from '../request/request-view';
-import { curveRequest } from './curve-request';
 import { linkTo } from './use-address';
 import { useCopy } from '../ui/use-copy';
 import type { Curves } from './use-curves';
 import type { Exports } from './use-exports';
+import { useScreenRequest } from './use-screen-request';
 
 interface ShareDialogProps {
   readonly open: boolean;
@@ -23,7 +23,7 @@ interface ShareDialogProps {
 export function ShareDialog({ open, onClose, curves, exports }: ShareDialogProps) {
   const copy = useCopy();
   const [language, setLanguage] = useLanguage();
-  const request = curveRequest(curves.state.choice, globalThis.location.origin);
+  const { request, gives, which } = useScreenRequest(curves);
   return (
     <Dialog title="Share" open={open} onClose={onClose}>
       <View style={{ gap: space[4] }}>
@@ -39,7 +39,8 @@ export function ShareDialog({ open, onClose, curves, exports }: ShareDialogProps
           <Words kind="section" heading={3}>
             The request
           </Words>
-          <Words kind="help">{aboutRequest('this curve')}</Words>
+          <Words kind="help">{aboutRequest(gives)}</Words>
+          {which}
           <RequestView request={request} language={language} onLanguage={setLanguage} />
           <Button
             icon="copy"

@@ -11,7 +11,8 @@ interface SidePanelProps {
 }
 
 /** The pH and what is present at it, on a wide screen. */
-export function SidePanel({ curves: { drawn, reading, move }, columns }: SidePanelProps) {
+export function SidePanel({ curves, columns }: SidePanelProps) {
+  const { state, drawn, reading, shown, extras, move } = curves;
   if (!drawn || !reading) return null;
   return (
     <View style={{ gap: space[4] }}>
@@ -19,7 +20,14 @@ export function SidePanel({ curves: { drawn, reading, move }, columns }: SidePan
         <PhControl pH={reading.pH} range={drawn.range} onMove={move} />
         <Words kind="help">Arrow keys move 0.01, Page keys 0.5</Words>
       </View>
-      <ReadOut drawn={drawn} reading={reading} columns={columns} />
+      <ReadOut
+        drawn={drawn}
+        reading={reading}
+        shown={shown}
+        extras={extras}
+        total={state.total}
+        columns={columns}
+      />
     </View>
   );
 }

@@ -1,29 +1,34 @@
 import { StyleSheet, View } from 'react-native';
 import { ConstantsEditor } from '../constants/constants-editor';
 import { space } from '../ui/theme';
-import { Words } from '../ui/words';
+import { CompareInputs } from './compare-inputs';
+import { ConditionFields } from './condition-fields';
 import { ConstantsList } from './constants-list';
 import { CurveWarnings } from './curve-warnings';
+import { isMoved } from './drawn-curve';
+import { MovedConstants } from './moved-constants';
 import { SystemChoice } from './system-choice';
 import type { Curves } from './use-curves';
 
-/** The system: chosen or typed, with its constants and where they are from. */
+/** The system, chosen or typed, with its constants; its conditions; what it is compared with. */
 export function SystemInputs(curves: Curves) {
-  const { state, drawn, curve, editing, typeOwn } = curves;
-  const { choice } = state;
+  const { state, drawn, curve, editing, typeOwn, setConditions } = curves;
+  const { choice, conditions } = state;
+  const isDrawn = drawn !== undefined && curve.isCurrent;
   return (
     <View style={styles.inputs}>
       <SystemChoice {...curves} />
       <CurveWarnings {...curves} />
       {choice.kind === 'typed' ? (
-        <ConstantsEditor {...editing} />
+        <>
+          <ConstantsEditor {...editing} />
+          {isDrawn && isMoved(drawn) && <MovedConstants drawn={drawn} />}
+        </>
       ) : (
-        drawn &&
-        curve.isCurrent && (
-          <ConstantsList id={choice.id} constants={drawn.constants} onTypeOwn={typeOwn} />
-        )
+        isDrawn && <ConstantsList id={choice.id} drawn={drawn} onTypeOwn={typeOwn} />
       )}
-      <Words kind="help">Constants are taken as given: nothing is corrected for the medium.</Words>
+      <ConditionFields conditions={conditions} onChange={setConditions} error={curve.error} />
+      <CompareInputs {...curves} />
     </View>
   );
 }

@@ -19,7 +19,7 @@ interface ExportOptions {
 
 /** The files that leave the screen, and the figure they are made from. */
 export function useExports(
-  { drawn, title }: Pick<Curves, 'drawn' | 'title'>,
+  { drawn, shown, extras, title }: Pick<Curves, 'drawn' | 'shown' | 'extras' | 'title'>,
   { captioned }: ExportOptions,
 ) {
   const figure = useRef<View>(null);
@@ -44,7 +44,9 @@ export function useExports(
   };
   const save = async (kind: 'csv' | 'svg' | 'png') => {
     const content = async () => {
-      if (kind === 'csv') return drawn && new Blob([curveCsv(drawn)], { type: 'text/csv' });
+      if (kind === 'csv') {
+        return drawn && new Blob([curveCsv({ drawn, shown, extras })], { type: 'text/csv' });
+      }
       const drawing = await svg();
       if (!drawing) return undefined;
       if (kind === 'png') return pngOf(drawing);

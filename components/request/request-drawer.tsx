@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { Button } from '../ui/button';
 import { Numerals } from '../ui/numerals';
@@ -21,12 +22,15 @@ interface RequestDrawerProps {
   readonly onToggle: () => void;
   /** What the call gives: `this curve`. */
   readonly gives: string;
+  /** Chooses the call, where there are several. */
+  readonly which?: ReactNode;
   /** Width of the inputs column, whose edges the drawer keeps. */
   readonly inputsWidth: number;
 }
 
 /** The call that gives what is on the screen, at the foot of a wide window. */
-export function RequestDrawer({ request, gives, open, onToggle, inputsWidth }: RequestDrawerProps) {
+export function RequestDrawer(props: RequestDrawerProps) {
+  const { request, gives, open, onToggle, which, inputsWidth } = props;
   const { colours } = useTheme();
   const [language, setLanguage] = useLanguage();
   const copy = useCopy();
@@ -45,6 +49,7 @@ export function RequestDrawer({ request, gives, open, onToggle, inputsWidth }: R
           The request
         </Words>
         {open && <Words kind="help">{aboutRequest(gives)}</Words>}
+        {open && which}
       </View>
       <View style={styles.code}>
         {open ? (

@@ -1,8 +1,10 @@
 import fc from 'fast-check';
 import type { Choice } from '../../../components/constants/choice';
 import type { CurvesState } from '../../../components/curves/curves-state';
-import { firstState, givenConstants, layers, views } from '../../../components/curves/curves-state';
-import { rangeOf } from '../../../components/curves/curve-grid';
+import { givenConstants } from '../../../components/curves/curve-asked';
+import { curveModels, firstConditions } from '../../../components/curves/curve-conditions';
+import { firstState, layers, views } from '../../../components/curves/curves-state';
+import { rangeOf, widestRange } from '../../../components/curves/curve-grid';
 import { formatFragment, parseFragment } from '../../../components/curves/fragment';
 import { pHAt } from '../../../components/curves/ph-steps';
 import { text } from '../../../shared/text';
@@ -32,14 +34,34 @@ const stored = fc
   .filter((id) => id.length <= 80)
   .map((id): Choice => ({ kind: 'stored', id }));
 
+const decimal = (whole: number) =>
+  fc
+    .record({ whole: fc.integer({ min: 0, max: whole }), places: fc.integer({ min: 1, max: 999 }) })
+    .map(({ whole, places }) => `${whole}.${String(places).padStart(3, '0')}`);
+const conditions = fc.record({
+  temperature: decimal(99),
+  ionicStrength: decimal(19),
+  activityModel: fc.constantFrom(...curveModels),
+  outOfRange: fc.constantFrom('refuse' as const, 'compute' as const),
+});
+const asked = fc.record({
+  choice: fc.oneof(stored, typed),
+  conditions: fc.oneof(fc.constant(firstConditions), conditions),
+});
+
 const state: fc.Arbitrary<CurvesState> = fc
   .record({
-    choice: fc.oneof(stored, typed),
+    asked,
     at: fc.double({ min: -20, max: 40, noNaN: true }),
     layers: fc.subarray([...layers]),
     view: fc.constantFrom(...views),
+    total: decimal(49),
+    beside: fc.array(asked, { maxLength: 2 }),
   })
-  .map(({ at, ...rest }) => ({ ...rest, pH: pHAt(at, rangeOf(givenConstants(rest.choice))) }));
+  .map(({ asked: { choice, conditions }, at, ...rest }) => {
+    const range = choice.kind === 'typed' ? rangeOf(givenConstants(choice)) : widestRange;
+    return { ...rest, choice, conditions, pH: pHAt(at, range) };
+  });
 
 describe('the fragment of the address', () => {
   test('any state comes back as it was', () => {
@@ -64,6 +86,29 @@ describe('the fragment of the address', () => {
     expect(formatFragment({ ...firstState, choice: own, layers: ['fractions'] })).toBe(
       'name=Tarn+Street+B&charge=0&pKa=2.148,7.198,12.35&pH=7.40&layers=fractions',
     );
+    const inPlasma = {
+      temperature: '37',
+      ionicStrength: '0.15',
+      activityModel: 'davies',
+      outOfRange: 'refuse',
+    } as const;
+    expect(formatFragment({ ...firstState, conditions: inPlasma, total: '0.01' })).toBe(
+      'system=phosphoric-acid&T=37&I=0.15&model=davies&pH=7.40&c=0.01',
+    );
+  });
+
+  test('a curve beside is a fragment within the fragment', () => {
+    const beside = [{ choice: { kind: 'stored', id: 'citric-acid' }, conditions: firstConditions }];
+    expect(formatFragment({ ...firstState, beside } as CurvesState)).toBe(
+      'system=phosphoric-acid&pH=7.40&with=system%3Dcitric-acid',
+    );
+  });
+
+  test('a temperature may be written in kelvin, a total with its unit', () => {
+    const { state: read, faulty } = parseFragment('#system=tris&T=310.15+K&c=20+mmol/L');
+    expect(faulty).toBe(false);
+    expect(read.conditions.temperature).toBe('37');
+    expect(read.total).toBe('0.02');
   });
 
   test('no fragment is the first visit', () => {
@@ -93,7 +138,15 @@ describe('the fragment of the address', () => {
     ['65 constants', `#charge=0&pKa=${Array.from({ length: 65 }, () => '4').join(',')}`],
     ['a charge that is none', '#charge=1e1&pKa=4'],
     ['a pH that is none', '#system=glycine&pH=NaN'],
-    ['a pH out of the range', '#system=glycine&pH=39'],
+    ['a pH that the contract does not take', '#system=glycine&pH=41'],
+    ['a pH out of the range of typed constants', '#charge=0&pKa=4&pH=39'],
+    ['a temperature that is none', '#system=glycine&T=warm'],
+    ['an ionic strength below none', '#system=glycine&I=-0.1'],
+    ['an unknown activity model', '#system=glycine&model=price'],
+    ['a total of nothing', '#system=glycine&c=0'],
+    ['three curves beside', '#with=system%3Dtris&with=system%3Dedta&with=system%3Dglycine'],
+    ['a curve beside that is none', '#with=system%3DA+b'],
+    ['a curve beside with a pH of its own', '#with=system%3Dtris%26pH%3D7'],
     ['an unknown layer', '#system=glycine&layers=fractions,price'],
     ['an unknown view', '#system=glycine&view=price'],
     ['an unknown key', '#system=glycine&note=hello'],

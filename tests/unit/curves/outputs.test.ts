@@ -1,13 +1,17 @@
 import { curveCsv } from '../../../components/curves/curve-csv';
 import { conditionsText } from '../../../components/curves/conditions-of';
-import type { Choice } from '../../../components/constants/choice';
+import type { CurveAsked } from '../../../components/curves/curve-asked';
+import { firstConditions } from '../../../components/curves/curve-conditions';
+import { layers, type Layer } from '../../../components/curves/curves-state';
 import { describeCurve, describeReading } from '../../../components/curves/describe';
 import { drawnCurve } from '../../../components/curves/drawn-curve';
+import { noExtras } from '../../../components/curves/figure-extras';
 import { figureLayout } from '../../../components/curves/figure-layout';
 import { exactReading } from '../../../components/curves/follow-curve';
 import { readOutText } from '../../../components/curves/read-out-text';
 import type { Constant } from '../../../shared/constant';
 import type { FractionsAnswer } from '../../../shared/fractions';
+import type { WarningCode } from '../../../shared/model';
 
 const range = (species: number, from: string | null, to: string | null) => ({ species, from, to });
 const determined = (known: Partial<Constant>) => ({
@@ -33,6 +37,7 @@ const phosphoric = {
       predominant: 2,
     },
   ],
+  effectivePKa: ['2.14800', '7.19800', '12.3500'],
   predominance: [
     range(0, null, '2.14800'),
     range(1, '2.14800', '7.19800'),
@@ -40,7 +45,8 @@ const phosphoric = {
     range(3, '12.3500', null),
   ],
   model: {
-    conditions: { temperature: '25', ionicStrength: '0' },
+    conditions: { temperature: '25', ionicStrength: '0', activityModel: 'ideal' },
+    warnings: [],
     constantsUsed: [
       {
         name: 'phosphoric acid',
@@ -53,8 +59,11 @@ const phosphoric = {
     ],
   },
 } as unknown as FractionsAnswer;
-const choice: Choice = { kind: 'stored', id: 'phosphoric-acid' };
-const drawn = drawnCurve(choice, phosphoric);
+const asked: CurveAsked = {
+  choice: { kind: 'stored', id: 'phosphoric-acid' },
+  conditions: firstConditions,
+};
+const drawn = drawnCurve(asked, phosphoric);
 const reading = exactReading(phosphoric);
 if (!reading) throw new Error('The answer has a point.');
 
@@ -64,9 +73,9 @@ describe('what is drawn', () => {
   });
 
   test('around a form that never predominates its neighbours meet at a mean', () => {
-    const inverted: Choice = {
-      kind: 'typed',
-      system: { fullyProtonatedCharge: 0, pKa: ['9', '4'] },
+    const inverted: CurveAsked = {
+      choice: { kind: 'typed', system: { fullyProtonatedCharge: 0, pKa: ['9', '4'] } },
+      conditions: firstConditions,
     };
     const answer = {
       ...phosphoric,
@@ -81,13 +90,13 @@ describe('what is drawn', () => {
 
 describe('the conditions on a plot', () => {
   const [used] = phosphoric.model.constantsUsed;
-  const textFor = (constants: readonly object[]) =>
-    conditionsText(
-      drawnCurve(choice, {
-        ...phosphoric,
-        model: { ...phosphoric.model, constantsUsed: [{ ...used, constants }] },
-      } as unknown as FractionsAnswer),
+  const textFor = (constants: readonly object[], ...codes: WarningCode[]) => {
+    const warnings = codes.map((code) => ({ code, message: '' }));
+    const model = { ...phosphoric.model, constantsUsed: [{ ...used, constants }], warnings };
+    return conditionsText(
+      drawnCurve(asked, { ...phosphoric, model } as unknown as FractionsAnswer),
     );
+  };
 
   test('are the model’s for thermodynamic constants at its temperature', () => {
     expect(conditionsText(drawn)).toBe('25 °C · I = 0 · ideal');
@@ -96,9 +105,11 @@ describe('the conditions on a plot', () => {
   test('are the constants’ own where these were measured elsewhere', () => {
     const at = (ionicStrength: string | null) =>
       determined({ kind: 'concentration', ionicStrength });
-    expect(textFor([at('1'), at('0.1')])).toBe('25 °C · I = 1, 0.1 · as given');
-    expect(textFor([at(null)])).toBe('25 °C · I not stated · as given');
-    expect(textFor([determined({ temperature: '18' })])).toBe('18 °C · I = 0 · as given');
+    const medium = 'constants-at-their-medium';
+    expect(textFor([at('1'), at('0.1')], medium)).toBe('25 °C · I = 1, 0.1 · as given');
+    expect(textFor([at(null)], medium)).toBe('25 °C · I not stated · as given');
+    const warmer = [determined({ temperature: '18' })];
+    expect(textFor(warmer, 'pka-not-temperature-corrected')).toBe('18 °C · I = 0 · as given');
   });
 });
 
@@ -118,15 +129,17 @@ describe('the figure in words', () => {
 
 describe('what leaves the screen', () => {
   test('the CSV holds the answer digit for digit', () => {
-    expect(curveCsv(drawn)).toBe(
-      'pH,H3PO4,H2PO4^-,HPO4^2-,PO4^3-,mean charge\r\n' +
-        '7.40,0.00000215937,0.385768,0.614223,0.00000689170,-1.614235\r\n',
+    expect(curveCsv({ drawn, shown: ['fractions'], extras: noExtras })).toBe(
+      'pH,H3PO4,H2PO4^-,HPO4^2-,PO4^3-,mean charge,' +
+        'temperature/°C,ionic strength/(mol/L),activity model\r\n' +
+        '7.40,0.00000215937,0.385768,0.614223,0.00000689170,-1.614235,25,0,ideal\r\n',
     );
   });
 
   test('the read-out holds every digit, cell by cell', () => {
-    expect(readOutText(drawn, reading).split('\n')).toEqual([
+    expect(readOutText(drawn, reading, ['fractions'], noExtras).split('\n')).toEqual([
       'pH\t\t7.40',
+      'conditions\t\t25 °C · I = 0 · ideal',
       'form\tcharge\tfraction',
       'H3PO4\t0\t0.00000215937',
       'H2PO4^-\t-1\t0.385768',
@@ -138,41 +151,43 @@ describe('what leaves the screen', () => {
 });
 
 describe('the layout of the figure', () => {
-  const all = ['fractions', 'predominance', 'charge'] as const;
+  const three = ['fractions', 'predominance', 'charge'] as const;
+  const four = [...three, 'capacity'] as const;
+  const wide = (height: number, layers: readonly Layer[]) =>
+    figureLayout({ width: 640, height, layers, compact: false });
 
-  test.each([400, 520, 640, 768, 900])(
-    'at %s px the fractions are at least twice any other',
-    (height) => {
-      const { fractions, stair, charge, ...layout } = figureLayout({
-        width: 640,
-        height,
-        layers: all,
-        compact: false,
-      });
-      const others = Math.max(stair?.height ?? 0, charge?.height ?? 0);
-      expect(fractions?.height).toBeGreaterThanOrEqual(2 * others);
-      expect(layout.height).toBeCloseTo(height);
-    },
-  );
+  test.each([
+    [400, three],
+    [640, three],
+    [900, three],
+    [640, four],
+    [768, four],
+    [900, layers],
+  ] as const)('at %s px the fractions are at least twice any other', (height, shown) => {
+    const { panels, ...layout } = wide(height, shown);
+    const { fractions, ...others } = panels;
+    const highest = Math.max(...Object.values(others).map((rect) => rect.height));
+    expect(fractions?.height).toBeGreaterThanOrEqual(2 * highest);
+    expect(layout.height).toBeCloseTo(height);
+  });
+
+  test('where the layers do not fit they keep their least heights, and the page scrolls', () => {
+    const { panels, height } = wide(400, layers);
+    expect(height).toBeGreaterThan(400);
+    expect(panels['lg-c']?.height).toBeGreaterThanOrEqual(96);
+  });
 
   test('panels stack without overlap over one axis', () => {
-    const { fractions, stair, charge, axis } = figureLayout({
-      width: 640,
-      height: 768,
-      layers: all,
-      compact: false,
-    });
-    const ends = [fractions, stair, charge].map((rect) => [
-      rect?.y ?? NaN,
-      (rect?.y ?? NaN) + (rect?.height ?? NaN),
-    ]);
+    const { panels, axis } = wide(768, layers);
+    const ends = Object.values(panels).map((rect) => [rect.y, rect.y + rect.height]);
     const edges = [...ends.flat(), axis];
     expect(edges).toEqual([...edges].sort((a, b) => a - b));
+    expect(ends).toHaveLength(5);
   });
 
   test('on a phone 360×640 the fractions keep 200 px', () => {
-    const layers = ['fractions', 'predominance'] as const;
-    const { fractions } = figureLayout({ width: 360, height: 386, layers, compact: true });
-    expect(fractions?.height).toBeGreaterThanOrEqual(200);
+    const shown = ['fractions', 'predominance'] as const;
+    const { panels } = figureLayout({ width: 360, height: 386, layers: shown, compact: true });
+    expect(panels.fractions?.height).toBeGreaterThanOrEqual(200);
   });
 });

@@ -3,7 +3,11 @@ import fc from 'fast-check';
 import ts from 'typescript';
 import { languages, requestCode } from '../../../components/request/request-code';
 import { curveRequest } from '../../../components/curves/curve-request';
-import { publicFractionsRequest } from '../../../shared/fractions';
+import { firstConditions, type CurveConditions } from '../../../components/curves/curve-conditions';
+import { screenRequests } from '../../../components/curves/screen-requests';
+import { bufferCapacityRequest } from '../../../shared/buffer-capacity';
+import { fractionsRequest, publicFractionsRequest } from '../../../shared/fractions';
+import { isoelectricPointRequest } from '../../../shared/isoelectric-point';
 
 const url = 'https://stepwell.larkmoor.example/v1/fractions';
 const bodyNamed = (name: string) => ({
@@ -141,18 +145,46 @@ test('no language writes a key', () => {
   }
 });
 
-test('the request of a curve fits the contract', () => {
+describe('the requests of a screen', () => {
   const origin = 'http://127.0.0.1:8080';
-  const byId = curveRequest({ kind: 'stored', id: 'edta' }, origin);
-  expect(byId).toEqual({
-    url: `${origin}/v1/fractions`,
-    body: { system: { id: 'edta' }, pH: { from: '0', to: '14', step: '0.02' }, digits: 6 },
-    result: 'curve',
+  const stored = { kind: 'stored', id: 'edta' } as const;
+
+  test('a curve under the conditions of a first visit says none', () => {
+    const byId = curveRequest({ choice: stored, conditions: firstConditions }, origin);
+    expect(byId).toEqual({
+      url: `${origin}/v1/fractions`,
+      body: { system: { id: 'edta' }, pH: { from: '0', to: '14', step: '0.02' }, digits: 6 },
+      result: 'curve',
+    });
+    const system = { name: undefined, fullyProtonatedCharge: 0, pKa: ['0.0', '7.198'] };
+    const typed = { choice: { kind: 'typed', system }, conditions: firstConditions } as const;
+    const inFull = curveRequest(typed, origin);
+    for (const { body } of [byId, inFull]) {
+      expect(publicFractionsRequest.safeParse(body).success).toBe(true);
+    }
+    expect(requestCode.curl(inFull)).toContain('"system": { "fullyProtonatedCharge": 0,');
   });
-  const system = { name: undefined, fullyProtonatedCharge: 0, pKa: ['0.0', '7.198'] };
-  const inFull = curveRequest({ kind: 'typed', system }, origin);
-  for (const { body } of [byId, inFull]) {
-    expect(publicFractionsRequest.safeParse(body).success).toBe(true);
-  }
-  expect(requestCode.curl(inFull)).toContain('"system": { "fullyProtonatedCharge": 0,');
+
+  test('conditions are in every call that the layers are made of, and fit the contract', () => {
+    const conditions: CurveConditions = {
+      temperature: '37',
+      ionicStrength: '0.15',
+      activityModel: 'davies',
+      outOfRange: 'compute',
+    };
+    const asked = { choice: stored, conditions };
+    const shown = ['fractions', 'capacity', 'isoelectric-point'] as const;
+    const grid = { from: '0', to: '14', step: '0.02' };
+    const requests = screenRequests({ asked, total: '0.05', shown, grid }, origin);
+    expect(requests.map(({ request }) => new URL(request.url).pathname)).toEqual([
+      '/v1/fractions',
+      '/v1/buffer-capacity',
+      '/v1/isoelectric-point',
+    ]);
+    const [fractions, capacity, point] = requests.map(({ request }) => request.body);
+    expect(fractionsRequest.safeParse(fractions).success).toBe(true);
+    expect(bufferCapacityRequest.safeParse(capacity).success).toBe(true);
+    expect(isoelectricPointRequest.safeParse(point).success).toBe(true);
+    for (const body of [fractions, capacity, point]) expect(body).toMatchObject({ conditions });
+  });
 });

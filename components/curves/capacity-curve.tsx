@@ -1,0 +1,53 @@
+import { memo, useMemo } from 'react';
+import { TSpan } from 'react-native-svg';
+import { CapacityPanel, type CapacityLine } from '../chart/capacity-panel';
+import type { Rect } from '../chart/geometry';
+import type { Scale } from '../chart/scale';
+import { betaSign, concentrationSign } from '../chart/symbols';
+import { totalInWords } from './total-in-words';
+import { fonts } from '../ui/theme';
+import { capacityTop } from './capacity';
+import type { FigureExtras } from './figure-extras';
+
+interface CapacityCurveProps {
+  readonly extras: FigureExtras;
+  readonly rect: Rect;
+  readonly x: Scale;
+  readonly compact: boolean;
+}
+
+/** Buffer capacity of the system at its total, over pH. */
+export const CapacityCurve = memo(function CapacityCurve(props: CapacityCurveProps) {
+  const { extras, rect, x, compact } = props;
+  const { capacity, beside } = extras;
+  const lines = useMemo(() => {
+    const ghosts = beside.flatMap(({ name, capacity: other }): CapacityLine[] =>
+      other ? [{ key: name, pH: other.pH, values: other.values, kind: 'ghost' }] : [],
+    );
+    const whole: CapacityLine[] = capacity
+      ? [{ key: 'whole', pH: capacity.pH, values: capacity.values, kind: 'whole' }]
+      : [];
+    return [...ghosts, ...whole];
+  }, [capacity, beside]);
+  if (!capacity) return null;
+  return (
+    <CapacityPanel
+      rect={rect}
+      x={x}
+      top={capacityTop(capacity)}
+      lines={lines}
+      maxima={capacity.maxima.filter(({ pH }) => x(pH) >= rect.x && x(pH) <= rect.x + rect.width)}
+      inside={compact}
+      head={
+        <>
+          {betaSign}
+          {compact ? ' at ' : ' buffer capacity at '}
+          {concentrationSign}
+          {' = '}
+          <TSpan fontFamily={fonts.numbers}>{totalInWords(capacity.total)}</TSpan>
+          {' mmol/L, in mmol/L per pH'}
+        </>
+      }
+    />
+  );
+});
