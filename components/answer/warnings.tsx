@@ -16,7 +16,7 @@ const titles: Readonly<Record<Warning['code'], string>> = {
   'ion-size-assumed': 'The size of an ion is assumed',
   'several-ionic-strengths': 'More than one ionic strength fits',
   'ionic-strength-differs': 'Not the ionic strength of these ions',
-  'charge-balanced-by-inert-ions': 'Charges balanced by inert ions',
+  'parameters-of-another-temperature': 'Parameters of another temperature',
 };
 
 /** What to know about a figure that was computed, in the answer's words. */

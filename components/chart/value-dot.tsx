@@ -1,5 +1,6 @@
 import { useTheme } from '../ui/theme';
 import { FigureText } from './figure-text';
+import type { Rect } from './geometry';
 import { Marker } from './marker';
 import { numeralsWidth } from './text-width';
 
@@ -17,10 +18,27 @@ interface ValueDotProps {
 const size = 13;
 const gap = 9;
 
+/** Where the value stands: which side of the dot, and its baseline. */
+function placeOf({ x, y, top = 0, limit, text }: ValueDotProps) {
+  const width = gap + numeralsWidth(text, size);
+  return {
+    fits: x + width <= limit,
+    width,
+    baseline: Math.max((y ?? top) - 7, top + size),
+  };
+}
+
+/** The room that the value takes beside its dot. */
+export function valueBox(dot: ValueDotProps): Rect {
+  const { fits, width, baseline } = placeOf(dot);
+  return { x: fits ? dot.x : dot.x - width, y: baseline - size, width, height: size + 7 };
+}
+
 /** The value of a single line at the cursor. */
-export function ValueDot({ x, y, top = 0, limit, text }: ValueDotProps) {
+export function ValueDot(props: ValueDotProps) {
+  const { x, y, text } = props;
   const { colours } = useTheme();
-  const fits = x + gap + numeralsWidth(text, size) <= limit;
+  const { fits, baseline } = placeOf(props);
   return (
     <>
       {y !== undefined && (
@@ -28,7 +46,7 @@ export function ValueDot({ x, y, top = 0, limit, text }: ValueDotProps) {
       )}
       <FigureText
         x={fits ? x + gap : x - gap}
-        y={Math.max((y ?? top) - 7, top + size)}
+        y={baseline}
         size={size}
         weight="700"
         anchor={fits ? 'start' : 'end'}

@@ -5,6 +5,7 @@ import { Quantity } from '../ui/quantity';
 import { Raised } from '../ui/raised';
 import { space, useTheme } from '../ui/theme';
 import { useLayout } from '../ui/use-layout';
+import { webStyle } from '../ui/web-style';
 import { Words } from '../ui/words';
 import type { Mixture } from './use-mixture';
 import { shownAmount, shownCapacity, shownPerDegree, shownPH, shownShift } from './rounded';
@@ -12,7 +13,7 @@ import { shownAmount, shownCapacity, shownPerDegree, shownPH, shownShift } from 
 /** The pH, large, and what goes with it. */
 export function AnswerHead({ answered, trialPH }: Pick<Mixture, 'answered' | 'trialPH'>) {
   const { colours } = useTheme();
-  const { rail } = useLayout();
+  const { rail, readOutAside } = useLayout();
   if (!answered) return null;
   const { answer } = answered;
   const concentrationPH = shownPH(answer.pHOfConcentration);
@@ -24,7 +25,7 @@ export function AnswerHead({ answered, trialPH }: Pick<Mixture, 'answered' | 'tr
           {shownPH(answer.pH)}
         </Numerals>
       </View>
-      <View style={styles.facts}>
+      <View style={[styles.facts, readOutAside && styles.beside]}>
         {concentrationPH !== shownPH(answer.pH) && (
           <Fact label={<MinusLgC />} value={concentrationPH} unit="of concentration" />
         )}
@@ -83,11 +84,17 @@ function Fact({ label, value, unit }: FactProps) {
 
 const styles = StyleSheet.create({
   head: { gap: space[4], paddingBottom: space[4], borderBottomWidth: 1 },
-  wide: { flexDirection: 'row', alignItems: 'flex-end', gap: space[6] },
-  facts: { flexDirection: 'row', flexWrap: 'wrap', flexGrow: 1, flexShrink: 1, rowGap: space[3] },
-  fact: {
+  wide: { flexDirection: 'row', alignItems: 'flex-start', gap: space[6] },
+  // Level with the large figure where there is one row of them.
+  beside: { paddingTop: space[5] },
+  facts: {
     flexGrow: 1,
-    flexBasis: 96,
+    flexShrink: 1,
+    minWidth: 0,
+    rowGap: space[3],
+    ...webStyle({ display: 'grid', gridTemplateColumns: 'repeat(auto-fill, minmax(104px, 1fr))' }),
+  },
+  fact: {
     borderLeftWidth: 1,
     paddingLeft: space[3],
     paddingRight: space[1],

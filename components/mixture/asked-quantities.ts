@@ -11,7 +11,7 @@ export const concentrationAsked: AskedQuantity = {
 
 export const pressureAsked: AskedQuantity = {
   dimension: 'pressure',
-  unit: 'atm',
+  unit: 'Pa',
   range: limits.pressure,
-  fault: 'Write 0.00042 or 0.42 matm.',
+  fault: 'Write 42.6 or 420 µatm.',
 };

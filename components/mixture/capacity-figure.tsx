@@ -3,11 +3,11 @@ import { View } from 'react-native';
 import Svg from 'react-native-svg';
 import { CapacityPanel, capacityScale, type CapacityLine } from '../chart/capacity-panel';
 import { FigureCursor, tabCentre } from '../chart/figure-cursor';
-import { right } from '../chart/geometry';
+import { right, type Rect } from '../chart/geometry';
 import { PhAxis } from '../chart/ph-axis';
 import { linearScale } from '../chart/scale';
 import { betaSign } from '../chart/symbols';
-import { ValueDot } from '../chart/value-dot';
+import { ValueDot, valueBox } from '../chart/value-dot';
 import { useTheme } from '../ui/theme';
 import { CapacityNames } from './capacity-names';
 import type { DrawnCapacity } from './drawn-capacity';
@@ -27,8 +27,11 @@ interface CapacityFigureProps {
 
 const room = {
   wide: { left: 36, right: 14, top: 34, axis: 58 },
-  compact: { left: 16, right: 16, top: 28, axis: 42 },
+  compact: { left: 16, right: 16, top: 40, axis: 42 },
 } as const;
+
+/** Width of the numerals inside a compact panel, px. */
+const numeralsRoom = 32;
 
 /** Buffer capacity of the mixture around its pH: the whole, and the part of each system. */
 export function CapacityFigure(props: CapacityFigureProps) {
@@ -61,6 +64,16 @@ export function CapacityFigure(props: CapacityFigureProps) {
     [drawn, series],
   );
   const cursor = x(drawn.at.pH);
+  const isOnScale = drawn.at.value <= drawn.top;
+  const dot = {
+    x: cursor,
+    y: isOnScale ? y(drawn.at.value) : undefined,
+    top: rect.y,
+    // On the side away from where the curve rises.
+    limit: rises(drawn) ? cursor : right(rect),
+    text: drawn.at.text,
+  };
+  const taken = useTaken(rect, compact, dot);
   const pH = shownPH(String(drawn.at.pH)).replace('-', '\u2212');
   const line = { x: cursor, top: own.top - 10, axis, width, text: pH };
   return (
@@ -91,12 +104,25 @@ export function CapacityFigure(props: CapacityFigureProps) {
           caption={compact ? undefined : caption}
         />
         <FigureCursor {...line} part="line" />
-        <CapacityNames drawn={drawn} rect={rect} x={x} y={y} cursor={cursor} />
-        {drawn.at.value <= drawn.top && (
-          <ValueDot x={cursor} y={y(drawn.at.value)} limit={right(rect)} text={drawn.at.text} />
-        )}
+        <CapacityNames drawn={drawn} rect={rect} x={x} y={y} cursor={cursor} taken={taken} />
+        <ValueDot {...dot} />
         <FigureCursor {...line} part="tab" />
       </Svg>
     </View>
   );
+}
+
+/** Whether the whole rises with pH where the answer stands. */
+function rises({ pH, whole, at }: DrawnCapacity): boolean {
+  const next = pH.findIndex((value) => value > at.pH);
+  return (whole[next] ?? 0) > (whole[next - 1] ?? 0);
+}
+
+/** What is written in the panel before names are: the value at the pH, numerals inside it. */
+function useTaken(rect: Rect, compact: boolean, dot: Parameters<typeof valueBox>[0]) {
+  const { x, y, width, height } = valueBox(dot);
+  return useMemo(() => {
+    const value = { x, y, width, height };
+    return compact ? [value, { ...rect, width: numeralsRoom }] : [value];
+  }, [x, y, width, height, rect, compact]);
 }

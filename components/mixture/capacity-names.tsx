@@ -1,4 +1,5 @@
 import { useMemo } from 'react';
+import { Line } from 'react-native-svg';
 import { FigureText } from '../chart/figure-text';
 import { bottom, type Rect } from '../chart/geometry';
 import { Marker } from '../chart/marker';
@@ -14,6 +15,8 @@ interface CapacityNamesProps {
   readonly y: Scale;
   /** x of the answer's pH, px: names keep out of its way. */
   readonly cursor: number;
+  /** What is already written in the panel. */
+  readonly taken: readonly Rect[];
 }
 
 const size = 12;
@@ -24,17 +27,25 @@ const advance = 0.53;
 const worthNaming = 0.03;
 const longest = 26;
 
+/** The whole where it is the components’, and not that of water: there its name may stand. */
+const buffered = ({ whole: values, parts }: DrawnCapacity) =>
+  values.map((value, i) => {
+    const own = parts.reduce((sum, part) => sum + (part.values[i] ?? 0), 0);
+    return own > mostly * value ? value : Infinity;
+  });
+const mostly = 0.7;
+
 const whole = -1;
 const shortened = (title: string) =>
   title.length > longest ? `${title.slice(0, longest - 1)}…` : title;
 
 /** Names at their curves, as words. */
-export function CapacityNames({ drawn, rect, x, y, cursor }: CapacityNamesProps) {
+export function CapacityNames({ drawn, rect, x, y, cursor, taken }: CapacityNamesProps) {
   const { colours, series } = useTheme();
   const named = useMemo(() => {
     const { pH, top, parts } = drawn;
     const wanted = [
-      ...(parts.length > 1 ? [{ key: whole, title: 'all together', values: drawn.whole }] : []),
+      ...(parts.length > 1 ? [{ key: whole, title: 'all together', values: buffered(drawn) }] : []),
       ...parts.map(({ title, series: key, values }) => ({
         key,
         title: shortened(title),
@@ -50,16 +61,30 @@ export function CapacityNames({ drawn, rect, x, y, cursor }: CapacityNamesProps)
           value <= top ? { x: x(pH[i] ?? 0), y: y(value) } : [],
         ),
       })),
-      { bounds: rect, zero: bottom(rect), cursor },
+      { bounds: rect, zero: bottom(rect), cursor, taken },
     );
     return places.map((place) => ({
       ...place,
       title: wanted.find(({ key }) => key === place.key)?.title ?? '',
     }));
-  }, [drawn, rect, x, y, cursor]);
+  }, [drawn, rect, x, y, cursor, taken]);
   return (
     <>
-      {named.map(({ key, anchor, box, title }) => (
+      {named.map(
+        ({ key, leader }) =>
+          leader && (
+            <Line
+              key={`leader ${key}`}
+              x1={leader[0].x}
+              y1={leader[0].y}
+              x2={leader[1].x}
+              y2={leader[1].y}
+              stroke={colours.inkSoft}
+              strokeWidth={1}
+            />
+          ),
+      )}
+      {named.map(({ key, box, title }) => (
         <FigureText
           key={`name ${key}`}
           x={box.x}

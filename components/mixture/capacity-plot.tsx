@@ -3,6 +3,7 @@ import { StyleSheet, View } from 'react-native';
 import { DataTable } from '../ui/data-table';
 import { Disclosure } from '../ui/disclosure';
 import { Skeleton } from '../ui/skeleton';
+import { space } from '../ui/theme';
 import { Words } from '../ui/words';
 import { CapacityFigure } from './capacity-figure';
 import { conditionsInFigure } from './conditions-text';
@@ -26,7 +27,7 @@ export function CapacityPlot({ capacity, state, height, compact, figure }: Capac
     <View>
       <View
         onLayout={({ nativeEvent }) => setWidth(Math.floor(nativeEvent.layout.width))}
-        style={{ minHeight: height }}
+        style={[{ minHeight: height }, compact && styles.edge]}
       >
         {curve && drawn && width > 0 && (
           <CapacityFigure
@@ -87,4 +88,8 @@ function CapacityNumbers({ drawn }: { readonly drawn: DrawnCapacity }) {
   );
 }
 
-const styles = StyleSheet.create({ note: { marginLeft: 36 } });
+const styles = StyleSheet.create({
+  // From gutter to gutter.
+  edge: { marginHorizontal: -space[4] },
+  note: { marginLeft: 36 },
+});

@@ -99,7 +99,7 @@ export function FlaskInputs({ mixture }: { readonly mixture: Mixture }) {
             asked={pressureAsked}
             value={air}
             onChange={(next) => change({ air: next })}
-            help="0.00042 atm is 420 ppm, the air of today."
+            help="42.6 Pa is 420 µatm, as in the air of today."
             error={faults.air}
           />
         )}
@@ -112,7 +112,7 @@ export function FlaskInputs({ mixture }: { readonly mixture: Mixture }) {
 const styles = StyleSheet.create({
   inputs: { gap: space[1] },
   head: { flexDirection: 'row', justifyContent: 'space-between', alignItems: 'baseline' },
-  block: { borderTopWidth: 1, paddingTop: space[3], marginTop: space[2], gap: space[1] },
+  block: { borderTopWidth: 1, paddingTop: space[3], marginTop: space[2], gap: space[2] },
   row: { flexDirection: 'row', gap: space[3] },
   cell: { flex: 1, minWidth: 0 },
   start: { alignItems: 'flex-start' },

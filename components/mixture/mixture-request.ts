@@ -93,7 +93,7 @@ export function mixtureAsked(state: MixtureState, systemOf: SystemOf): MixtureAs
     some.map((component) => ({ component, of })),
   );
   if (state.air !== undefined) {
-    const heldBy = { partialPressure: `${state.air} atm` };
+    const heldBy = { partialPressure: state.air };
     asked.push({ component: { system: { id: 'carbonic-acid' }, heldBy }, of: 'air' });
   }
   const ions = state.electrolytes.flatMap((one, of) => ionsOf(one).map((ion) => ({ ion, of })));

@@ -1,7 +1,6 @@
 import { StyleSheet, View, type View as ViewType } from 'react-native';
 import type { Ref } from 'react';
 import { Warnings } from '../answer/warnings';
-import { trueMinus } from '../curves/rounded';
 import { Cautions } from '../notes/cautions';
 import { Button } from '../ui/button';
 import { Disclosure } from '../ui/disclosure';
@@ -48,9 +47,7 @@ export function MixtureResult({ mixture, plotHeight, compact, figure }: MixtureR
           )}
         </>
       )}
-      <View style={compact && styles.edge}>
-        <CapacityPlot {...mixture} height={plotHeight} compact={compact} figure={figure} />
-      </View>
+      <CapacityPlot {...mixture} height={plotHeight} compact={compact} figure={figure} />
       {answered && (
         <>
           <SpeciesTable answered={answered} />
@@ -59,8 +56,8 @@ export function MixtureResult({ mixture, plotHeight, compact, figure }: MixtureR
           <Shortcuts answered={answered} />
           <View style={styles.foot}>
             <Words kind="help">
-              Charge balance closes within <Numerals>{residual(answered)}</Numerals> mol/L. A
-              predicted pH is an estimate: calibrate the meter, measure, adjust.
+              Charge balance closes within <Numerals>{answered.answer.solver.residual}</Numerals>{' '}
+              mol/L. A predicted pH is an estimate: calibrate the meter, measure, adjust.
             </Words>
             <Disclosure label="Before you mix">
               <Cautions />
@@ -72,8 +69,6 @@ export function MixtureResult({ mixture, plotHeight, compact, figure }: MixtureR
     </View>
   );
 }
-
-const residual = ({ answer }: Answered) => trueMinus(answer.solver.residual);
 
 /** A sentence is said once the flask has rested this long, ms. */
 const announced = 700;
@@ -107,7 +102,6 @@ function CopyDigits({ answered }: { readonly answered: Answered }) {
 
 const styles = StyleSheet.create({
   result: { gap: space[5] },
-  edge: { marginHorizontal: -space[4] },
   start: { alignItems: 'flex-start' },
   foot: { gap: space[2] },
 });

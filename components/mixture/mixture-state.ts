@@ -27,7 +27,7 @@ export interface MixtureState {
   readonly strongAcid: string;
   readonly strongBase: string;
   readonly electrolytes: readonly ElectrolytePart[];
-  /** Partial pressure of carbon dioxide, atm; undefined for a closed flask. */
+  /** Partial pressure of carbon dioxide, Pa; undefined for a closed flask. */
   readonly air: string | undefined;
   /** °C. */
   readonly temperature: string;
@@ -62,8 +62,8 @@ export const firstState: MixtureState = {
   ],
 };
 
-/** Carbon dioxide in today’s air, about 420 ppm, atm. */
-export const airOfToday = '0.00042';
+/** Carbon dioxide in today’s air, Pa: about 420 ppm, 0.00042 atm of 101325 Pa. */
+export const airOfToday = '42.5565';
 
 /** What a new component begins with, mol/L. */
 export const firstConcentration = '0.010';

@@ -36,7 +36,7 @@ export function Shortcuts({ answered: { answer } }: { readonly answered: Answere
           <View key={`${name} ${concerns}`}>
             <Words>
               {component && `${componentTitle(component)}: `}
-              {rules[name]} gives <Numerals>{pH}</Numerals>, <Off error={error} />.
+              {rules[name]} gives pH <Numerals>{pH}</Numerals>, which is <Off error={error} />.
             </Words>
             <Words kind="help">{trueMinus(why)}</Words>
           </View>

@@ -1,6 +1,7 @@
 import { View } from 'react-native';
 import { DataTable, type Row } from '../ui/data-table';
 import { Formula } from '../ui/formula';
+import { Numerals } from '../ui/numerals';
 import { Quantity } from '../ui/quantity';
 import { space } from '../ui/theme';
 import { useLayout } from '../ui/use-layout';
@@ -23,12 +24,16 @@ const formColumns = [
   { key: 'gamma', head: <Quantity of="activityCoefficient" />, numeric: true },
 ] as const;
 
-const cells = (one: ShownSpecies): Row => ({
-  form: <Formula formula={one.formula} size={14} />,
-  concentration: shownAmount(one.concentration),
-  fraction: shownAmount(one.fraction),
-  gamma: shownAmount(one.activityCoefficient),
-});
+/** On a phone four columns of figures find room at a size smaller. */
+const cells = (one: ShownSpecies, size: 13 | 14): Row => {
+  const amount = (value: string) => <Numerals size={size}>{shownAmount(value)}</Numerals>;
+  return {
+    form: <Formula formula={one.formula} size={size} />,
+    concentration: amount(one.concentration),
+    fraction: amount(one.fraction),
+    gamma: amount(one.activityCoefficient),
+  };
+};
 
 /** Every form in the mixture: one table where there is room, else one a component. */
 export function SpeciesTable({ answered }: { readonly answered: Answered }) {
@@ -47,7 +52,7 @@ export function SpeciesTable({ answered }: { readonly answered: Answered }) {
               caption={`Forms of ${system.title}`}
               hideCaption
               columns={formColumns}
-              rows={system.species.map((one) => ({ key: one.formula, ...cells(one) }))}
+              rows={system.species.map((one) => ({ key: one.formula, ...cells(one, 13) }))}
             />
           </View>
         ))}
@@ -69,7 +74,7 @@ const rowsOf = ({ key, title, species }: ShownSystem): Row[] =>
   species.map((one, index) => ({
     key: `${key} ${index}`,
     component: index === 0 ? title : <span className="only-said">{title}</span>,
-    ...cells(one),
+    ...cells(one, 14),
   }));
 
 /** The ions beside the components’ forms: those of water, and those that take no part. */

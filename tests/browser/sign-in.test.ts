@@ -20,7 +20,7 @@ test('a visitor to Curves is asked for nothing and costs no call about a session
   const { page, complaints } = await open(phone);
   page.on('request', (call) => calls.push(new URL(call.url()).pathname));
   await page.goto(server.url);
-  await page.getByRole('link', { name: 'Sign in' }).waitFor();
+  await page.getByRole('button', { name: 'More' }).waitFor();
   await page.getByRole('slider', { name: 'pH cursor' }).waitFor();
   expect(calls.filter((path) => /account|session/.test(path) && path.startsWith('/v1'))).toEqual(
     [],

@@ -191,8 +191,8 @@ describe('the list', () => {
       await title(page, 'Systems');
       await stands(before);
     }
-    await page.getByRole('navigation').getByRole('link', { name: 'Notes' }).tap();
-    await page.waitForURL(`${server.url}/notes`);
+    await page.getByRole('navigation').getByRole('link', { name: 'API' }).tap();
+    await page.waitForURL(`${server.url}/api`);
     await page.getByRole('navigation').getByRole('link', { name: 'Systems' }).tap();
     await title(page, 'Systems');
     await stands(0);

@@ -78,12 +78,12 @@ describe('the call of a mixture', () => {
           { name: 'MgCl2', concentration: '0.05' },
           { name: 'Ca(OH)2', concentration: '0.02' },
         ],
-        air: '0.00042',
+        air: '42.5565',
       }),
       known,
     );
     expect(asked?.body).toEqual({
-      components: [{ system: { id: 'carbonic-acid' }, heldBy: { partialPressure: '0.00042 atm' } }],
+      components: [{ system: { id: 'carbonic-acid' }, heldBy: { partialPressure: '42.5565' } }],
       strongAcid: '0.01',
       ions: [
         { charge: 2, concentration: '0.05', ion: 'Mg^2+' },
@@ -117,7 +117,7 @@ describe('the call of a mixture', () => {
   });
 
   test('asks for the capacity of each system once, at the ionic strength of the answer', () => {
-    const { body } = mixtureAsked({ ...firstState, air: '0.00042' }, known) ?? {};
+    const { body } = mixtureAsked({ ...firstState, air: '42.5565' }, known) ?? {};
     if (!body) throw new Error('There is no call.');
     expect(bufferingIn(body)).toEqual([
       { system: { id: 'phosphoric-acid' }, concentration: '0.05', components: [0, 1] },
