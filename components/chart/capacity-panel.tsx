@@ -4,6 +4,7 @@ import { useTheme, type SeriesStyle } from '../ui/theme';
 import { clipCurve } from './clip-curve';
 import type { Rect } from './geometry';
 import { bottom } from './geometry';
+import { ghostDash } from './ghost-dash';
 import { linePath } from './line-path';
 import { Marker } from './marker';
 import { PanelFrame } from './panel-frame';
@@ -39,23 +40,23 @@ export const capacityScale = (rect: Rect, top: number) =>
   linearScale([0, top], [bottom(rect), rect.y]);
 
 const strokes = { whole: 2.25, ghost: 1.25 } as const;
-const dashes = { whole: undefined, ghost: '5 3' } as const;
 
 /** Buffer capacity over pH, clipped at the top, with its maxima marked. */
 export function CapacityPanel(props: CapacityPanelProps) {
   const { rect, x, top, lines, maxima = [], head, inside = false, filled = false } = props;
   const { colours } = useTheme();
   const y = useMemo(() => capacityScale(rect, top), [rect, top]);
-  const paths = useMemo(
-    () =>
-      lines.map(({ key, pH, values, kind, style }) => {
-        const points = values.map((value, i) => ({ x: x(pH[i] ?? 0), y: value }));
-        const clipped = clipCurve(points, [0, top]);
-        const d = linePath(clipped.map((point) => ({ ...point, y: y(point.y) })));
-        return { key, kind, style, d };
-      }),
-    [lines, x, y, top],
-  );
+  const paths = useMemo(() => {
+    const ghosts = lines.filter(({ kind }) => kind === 'ghost');
+    return lines.map((line) => {
+      const { key, pH, values, kind, style } = line;
+      const dash = kind === 'ghost' ? ghostDash(ghosts.indexOf(line)) : undefined;
+      const points = values.map((value, i) => ({ x: x(pH[i] ?? 0), y: value }));
+      const clipped = clipCurve(points, [0, top]);
+      const d = linePath(clipped.map((point) => ({ ...point, y: y(point.y) })));
+      return { key, kind, style, dash, d };
+    });
+  }, [lines, x, y, top]);
   const under = useMemo(() => {
     const whole = filled ? lines.find(({ kind, style }) => kind === 'whole' && !style) : undefined;
     if (!whole) return undefined;
@@ -80,7 +81,7 @@ export function CapacityPanel(props: CapacityPanelProps) {
           kind: value === 0 ? 'axis' : 'grid',
         }))}
       />
-      {paths.map(({ key, kind, style, d }) =>
+      {paths.map(({ key, kind, style, dash, d }) =>
         style ? (
           <SeriesLine key={key} d={d} style={style} casing={filled ? colours.page : undefined} />
         ) : (
@@ -89,7 +90,7 @@ export function CapacityPanel(props: CapacityPanelProps) {
             d={d}
             stroke={kind === 'whole' ? colours.ink : colours.inkSoft}
             strokeWidth={strokes[kind]}
-            strokeDasharray={dashes[kind]}
+            strokeDasharray={dash}
             fill="none"
           />
         ),

@@ -4,6 +4,7 @@ import { useTheme } from '../ui/theme';
 import { clipCurve } from './clip-curve';
 import type { Rect } from './geometry';
 import { bottom } from './geometry';
+import { ghostDash } from './ghost-dash';
 import { linePath } from './line-path';
 import { PanelFrame } from './panel-frame';
 import type { Scale } from './scale';
@@ -72,13 +73,13 @@ export function ChargePanel(props: ChargePanelProps) {
         }))}
       />
       <Path d={`M${ghost.slice(1)}`} stroke={colours.edge} strokeWidth={1} fill="none" />
-      {ghosts.map(({ key, points: curve }) => (
+      {ghosts.map(({ key, points: curve }, place) => (
         <Path
           key={key}
           d={pathOf(curve)}
           stroke={colours.inkSoft}
           strokeWidth={1.25}
-          strokeDasharray="5 3"
+          strokeDasharray={ghostDash(place)}
           fill="none"
         />
       ))}

@@ -32,8 +32,9 @@ export function PanelFrame({
   y,
   lines,
   head,
-  headRise = 12,
   inside = false,
+  // Over the numeral that stands on the topmost line.
+  headRise = inside ? 24 : 12,
 }: PanelFrameProps) {
   const { colours } = useTheme();
   const stroke = { axis: colours.edge, bound: colours.rule, grid: colours.rule };

@@ -30,6 +30,12 @@ interface Panel {
   readonly cursor?: number | undefined;
   /** What is already written in the panel. */
   readonly taken?: readonly Rect[];
+  /** Lines that need no name here, but that a name should rather not cross. */
+  readonly lines?: readonly (readonly Point[])[];
+}
+
+interface SampledPanel extends Omit<Panel, 'lines'> {
+  readonly lines: readonly SampledCurve[];
 }
 
 interface Wanted extends NamedCurve {
@@ -38,6 +44,7 @@ interface Wanted extends NamedCurve {
 
 const costs = {
   crossesCurve: 110,
+  crossesLine: 60,
   crossesOwn: 40,
   crossesCursor: 60,
   leadsBeyondCursor: 140,
@@ -64,11 +71,12 @@ export function placeNames(curves: readonly NamedCurve[], panel: Panel): PlacedN
   const wanted = curves
     .filter(({ points }) => points.length > 0)
     .map((curve) => ({ ...curve, curve: sampleCurve(curve.points, panel.bounds) }));
+  const lines = (panel.lines ?? []).map((points) => sampleCurve(points, panel.bounds));
   const placed: PlacedName[] = [];
   for (const name of edgesFirst(wanted)) {
     // Neighbours are most in the way: looked at first, they end a hopeless count early.
     const nearestFirst = [...wanted].sort((a, b) => away(a, name) - away(b, name));
-    const best = cheapest(name, nearestFirst, placed, panel);
+    const best = cheapest(name, nearestFirst, placed, { ...panel, lines });
     if (best) placed.push(best);
   }
   return placed;
@@ -87,7 +95,7 @@ function cheapest(
   name: Wanted,
   all: readonly Wanted[],
   placed: readonly PlacedName[],
-  panel: Panel,
+  panel: SampledPanel,
 ): PlacedName | undefined {
   const { peak, columns, left } = name.curve;
   const half = (panel.zero - peak.y) / 2;
@@ -122,7 +130,7 @@ function against(
   name: Wanted,
   all: readonly Wanted[],
   placed: readonly PlacedName[],
-  { bounds, cursor, taken = [] }: Panel,
+  { bounds, cursor, lines, taken = [] }: SampledPanel,
   budget: number,
 ): number {
   if (!contains(bounds, box)) return costs.outside;
@@ -134,6 +142,7 @@ function against(
     if (cursor > box.x - 4 && cursor < right(box) + 4) cost += costs.crossesCursor;
     if (leader && anchor.x < cursor !== middle.x < cursor) cost += costs.leadsBeyondCursor;
   }
+  cost += costs.crossesLine * lines.filter((line) => crosses(line, box)).length;
   const reach = leader ? 0 : distanceFrom(name.curve, middle, 60);
   for (const { curve } of all) {
     if (cost >= budget) break;

@@ -1,5 +1,6 @@
 import type { ActivityModel } from '../../shared/conditions';
 import { Choice } from '../ui/choice';
+import { Quantity } from '../ui/quantity';
 import { modelWords } from './activity-models';
 
 interface ModelChoiceProps<Model extends ActivityModel> {
@@ -20,8 +21,21 @@ export function ModelChoice<Model extends ActivityModel>(props: ModelChoiceProps
       options={models.map((model) => ({ value: model, label: modelWords[model].name }))}
       value={value}
       onChange={onChange}
-      help={modelWords[value].range}
+      help={<RangeWords text={modelWords[value].range} />}
       {...(error === undefined ? {} : { error })}
     />
+  );
+}
+
+/** A sentence in which the sign of ionic strength is set as a quantity. */
+function RangeWords({ text }: { readonly text: string }) {
+  const [before, after] = text.split(/\bI\b/);
+  if (after === undefined) return text;
+  return (
+    <>
+      {before}
+      <Quantity of="ionicStrength" />
+      {after}
+    </>
   );
 }

@@ -11,6 +11,7 @@ import { linearScale } from '../chart/scale';
 import { SeriesLine } from '../chart/series-line';
 import { formulaWidth, numeralsWidth } from '../chart/text-width';
 import { useTheme } from '../ui/theme';
+import { besideNameInFigure } from './beside-name';
 import { haveSameForms, shiftOf } from './comparison';
 import type { DrawnCurve } from './drawn-curve';
 import type { BesideCurve } from './figure-extras';
@@ -95,6 +96,7 @@ export function BesideLines(props: BesideLinesProps) {
         zero: bottom(rect),
         cursor: placing,
         taken: written,
+        lines: drawn.shown.map((index) => pointsOf(drawn, index)),
       });
       written.push(...placed.map(({ box }) => box));
       return {
@@ -133,7 +135,7 @@ export function BesideLines(props: BesideLinesProps) {
           <FormulaText key={text} formula={text} {...place} />
         ) : (
           <FigureText key={text} {...place}>
-            {text}
+            {besideNameInFigure(text)}
           </FigureText>
         );
       })}

@@ -1,12 +1,13 @@
 import { memo, useMemo } from 'react';
 import { TSpan } from 'react-native-svg';
-import { CapacityPanel, type CapacityLine } from '../chart/capacity-panel';
+import { CapacityPanel, capacityScale, type CapacityLine } from '../chart/capacity-panel';
 import type { Rect } from '../chart/geometry';
 import type { Scale } from '../chart/scale';
 import { betaSign, concentrationSign } from '../chart/symbols';
 import { totalInWords } from './total-in-words';
 import { fonts } from '../ui/theme';
-import { capacityTop } from './capacity';
+import { BesideNames } from './beside-names';
+import { capacityTop, type Capacity } from './capacity';
 import type { FigureExtras } from './figure-extras';
 
 interface CapacityCurveProps {
@@ -14,11 +15,12 @@ interface CapacityCurveProps {
   readonly rect: Rect;
   readonly x: Scale;
   readonly compact: boolean;
+  readonly placing: number;
 }
 
 /** Buffer capacity of the system at its total, over pH. */
 export const CapacityCurve = memo(function CapacityCurve(props: CapacityCurveProps) {
-  const { extras, rect, x, compact } = props;
+  const { extras, rect, x, compact, placing } = props;
   const { capacity, beside } = extras;
   const lines = useMemo(() => {
     const ghosts = beside.flatMap(({ name, capacity: other }): CapacityLine[] =>
@@ -29,25 +31,40 @@ export const CapacityCurve = memo(function CapacityCurve(props: CapacityCurvePro
       : [];
     return [...ghosts, ...whole];
   }, [capacity, beside]);
-  if (!capacity) return null;
+  const named = useMemo(() => {
+    if (!capacity) return undefined;
+    const y = capacityScale(rect, capacityTop(capacity));
+    const pointsOf = ({ pH, values }: Capacity) =>
+      values.map((value, i) => ({ x: x(pH[i] ?? 0), y: y(value) }));
+    return {
+      first: pointsOf(capacity),
+      others: beside.flatMap(({ name, capacity: other }) =>
+        other ? [{ name, points: pointsOf(other) }] : [],
+      ),
+    };
+  }, [capacity, beside, rect, x]);
+  if (!capacity || !named) return null;
   return (
-    <CapacityPanel
-      rect={rect}
-      x={x}
-      top={capacityTop(capacity)}
-      lines={lines}
-      maxima={capacity.maxima.filter(({ pH }) => x(pH) >= rect.x && x(pH) <= rect.x + rect.width)}
-      inside={compact}
-      head={
-        <>
-          {betaSign}
-          {compact ? ' at ' : ' buffer capacity at '}
-          {concentrationSign}
-          {' = '}
-          <TSpan fontFamily={fonts.numbers}>{totalInWords(capacity.total)}</TSpan>
-          {' mmol/L, in mmol/L per pH'}
-        </>
-      }
-    />
+    <>
+      <CapacityPanel
+        rect={rect}
+        x={x}
+        top={capacityTop(capacity)}
+        lines={lines}
+        maxima={capacity.maxima.filter(({ pH }) => x(pH) >= rect.x && x(pH) <= rect.x + rect.width)}
+        inside={compact}
+        head={
+          <>
+            {betaSign}
+            {compact ? ' at ' : ' buffer capacity at '}
+            {concentrationSign}
+            {' = '}
+            <TSpan fontFamily={fonts.numbers}>{totalInWords(capacity.total)}</TSpan>
+            {' mmol/L, in mmol/L per pH'}
+          </>
+        }
+      />
+      <BesideNames rect={rect} {...named} placing={placing} />
+    </>
   );
 });

@@ -1,8 +1,9 @@
 import { memo, useMemo } from 'react';
-import { ChargePanel } from '../chart/charge-panel';
+import { ChargePanel, chargeScale } from '../chart/charge-panel';
 import type { Rect } from '../chart/geometry';
 import type { Scale } from '../chart/scale';
 import { meanChargeSign } from '../chart/symbols';
+import { BesideNames } from './beside-names';
 import type { DrawnCurve } from './drawn-curve';
 import { endCharges } from './drawn-curve';
 import type { BesideCurve } from './figure-extras';
@@ -16,6 +17,7 @@ interface ChargeLineProps {
   readonly rect: Rect;
   readonly x: Scale;
   readonly compact: boolean;
+  readonly placing: number;
 }
 
 /** The mean charge over pH. */
@@ -25,22 +27,35 @@ export const ChargeLine = memo(function ChargeLine({
   rect,
   x,
   compact,
+  placing,
 }: ChargeLineProps) {
   const points = useMemo(() => chargesOf(drawn), [drawn]);
   const ghosts = useMemo(
     () => beside.map(({ name, drawn: other }) => ({ key: name, points: chargesOf(other) })),
     [beside],
   );
+  const named = useMemo(() => {
+    const y = chargeScale(endCharges(drawn), rect);
+    const px = (curve: DrawnCurve) =>
+      chargesOf(curve).map(({ pH, charge }) => ({ x: x(pH), y: y(charge) }));
+    return {
+      first: px(drawn),
+      others: beside.map(({ name, drawn: other }) => ({ name, points: px(other) })),
+    };
+  }, [drawn, beside, rect, x]);
   return (
-    <ChargePanel
-      rect={rect}
-      x={x}
-      charges={endCharges(drawn)}
-      ranges={drawn.stair}
-      points={points}
-      ghosts={ghosts}
-      inside={compact}
-      head={compact ? undefined : <>{meanChargeSign} mean charge</>}
-    />
+    <>
+      <ChargePanel
+        rect={rect}
+        x={x}
+        charges={endCharges(drawn)}
+        ranges={drawn.stair}
+        points={points}
+        ghosts={ghosts}
+        inside={compact}
+        head={compact ? undefined : <>{meanChargeSign} mean charge</>}
+      />
+      <BesideNames rect={rect} {...named} placing={placing} />
+    </>
   );
 });

@@ -1,9 +1,11 @@
 import { View } from 'react-native';
 import { Warnings } from '../answer/warnings';
 import { Formula } from '../ui/formula';
+import { Numerals } from '../ui/numerals';
 import { Quantity } from '../ui/quantity';
 import { space } from '../ui/theme';
 import { Words } from '../ui/words';
+import { BesideName } from './beside-name';
 import { haveSameForms, shiftOf } from './comparison';
 import type { DrawnCurve } from './drawn-curve';
 import type { BesideCurve } from './figure-extras';
@@ -26,7 +28,7 @@ export function ComparisonReadOut({ drawn, beside, pH }: ComparisonReadOutProps)
     return (
       <View key={place} style={{ gap: space[2] }}>
         <Words kind="section" heading={2}>
-          Compared with {name}
+          Compared with <BesideName name={name} />
         </Words>
         <Warnings warnings={warningsBeside(drawn, other)} />
         {haveSameForms(drawn, other) ? (
@@ -72,8 +74,8 @@ function Moves({ drawn, beside, name }: MovesProps) {
       <ValueRow
         label={
           <Words>
-            most, at pH {largest.pH.toFixed(2)}:{' '}
-            <Formula formula={drawn.formulas[largest.index] ?? ''} />
+            <Formula formula={drawn.formulas[largest.index] ?? ''} /> most, at pH{' '}
+            <Numerals>{largest.pH.toFixed(2)}</Numerals>
           </Words>
         }
         value={signedChange(largest.change)}

@@ -43,12 +43,6 @@ export function ConditionFields({ conditions, onChange, error }: ConditionFields
           />
         </View>
       </View>
-      <ModelChoice
-        models={curveModels}
-        value={activityModel}
-        onChange={(value) => onChange({ activityModel: value })}
-        error={faults.at.activityModel}
-      />
       {faults.passable && (
         <View style={styles.pass}>
           <Button
@@ -57,6 +51,12 @@ export function ConditionFields({ conditions, onChange, error }: ConditionFields
           />
         </View>
       )}
+      <ModelChoice
+        models={curveModels}
+        value={activityModel}
+        onChange={(value) => onChange({ activityModel: value })}
+        error={faults.at.activityModel}
+      />
       {outOfRange === 'compute' && (
         <Checkbox
           label="Compute beyond range"

@@ -6,6 +6,7 @@ import { BasisInShort } from '../handbook/basis-in-short';
 import { Button } from '../ui/button';
 import { Quantity } from '../ui/quantity';
 import { space } from '../ui/theme';
+import { useLayout } from '../ui/use-layout';
 import { Words } from '../ui/words';
 import { isMoved, type DrawnCurve } from './drawn-curve';
 import { MovedConstants } from './moved-constants';
@@ -21,6 +22,7 @@ interface ConstantsListProps {
 /** A stored system's constants as given, what conditions make of them, where they are from. */
 export function ConstantsList({ id, drawn, onTypeOwn }: ConstantsListProps) {
   const { constants } = drawn;
+  const { rail } = useLayout();
   const bases = basesOf(constants);
   return (
     <View style={styles.list}>
@@ -29,9 +31,14 @@ export function ConstantsList({ id, drawn, onTypeOwn }: ConstantsListProps) {
         <BasisInShort key={basis.steps[0]} basis={basis} count={constants.length} />
       ))}
       <View style={styles.ways}>
-        <Button kind="quiet" label="Change these constants" onPress={onTypeOwn} />
-        <Link href={`/systems/${id}`} style={styles.link}>
-          <Words kind="button" tone="well">
+        <Button
+          kind="quiet"
+          size={rail ? 'small' : 'regular'}
+          label="Change these constants"
+          onPress={onTypeOwn}
+        />
+        <Link href={`/systems/${id}`} style={rail ? styles.smallLink : styles.link}>
+          <Words kind={rail ? 'label' : 'button'} tone="well">
             All that is known of them
           </Words>
         </Link>
@@ -63,4 +70,5 @@ const styles = StyleSheet.create({
   list: { gap: space[2] },
   ways: { alignItems: 'flex-start' },
   link: { paddingVertical: 11 },
+  smallLink: { paddingVertical: 6 },
 });

@@ -34,6 +34,11 @@ export function CurvePlot({ curves, layers, ...figure }: CurvePlotProps) {
       onMove={move}
     >
       {empty && <Empty title="Nothing is drawn">Choose a layer to draw it over the pH axis.</Empty>}
+      {!drawn && curve.error && !empty && (
+        <Empty title="Nothing is drawn yet">
+          The curve asked for was refused; change what is asked.
+        </Empty>
+      )}
       {late && (
         <View role="status" style={[styles.late, { backgroundColor: colours.page }]}>
           <Words kind="help">The new curve is being computed</Words>

@@ -1,7 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { computeClient, patience, typingRest } from '../answer/compute-client';
-import { systemAsked } from '../constants/choice';
+import { systemAsked, type Choice } from '../constants/choice';
 import { useSettled } from '../ui/use-settled';
 import { givenConstants, type CurveAsked } from './curve-asked';
 import { conditionsAsked, firstConditions } from './curve-conditions';
@@ -31,6 +31,8 @@ export async function fetchCurve(
   return reaches ? drawn : over(own);
 }
 
+const isSame = (a: Choice, b: Choice) => a === b || JSON.stringify(a) === JSON.stringify(b);
+
 const isTyped = ({ choice, conditions }: CurveAsked) =>
   choice.kind === 'typed' || conditions !== firstConditions;
 
@@ -47,9 +49,12 @@ export function useCurve(asked: CurveAsked) {
   });
   const [last, setLast] = useState(query.data);
   if (query.data && query.data !== last) setLast(query.data);
+  const drawn = query.data ?? last;
   return {
     ...query,
-    drawn: query.data ?? last,
+    drawn,
+    /** What is drawn is of the system that is asked for, under whichever conditions. */
+    isOfChoice: drawn !== undefined && isSame(drawn.asked.choice, asked.choice),
     /** What is drawn is what is asked for, and not what was before. */
     isCurrent: query.data !== undefined && settled === asked,
   };

@@ -73,9 +73,11 @@ export function CurvesFigure(props: CurvesFigureProps) {
               x={x}
             />
           )}
-          {panels.charge && <ChargeLine {...shared} beside={beside} rect={panels.charge} />}
+          {panels.charge && (
+            <ChargeLine {...shared} beside={beside} rect={panels.charge} placing={placing} />
+          )}
           {panels.capacity && (
-            <CapacityCurve extras={extras} rect={panels.capacity} x={x} compact={compact} />
+            <CapacityCurve {...shared} extras={extras} rect={panels.capacity} placing={placing} />
           )}
           {panels['lg-c'] && (
             <LgCLines {...named} rect={panels['lg-c']} total={total} capacity={capacity} />

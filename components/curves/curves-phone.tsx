@@ -17,6 +17,7 @@ import { webStyle } from '../ui/web-style';
 import { Words } from '../ui/words';
 import { Conditions } from './conditions';
 import { conditionsText } from './conditions-of';
+import { CompareInputs } from './compare-inputs';
 import { CurveNotices } from './curve-notices';
 import { CurvePlot } from './curve-plot';
 import { CurveWarnings } from './curve-warnings';
@@ -159,7 +160,10 @@ export function CurvesPhone({ curves }: { readonly curves: Curves }) {
         </View>
       )}
       <Dialog title="Change the system" open={open === 'system'} onClose={close}>
-        <SystemInputs {...curves} choose={pick} />
+        <View style={styles.inputs}>
+          <SystemInputs {...curves} choose={pick} />
+          <CompareInputs {...curves} />
+        </View>
       </Dialog>
       <ShareDialog open={open === 'share'} onClose={close} curves={curves} exports={exports} />
     </Page>
@@ -175,6 +179,7 @@ const styles = StyleSheet.create({
   title: { flexDirection: 'row', alignItems: 'center', gap: space[1], minHeight: 28 },
   titleWords: { flexShrink: 1, minWidth: 0 },
   column: { width: '100%', maxWidth: 720, alignSelf: 'center', gap: space[3] },
+  inputs: { gap: space[4] },
   edge: { marginHorizontal: -space[4] },
   dock: {
     marginHorizontal: -space[4],

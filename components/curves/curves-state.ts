@@ -17,11 +17,11 @@ export type Layer = (typeof layers)[number];
 export const views = ['fractions', 'charge', 'capacity', 'lg-c'] as const;
 export type View = (typeof views)[number];
 
-/** What each view draws. */
+/** What each view draws, from above. */
 export const layersOfView: Readonly<Record<View, readonly Layer[]>> = {
   fractions: ['fractions', 'predominance'],
-  charge: ['predominance', 'charge', 'isoelectric-point'],
-  capacity: ['predominance', 'capacity'],
+  charge: ['charge', 'predominance', 'isoelectric-point'],
+  capacity: ['capacity', 'predominance'],
   'lg-c': ['lg-c'],
 };
 

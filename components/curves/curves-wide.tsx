@@ -10,6 +10,7 @@ import { space, useTheme } from '../ui/theme';
 import { useLayout } from '../ui/use-layout';
 import { webStyle } from '../ui/web-style';
 import { Words } from '../ui/words';
+import { CompareInputs } from './compare-inputs';
 import { CurveNotices } from './curve-notices';
 import { CurvePlot } from './curve-plot';
 import { ExportButtons } from './export-buttons';
@@ -69,6 +70,7 @@ export function CurvesWide({ curves }: { readonly curves: Curves }) {
           <View style={[styles.inputs, { width: inputs }]}>
             <SystemInputs {...curves} />
             <LayerBoxes {...curves} />
+            <CompareInputs {...curves} />
           </View>
           <View style={[styles.plot, readOutAside && styles.plotStays]}>
             <CurveNotices curves={curves} atFields />

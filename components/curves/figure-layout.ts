@@ -29,7 +29,7 @@ type Heights = Readonly<Record<Panel, number>>;
 /** Room above a panel for its head and, over the fractions, for names. */
 const heads: Readonly<Record<'wide' | 'compact', Heights>> = {
   wide: { fractions: 42, predominance: 0, charge: 32, capacity: 32, 'lg-c': 34 },
-  compact: { fractions: 26, predominance: 0, charge: 24, capacity: 28, 'lg-c': 24 },
+  compact: { fractions: 26, predominance: 0, charge: 24, capacity: 40, 'lg-c': 40 },
 };
 /** Room below all for the axis, and beside the panels. */
 const edges = {

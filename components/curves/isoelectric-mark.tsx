@@ -1,6 +1,6 @@
 import { Line, TSpan } from 'react-native-svg';
 import { FigureText } from '../chart/figure-text';
-import { bottom, right } from '../chart/geometry';
+import { bottom } from '../chart/geometry';
 import { Marker } from '../chart/marker';
 import { numeralsWidth } from '../chart/text-width';
 import { fonts, useTheme } from '../ui/theme';
@@ -27,7 +27,8 @@ export function IsoelectricMark({ pH, drawn, layout, x }: IsoelectricMarkProps) 
   if (!panel) return null;
   const text = shownPH(pH);
   const y = charge ? chargeScale(endCharges(drawn), charge)(0) : bottom(panel);
-  const fits = x + gap + numeralsWidth(`pI ${text}`, size) <= right(panel);
+  // Under the zero line at the left: the mean charge falls from above left to below right.
+  const fits = x - gap - numeralsWidth(`pI ${text}`, size) >= panel.x;
   return (
     <>
       <Line
@@ -41,9 +42,9 @@ export function IsoelectricMark({ pH, drawn, layout, x }: IsoelectricMarkProps) 
       />
       {charge && <Marker shape="diamond" x={x} y={y} colour={colours.clay} ring={colours.page} />}
       <FigureText
-        x={fits ? x + gap : x - gap}
-        y={y - 7}
-        anchor={fits ? 'start' : 'end'}
+        x={fits ? x - gap : x + gap}
+        y={charge ? y + size + 3 : y - 7}
+        anchor={fits ? 'end' : 'start'}
         size={size}
         weight="600"
         fill={colours.ink}

@@ -1,5 +1,5 @@
 import { useMemo } from 'react';
-import { Path } from 'react-native-svg';
+import { Path, TSpan } from 'react-native-svg';
 import { clipCurve } from '../chart/clip-curve';
 import { CurveNames, nameHeight, nameSize } from '../chart/curve-names';
 import { FormulaText } from '../chart/formula-text';
@@ -13,11 +13,12 @@ import { linearScale } from '../chart/scale';
 import { SeriesLine } from '../chart/series-line';
 import { concentrationSign } from '../chart/symbols';
 import { formulaWidth } from '../chart/text-width';
-import { useTheme } from '../ui/theme';
+import { fonts, useTheme } from '../ui/theme';
 import type { Capacity } from './capacity';
 import { hydrogenAt, hydroxideAt } from './capacity';
 import type { DrawnCurve } from './drawn-curve';
 import { lgConcentration, lgRange } from './lg-c';
+import { totalInWords } from './total-in-words';
 
 export const lgScale = (rect: Rect) => linearScale(lgRange, [bottom(rect), rect.y]);
 
@@ -94,17 +95,15 @@ export function LgCLines(props: LgCLinesProps) {
         rect={rect}
         y={y}
         inside={compact}
-        {...(compact
-          ? {}
-          : {
-              head: (
-                <>
-                  {'lg '}
-                  {concentrationSign}
-                  {' of each form and of the ions of water, in mol/L'}
-                </>
-              ),
-            })}
+        head={
+          <>
+            {'lg '}
+            {concentrationSign}
+            {compact ? ' in mol/L, at ' : ' of each form and of the ions of water, in mol/L, at '}
+            <TSpan fontFamily={fonts.numbers}>{totalInWords(total)}</TSpan>
+            {' mmol/L in all'}
+          </>
+        }
         lines={gridLines.map((value) => ({
           value,
           label: value % every === 0 ? String(value).replace('-', '\u2212') : '',

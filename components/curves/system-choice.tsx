@@ -11,10 +11,16 @@ export function SystemChoice({ state: { choice }, title, curve, choose, typeOwn 
       say({ text: 'Your own constants are put away', undo: () => choose(choice) });
     }
   };
+  // Its name comes with its first curve; where that is refused, its id is all there is.
+  const stored = curve.isOfChoice
+    ? title
+    : curve.error && choice.kind === 'stored'
+      ? choice.id
+      : '';
   return (
     <SystemCombobox
       label="System"
-      value={choice.kind === 'typed' ? 'Your own constants' : curve.isCurrent ? title : ''}
+      value={choice.kind === 'typed' ? 'Your own constants' : stored}
       onPick={pick}
       onTypeOwn={typeOwn}
     />

@@ -1,7 +1,6 @@
 import { StyleSheet, View } from 'react-native';
 import { ConstantsEditor } from '../constants/constants-editor';
 import { space } from '../ui/theme';
-import { CompareInputs } from './compare-inputs';
 import { ConditionFields } from './condition-fields';
 import { ConstantsList } from './constants-list';
 import { CurveWarnings } from './curve-warnings';
@@ -10,11 +9,11 @@ import { MovedConstants } from './moved-constants';
 import { SystemChoice } from './system-choice';
 import type { Curves } from './use-curves';
 
-/** The system, chosen or typed, with its constants; its conditions; what it is compared with. */
+/** The system, chosen or typed, with its constants, and its conditions. */
 export function SystemInputs(curves: Curves) {
   const { state, drawn, curve, editing, typeOwn, setConditions } = curves;
   const { choice, conditions } = state;
-  const isDrawn = drawn !== undefined && curve.isCurrent;
+  const isDrawn = drawn !== undefined && curve.isOfChoice;
   return (
     <View style={styles.inputs}>
       <SystemChoice {...curves} />
@@ -28,7 +27,6 @@ export function SystemInputs(curves: Curves) {
         isDrawn && <ConstantsList id={choice.id} drawn={drawn} onTypeOwn={typeOwn} />
       )}
       <ConditionFields conditions={conditions} onChange={setConditions} error={curve.error} />
-      <CompareInputs {...curves} />
     </View>
   );
 }

@@ -1,4 +1,4 @@
-import { useId, useRef, useState } from 'react';
+import { useId, useRef, useState, type ReactNode } from 'react';
 import { StyleSheet, Text, View, type DimensionValue } from 'react-native';
 import { choiceMove, typedOption, type ChoiceState } from './choice-keys';
 import { ChoiceList, type Option } from './choice-list';
@@ -13,7 +13,7 @@ interface ChoiceProps<Value extends string> {
   readonly options: readonly Option<Value>[];
   readonly value: Value;
   readonly onChange: (value: Value) => void;
-  readonly help?: string;
+  readonly help?: ReactNode;
   /** What is wrong with the choice; takes the place of the help. */
   readonly error?: string;
   readonly hideLabel?: boolean;
@@ -88,7 +88,7 @@ export function Choice<Value extends string>({
         tabIndex={0}
         aria-label={hideLabel ? label : undefined}
         aria-labelledby={hideLabel ? undefined : `${id}-label`}
-        aria-describedby={(error ?? help) ? `${id}-message` : undefined}
+        aria-describedby={(error ?? help) !== undefined ? `${id}-message` : undefined}
         aria-invalid={error !== undefined || undefined}
         aria-haspopup="listbox"
         aria-expanded={state.open}

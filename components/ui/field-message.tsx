@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { Icon } from './icon';
 import { space } from './theme';
@@ -5,7 +6,7 @@ import { Words } from './words';
 
 interface FieldMessageProps {
   readonly id: string;
-  readonly help?: string | undefined;
+  readonly help?: ReactNode;
   readonly error?: string | undefined;
 }
 
