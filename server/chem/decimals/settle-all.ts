@@ -31,6 +31,8 @@ export const afterPoint = (places: number): Form => ({
 export interface Found {
   readonly value: Decimal;
   readonly form: Form;
+  /** As it was given, without error: it may well be a tie, and needs no more digits then. */
+  readonly exact?: boolean;
 }
 
 interface Finding {
@@ -49,9 +51,9 @@ const mostDoublings = 3;
 const tieDigits = 40;
 
 /** Whether everything within 10^−`sure` of a unit in the first digit rounds to the same. */
-function decided({ value, form }: Found, sure: number): boolean {
+function decided({ value, form, exact }: Found, sure: number): boolean {
   const kept = form.kept(value);
-  if (value.isZero() || roundsOneWay(value, kept)) return true;
+  if (exact || value.isZero() || roundsOneWay(value, kept)) return true;
   return tieNear(value, kept)
     .minus(value)
     .abs()
@@ -70,7 +72,7 @@ export function settleAll({ digits, loss, at }: Finding): string[] {
     decided(one, planned - loss) ? one.form.write(one.value) : undefined,
   );
   for (let doubling = 1; written.includes(undefined); doubling++) {
-    const precision = Math.max(planned * 2 ** doubling, planned + 2 * tieDigits);
+    const precision = planned * 2 ** doubling;
     found = at(precision);
     found.forEach((one, i) => {
       if (written[i] !== undefined) return;

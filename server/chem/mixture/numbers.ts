@@ -49,16 +49,16 @@ const lostNearZero = ({ lnU, molalities: [hydrogen = 1] }: DoubleSolution) =>
     ),
   );
 
-/** All values of a solved balance in a fixed order. */
-function valuesOf(problem: Balance, { balance, u, at, state }: SolvedBalance): Decimal[] {
+/** All values of a solved balance in a fixed order; amounts and strengths as given are exact. */
+function valuesOf(problem: Balance, { balance, u, at, state }: SolvedBalance) {
   const { context, arithmetic } = balance;
   const molalities = balance.molalities(u, at);
   const [hydrogen, hydroxide] = [nth(molalities, 0), nth(molalities, 1)];
   const composition = ionicStrength(arithmetic, ionsOf(problem), molalities);
-  const given = problem.activity.ionicStrength;
+  const asked = problem.activity.ionicStrength;
   const used =
-    given !== 'self-consistent'
-      ? new context(given)
+    asked !== 'self-consistent'
+      ? new context(asked)
       : state.length === 1
         ? nth(state, 0)
         : composition;
@@ -76,21 +76,30 @@ function valuesOf(problem: Balance, { balance, u, at, state }: SolvedBalance): D
       hydrogen.plus(hydroxide),
     )
     .times(new context(10).ln());
+  const given = (value: Decimal) => ({ value, exact: true });
+  const solved = (value: Decimal) => ({ value, exact: false });
   return [
-    u.log(10),
-    hydrogen.log(10).negated(),
-    hydrogen,
-    hydroxide,
-    nth(at.gamma, 0),
-    nth(at.gamma, 1),
-    used,
-    composition,
-    capacity,
-    ...acids.flatMap(({ fractions, gammas, total }) => [
-      total,
-      ...fractions.flatMap((one, j) => [one.times(total), one, nth(gammas, j)]),
+    solved(u.log(10)),
+    solved(hydrogen.log(10).negated()),
+    solved(hydrogen),
+    solved(hydroxide),
+    solved(nth(at.gamma, 0)),
+    solved(nth(at.gamma, 1)),
+    { value: used, exact: asked !== 'self-consistent' },
+    solved(composition),
+    solved(capacity),
+    ...acids.flatMap(({ acid, fractions, gammas, total }) => [
+      { value: total, exact: !acid.held },
+      ...fractions.flatMap((one, j) => [
+        solved(one.times(total)),
+        solved(one),
+        solved(nth(gammas, j)),
+      ]),
     ]),
-    ...problem.inert.flatMap((_, i) => [nth(molalities, first + i), nth(at.gamma, first + i)]),
+    ...problem.inert.flatMap((_, i) => [
+      given(nth(molalities, first + i)),
+      solved(nth(at.gamma, first + i)),
+    ]),
   ];
 }
 
@@ -130,7 +139,7 @@ export function numbersOf(problem: Balance, root: Root, digits: number): Balance
   let last: SolvedBalance | undefined;
   const at = (precision: number): Found[] => {
     last = root.solvedTo(precision);
-    return valuesOf(problem, last).map((value) => ({ value, form: significant(digits) }));
+    return valuesOf(problem, last).map((one) => ({ ...one, form: significant(digits) }));
   };
   const written = settleAll({ digits, loss, at });
   return {
