@@ -1,7 +1,9 @@
 import { z } from 'zod';
-import { limits } from './limits';
+import { limits, pointsWorth } from './limits';
 
-const costFormula = 'cost = sum over systems of points × (protons + 1) × (digits + 20)';
+const costFormula =
+  'cost = sum over systems of points × (protons + 1) × (digits + 20); ' +
+  `a mixture counts as ${pointsWorth.mixture} points, with 4 species for the water, maxima of a buffer capacity as ${pointsWorth.capacityMaxima} more, an isoelectric point or a pH for a fraction as ${pointsWorth.root} (with the isoionic point as a mixture)`;
 const unitFormula = `computeUnits = ceil(cost / ${limits.costOfOneUnit})`;
 
 const count = (description: string, example: number) => z.int().meta({ description, example });

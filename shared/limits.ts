@@ -32,5 +32,12 @@ export const limits = {
 export const costOf = (points: number, species: number, digits: number) =>
   points * species * (digits + 20);
 
+/**
+ * Points that a question without points is worth: how often a mixture is evaluated until all its
+ * digits are there, its change with temperature included; the search for maxima of a capacity; a
+ * root of a system alone.
+ */
+export const pointsWorth = { mixture: 150, capacityMaxima: 100, root: 20 } as const;
+
 /** Compute units of a cost: one for each 10,000 begun. */
 export const computeUnitsOf = (cost: number) => Math.ceil(cost / limits.costOfOneUnit);

@@ -121,6 +121,13 @@ const mixtureComponent = z
     weighedAs: weighedAs.nullable().meta({
       description: 'As what it was weighed in; null where a gas holds it.',
     }),
+    heldBy: z
+      .strictObject({
+        partialPressure: written('Partial pressure in the gas.', '40.53', 'Pa'),
+        henryConstant: written('Solubility, taken as exact.', '0.0340408', 'mol/(kg atm)'),
+      })
+      .nullable()
+      .meta({ id: 'HeldByUsed', description: 'What holds it; null where it was weighed in.' }),
     total: amount('Sum of its species.', '0.05'),
     species: z.array(mixtureSpecies).meta({ description: 'Its n + 1 species.' }),
   })

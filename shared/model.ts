@@ -18,7 +18,7 @@ const warningCodes = [
   'ion-size-assumed',
   'several-ionic-strengths',
   'ionic-strength-differs',
-  'charge-balanced-by-inert-ions',
+  'parameters-of-another-temperature',
 ] as const;
 
 /** Something a caller should know about an answer that was nevertheless computed. */

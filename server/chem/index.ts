@@ -1,6 +1,8 @@
 /** The model's version, raised whenever a digit of an answer changes. */
 export const engineVersion = '1';
 
+export { decimals } from './decimals/arithmetic';
+export { significant } from './decimals/settle-all';
 export { type AcidBaseSystem, effectivePKa, invertedNeighbours, speciesOf } from './forms/system';
 export { effectiveSystem, type SystemInMedium } from './forms/effective-system';
 export type { PHPoints } from './forms/ph-points';
@@ -20,6 +22,7 @@ export type { ActivityChoice, SizedIon } from './activity/coefficients';
 export { sizeAssumed } from './activity/coefficients';
 export { sizeOf } from './activity/ion-sizes';
 export { canonicalIon } from './activity/ion-names';
+export { shownAs } from './activity/ion';
 export { specificInteractionAmong } from './activity/specific-interaction';
 export { pitzerAmong } from './activity/pitzer';
 

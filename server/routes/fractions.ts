@@ -7,34 +7,12 @@ import {
   publicFractionsRequest,
 } from '../../shared/fractions';
 import { limits } from '../../shared/limits';
-import { operation, type Reply } from '../http/operation';
-import { fractionsExample } from './fractions-examples';
-
-const json = 'application/json';
-const csv = 'text/csv';
-
-/** Media types of an answer about fractions. */
-export const fractionsForms = [json, csv];
+import { operation } from '../http/operation';
+import { computeReply, computeTerms, curveForms, exampleOf } from './compute';
 
 const answers = z.union([fractionsAnswer, manyFractionsAnswer, dryRunAnswer]);
 
-interface Asked {
-  readonly accepted: string;
-  readonly signal: AbortSignal;
-}
-
-/** Where a call stands: who asks, how much it may cost, in which form the answer goes. */
-export const fractionsTerms = (
-  reader: string | undefined,
-  mostCost: number,
-  { accepted, signal }: Asked,
-) => ({ reader, mostCost, asCsv: accepted === csv, signal });
-
-/** A finished body in the form agreed upon; a dry run is JSON always. */
-export const fractionsReply = (body: Uint8Array, accepted: string, dryRun = false): Reply => ({
-  type: accepted === csv && !dryRun ? `${csv}; charset=utf-8; header=present` : json,
-  body,
-});
+const example = exampleOf('fractions', fractionsRequest);
 
 const phosphoric = {
   name: 'phosphoric acid',
@@ -52,32 +30,39 @@ export const fractions = operation({
     'Fractions, neighbour ratios, mean charge and predominance of one system, or of up to 100, ' +
     'at one pH, a list, or a grid. Every digit is right: the exact value for the constants as ' +
     'given, rounded half to even. A system is given in full, or by the id of a stored one, whose ' +
-    'constants are then in `model`. `Accept: text/csv` gives a line a system and pH, numbers ' +
+    'constants are then in `model`. `conditions` move thermodynamic constants to a temperature and an ' +
+    'ionic strength (`effectivePKa`). `Accept: text/csv` gives a line a system and pH, numbers ' +
     'alone: ask for JSON, or a dry run, for the constants, their sources and the warnings.',
   tag: 'Compute',
   access: { scope: 'compute' },
   callsPerMinute: limits.keyedCallsPerMinute,
   body: fractionsRequest,
   answer: answers,
-  produces: fractionsForms,
-  refuses: ['over-limit'],
+  produces: curveForms,
+  refuses: ['no-answer', 'over-limit'],
   examples: {
-    phosphoricAcid: fractionsExample('Phosphoric acid at pH 7.4', {
+    phosphoricAcid: example('Phosphoric acid at pH 7.4', {
       system: phosphoric,
       pH: '7.4',
       digits: 10,
     }),
-    twoSystems: fractionsExample('Two systems at two pH', {
+    twoSystems: example('Two systems at two pH', {
       systems: [phosphoric, tris],
       pH: ['7.0', '7.4'],
       digits: 6,
     }),
-    byId: fractionsExample('A stored system by its id', {
+    byId: example('A stored system by its id', {
       system: { id: 'carbonic-acid' },
       pH: '8.1',
       digits: 6,
     }),
-    dryRun: fractionsExample('What a curve would cost', {
+    conditions: example('At 37 °C and I = 0.15 mol/L by Davies', {
+      system: { id: 'phosphoric-acid' },
+      pH: '7.4',
+      conditions: { temperature: '37 °C', ionicStrength: '0.15', activityModel: 'davies' },
+      digits: 8,
+    }),
+    dryRun: example('What a curve would cost', {
       system: phosphoric,
       pH: { from: '0', to: '14', step: '0.01' },
       digits: 34,
@@ -85,9 +70,9 @@ export const fractions = operation({
     }),
   },
   handle: async ({ body, caller, services, ...asked }) => {
-    const terms = fractionsTerms(caller.organizationId, limits.cost, asked);
-    const answer = await services.fractions.answer(body, terms);
-    return fractionsReply(answer, asked.accepted, body.dryRun);
+    const terms = computeTerms(caller.organizationId, limits.cost, asked);
+    const answer = await services.compute.answer('fractions', body, terms);
+    return computeReply(answer, asked.accepted, body.dryRun);
   },
 });
 
@@ -104,18 +89,18 @@ export const publicFractions = operation({
   callsPerMinute: limits.publicCallsPerMinute,
   body: publicFractionsRequest,
   answer: fractionsAnswer,
-  produces: fractionsForms,
-  refuses: ['over-limit'],
+  produces: curveForms,
+  refuses: ['no-answer', 'over-limit'],
   examples: {
-    phosphoricAcid: fractionsExample('Phosphoric acid at pH 7.4', {
+    phosphoricAcid: example('Phosphoric acid at pH 7.4', {
       system: phosphoric,
       pH: '7.4',
       digits: 10,
     }),
   },
   handle: async ({ body, services, ...asked }) => {
-    const terms = fractionsTerms(undefined, limits.publicCost, asked);
-    const answer = await services.fractions.answer({ ...body, dryRun: false }, terms);
-    return fractionsReply(answer, asked.accepted);
+    const terms = computeTerms(undefined, limits.publicCost, asked);
+    const answer = await services.compute.answer('fractions', { ...body, dryRun: false }, terms);
+    return computeReply(answer, asked.accepted);
   },
 });

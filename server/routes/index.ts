@@ -1,8 +1,12 @@
 import type { Operation } from '../http/operation';
+import { bufferCapacity, publicBufferCapacity } from './buffer-capacity';
 import { fractions, publicFractions } from './fractions';
 import { livez, readyz } from './health';
+import { isoelectricPoint, publicIsoelectricPoint } from './isoelectric-point';
 import { issueKey, listKeys, readKey, revokeKey } from './keys';
 import { limits } from './limits';
+import { mixtures, publicMixtures } from './mixtures';
+import { pHForFraction } from './ph-for-fraction';
 import { account, chooseOrganization, refreshSession, signIn, signOut } from './sessions';
 import {
   listPublicSystems,
@@ -17,6 +21,13 @@ export const operations: readonly Operation[] = [
   fractions,
   publicFractions,
   systemFractions,
+  pHForFraction,
+  bufferCapacity,
+  publicBufferCapacity,
+  isoelectricPoint,
+  publicIsoelectricPoint,
+  mixtures,
+  publicMixtures,
   listSystems,
   readSystem,
   listPublicSystems,

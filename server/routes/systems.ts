@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { fractionsAnswer, fractionsQuery } from '../../shared/fractions';
+import { fractionsAnswer, fractionsQuery, fractionsRequest } from '../../shared/fractions';
 import { limits } from '../../shared/limits';
 import {
   storedSystem,
@@ -14,8 +14,7 @@ import type { Services } from '../services';
 import { place, type Reader } from '../services/systems/search-systems';
 import { summaryOf } from '../services/systems/stored-system';
 import { exampleSystem } from './example-systems';
-import { fractionsForms, fractionsReply, fractionsTerms } from './fractions';
-import { oneLineExample } from './fractions-examples';
+import { computeReply, computeTerms, curveForms, exampleOf } from './compute';
 
 const json = 'application/json';
 
@@ -109,6 +108,12 @@ export const readSystem = operation({
   handle: ({ params: { id }, caller, services }) => read(id, caller.organizationId, services),
 });
 
+const tris = exampleOf('fractions', fractionsRequest)('Tris', {
+  system: { id: 'tris' },
+  pH: '7.4',
+  digits: 10,
+});
+
 export const systemFractions = operation({
   method: 'get',
   path: '/v1/systems/{id}/fractions',
@@ -121,15 +126,20 @@ export const systemFractions = operation({
   params,
   query: fractionsQuery,
   answer: fractionsAnswer,
-  produces: fractionsForms,
-  refuses: ['not-found', 'over-limit'],
+  produces: curveForms,
+  refuses: ['not-found', 'no-answer', 'over-limit'],
   examples: {
-    tris: oneLineExample('Tris at pH 7.4', 'tris', { pH: '7.4', digits: '10' }),
+    tris: {
+      summary: 'Tris at pH 7.4',
+      params: { id: 'tris' },
+      query: { pH: '7.4', digits: '10' },
+      answer: tris.answer,
+    },
   },
   handle: async ({ params: { id }, query, caller, services, ...asked }) => {
-    const terms = fractionsTerms(caller.organizationId, limits.cost, asked);
-    const answer = await services.fractions.answerAbout(id, query, terms);
-    return fractionsReply(answer, asked.accepted);
+    const terms = computeTerms(caller.organizationId, limits.cost, asked);
+    const answer = await services.compute.answerAbout(id, query, terms);
+    return computeReply(answer, asked.accepted);
   },
 });
 

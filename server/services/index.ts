@@ -2,7 +2,7 @@ import { availableParallelism } from 'node:os';
 import type { DataSource } from 'typeorm';
 import type { Config } from '../config';
 import { ComputePool } from './compute/compute-pool';
-import { FractionsService } from './fractions/fractions-service';
+import { ComputeService } from './compute/compute-service';
 import { KeyConsole } from './keys/key-console';
 import { KeyDigests } from './keys/key-digest';
 import { KeyGuard } from './keys/key-guard';
@@ -15,7 +15,7 @@ import { SystemService } from './systems/system-service';
 export interface Services {
   /** Lets go of the worker threads. */
   readonly close: () => Promise<void>;
-  readonly fractions: FractionsService;
+  readonly compute: ComputeService;
   readonly keys: KeyGuard;
   readonly keyConsole: KeyConsole;
   readonly sessions: SessionService;
@@ -30,13 +30,13 @@ export function createServices(database: DataSource, config: Settings, issuer: s
   const digests = new KeyDigests(config.keyPeppers);
   const threads = config.computeThreads ?? availableParallelism();
   // Apart, so that no crowd on the public page keeps a key waiting.
-  const compute = { keyed: new ComputePool(threads), public: new ComputePool(1) };
+  const pools = { keyed: new ComputePool(threads), public: new ComputePool(1) };
   const systems = new SystemService(database);
   return {
     close: async () => {
-      await Promise.all([compute.keyed.close(), compute.public.close()]);
+      await Promise.all([pools.keyed.close(), pools.public.close()]);
     },
-    fractions: new FractionsService(systems, compute),
+    compute: new ComputeService(systems, pools),
     keys: new KeyGuard(database, digests),
     keyConsole: new KeyConsole(database, digests),
     sessions: new SessionService({

@@ -14,6 +14,8 @@ export interface Equilibrium {
   /** In doubles, to be compared with the range of a model before digits are made. */
   readonly ionicStrength: number;
   readonly pH: number;
+  /** In doubles, in the order of `ionsOf`. */
+  readonly molalities: readonly number[];
   readonly inDigits: (digits: number) => EquilibriumDigits;
 }
 
@@ -47,6 +49,7 @@ export function equilibrium(
     ionicStrength:
       root.near.molalities.reduce((sum, one, i) => sum + one * (charges[i] ?? 0) ** 2, 0) / 2,
     pH: root.near.lnU / Math.LN10,
+    molalities: root.near.molalities,
     inDigits: (digits) => {
       try {
         return {

@@ -1,7 +1,8 @@
 import path from 'node:path';
 import { Piscina } from 'piscina';
 import { Queue } from './queue';
-import type { TaskName, TaskRequest } from './tasks';
+import { Refusal } from '../../refusal';
+import type { Work, Worked } from './worker';
 
 // The worker stands beside this file, compiled or not as this file is.
 const extension = path.extname(__filename);
@@ -30,13 +31,12 @@ export class ComputePool {
     });
   }
 
-  /** The finished body of an answer. Refused with `unavailable` when too much work waits. */
-  run<Name extends TaskName>(
-    name: Name,
-    request: TaskRequest<Name>,
-    { cost, signal }: Load,
-  ): Promise<Uint8Array> {
-    return this.queue.run(cost, signal, () => this.pool.run({ name, request }));
+  /** The finished body of an answer. Refused as the question is, or with `unavailable`. */
+  async run(work: Work, { cost, signal }: Load): Promise<Uint8Array> {
+    const worked = (await this.queue.run(cost, signal, () => this.pool.run(work))) as Worked;
+    if (!('refusal' in worked)) return worked;
+    const { code, detail, errors } = worked.refusal;
+    throw new Refusal(code, detail, errors);
   }
 
   async close(): Promise<void> {

@@ -6,46 +6,50 @@ import type {
   SystemFractions,
 } from '../../../shared/fractions';
 import type { Species } from '../../../shared/species';
-import { effectivePKa, fractionPoints, predominanceRanges, speciesOf } from '../../chem';
-import { fractionsCost, systemsOf } from './cost';
-import { modelOf } from './model';
-import { pointsOf } from './points';
-import type { ResolvedRequest, ResolvedSystem } from './resolve';
-import { warningsOf } from './warnings';
+import {
+  type AcidBaseSystem,
+  effectivePKa,
+  fractionPoints,
+  predominanceRanges,
+  speciesOf,
+} from '../../chem';
+import type { SystemUsed } from '../chemistry/system-used';
+import { fractionsCost } from './cost';
+import { pointsOf } from '../chemistry/points';
+import type { ResolvedRequest } from './resolve';
+import { settled } from './systems-used';
 
 type Answer = FractionsAnswer | ManyFractionsAnswer | DryRunAnswer;
 
-const named = ({ name }: ResolvedSystem) => (name === undefined ? {} : { name });
-
-/** The forms, with their formulas where the system is a stored one. */
-const formsOf = (system: ResolvedSystem): Species[] =>
+/** The forms, with their formulas where these are known. */
+const formsOf = ({ system }: SystemUsed): Species[] =>
   speciesOf(system).map((form) =>
-    system.stored ? { ...form, formula: system.stored.formulas[form.index] ?? null } : form,
+    system.formulas ? { ...form, formula: system.formulas[form.index] ?? null } : form,
   );
 
-function ofOneSystem(system: ResolvedSystem, request: ResolvedRequest): SystemFractions {
+function ofOneSystem(
+  used: SystemUsed & { readonly effective: AcidBaseSystem },
+  request: ResolvedRequest,
+): SystemFractions {
   const { digits } = request;
+  const { system, effective } = used;
   return {
-    ...named(system),
-    species: formsOf(system),
-    effectivePKa: effectivePKa(system, digits),
-    points: fractionPoints(system, pointsOf(request.pH), digits),
-    predominance: predominanceRanges(system, digits),
+    ...(system.name === undefined ? {} : { name: system.name }),
+    species: formsOf(used),
+    effectivePKa: effectivePKa(effective, digits),
+    points: fractionPoints(effective, pointsOf(request.pH), digits),
+    predominance: predominanceRanges(effective, digits),
   };
 }
 
 /** Species fractions of one system or several, or what they would cost. */
 export function answerFractions(request: ResolvedRequest): Answer {
+  const { systems, model } = settled(request);
   if (request.dryRun) {
     const cost = fractionsCost(request);
-    return {
-      dryRun: true,
-      cost,
-      computeUnits: computeUnitsOf(cost),
-      warnings: warningsOf(request),
-    };
+    return { dryRun: true, cost, computeUnits: computeUnitsOf(cost), warnings: model.warnings };
   }
-  const model = modelOf(request);
-  if (request.system !== undefined) return { ...ofOneSystem(request.system, request), model };
-  return { items: systemsOf(request).map((system) => ofOneSystem(system, request)), model };
+  const items = systems.map((used) => ofOneSystem(used, request));
+  const [only] = items;
+  return request.system !== undefined && only ? { ...only, model } : { items, model };
 }

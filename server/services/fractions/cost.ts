@@ -1,6 +1,7 @@
 import { costOf } from '../../../shared/limits';
 import { pointCount } from '../../../shared/ph';
-import type { ResolvedRequest, ResolvedSystem } from './resolve';
+import type { ResolvedSystem } from '../chemistry/resolved-system';
+import type { ResolvedRequest } from './resolve';
 
 /** The systems of a request, one or many. */
 export const systemsOf = (request: ResolvedRequest): readonly ResolvedSystem[] =>

@@ -1,7 +1,7 @@
 import { fractionPoints, type FractionPoint } from '../../chem';
-import { systemsOf } from './cost';
-import { pointsOf } from './points';
+import { pointsOf } from '../chemistry/points';
 import type { ResolvedRequest } from './resolve';
+import { settled } from './systems-used';
 
 const columns = (prefix: string, count: number) =>
   Array.from({ length: count }, (_, index) => `${prefix}_${index}`);
@@ -16,7 +16,7 @@ const filled = (values: readonly string[], count: number) => [
  * the largest one; smaller ones leave the rest empty.
  */
 export function fractionsCsv(request: ResolvedRequest): string {
-  const systems = systemsOf(request);
+  const systems = settled(request).systems.map(({ effective }) => effective);
   const most = Math.max(...systems.map(({ pKa }) => pKa.length));
   const head = [
     'system',
