@@ -65,6 +65,14 @@ function ionsOf(parts: readonly { spectators: Spectators | undefined; share: Dec
 
 const whole = new Wide(1);
 
+/** The numbers of an answer: of a mixture with a model pH and I, of a titration every pH. */
+const numbersOf = ({ answer }: Row): string[] =>
+  answer === null
+    ? []
+    : typeof answer === 'object' && 'pH' in answer
+      ? [answer.pH, answer.I].map(number)
+      : [answer].flat().map(number);
+
 test('the rows are those that this file compares', () => {
   const kinds = [...new Set(rows.map(({ kind }) => kind))];
   expect(kinds.map((kind) => [kind, rowsOf(kind).length])).toEqual([
@@ -77,20 +85,17 @@ test('the rows are those that this file compares', () => {
 });
 
 describe('forty digits computed elsewhere', () => {
-  test.each(rowsOf('equilibrium_pH_ideal'))(
-    'pH of an ideal mixture: %s',
-    (_, { inputs, answer }) => {
-      const { systems, spectators, pKw = '' } = inputs;
-      const ions = ionsOf([{ spectators, share: whole }]);
-      const { pH } = solved({ acids: acidsOf(systems), ions, pKw }, 40);
-      expect(number(pH)).toBe(number(String(answer)));
-    },
-  );
+  test.each(rowsOf('equilibrium_pH_ideal'))('pH of an ideal mixture: %s', (_, row) => {
+    const { systems, spectators, pKw = '' } = row.inputs;
+    const ions = ionsOf([{ spectators, share: whole }]);
+    const { pH } = solved({ acids: acidsOf(systems), ions, pKw }, 40);
+    expect([number(pH)]).toEqual(numbersOf(row));
+  });
 
   test.each(rowsOf('equilibrium_pH_davies'))(
     'pH and ionic strength by Davies’s equation: %s',
-    (_, { inputs, answer }) => {
-      const { systems, spectators, pKw = '', A = '', b = '' } = inputs;
+    (_, row) => {
+      const { systems, spectators, pKw = '', A = '', b = '' } = row.inputs;
       const { pH, ionicStrengthUsed } = solved(
         {
           acids: acidsOf(systems),
@@ -102,16 +107,12 @@ describe('forty digits computed elsewhere', () => {
         },
         40,
       );
-      if (answer === null || typeof answer === 'string' || Array.isArray(answer)) {
-        throw new Error('The row has no pair of answers.');
-      }
-      expect(number(pH)).toBe(number(answer.pH));
-      expect(number(ionicStrengthUsed)).toBe(number(answer.I));
+      expect([pH, ionicStrengthUsed].map(number)).toEqual(numbersOf(row));
     },
   );
 
-  test.each(rowsOf('buffer_capacity_ideal'))('buffer capacity: %s', (_, { inputs, answer }) => {
-    const { systems = [], pH = '', pKw = '' } = inputs;
+  test.each(rowsOf('buffer_capacity_ideal'))('buffer capacity: %s', (_, row) => {
+    const { systems = [], pH = '', pKw = '' } = row.inputs;
     const solution = {
       components: systems.map(({ pKa, z0, C }) => ({
         system: { fullyProtonatedCharge: z0, pKa },
@@ -120,42 +121,42 @@ describe('forty digits computed elsewhere', () => {
       water: waterExponents(pKw, balanceOf({}).activity),
     };
     const [point] = bufferCapacityPoints(solution, { kind: 'list', values: [pH] }, 40);
-    expect(number(point?.total ?? 'NaN')).toBe(number(String(answer)));
+    expect([number(point?.total ?? 'NaN')]).toEqual(numbersOf(row));
   });
 
-  test.each(rowsOf('isoelectric_point'))('isoelectric point: %s', (_, { inputs, answer }) => {
-    const { pKa = [], z0 = NaN } = inputs;
+  test.each(rowsOf('isoelectric_point'))('isoelectric point: %s', (_, row) => {
+    const { pKa = [], z0 = NaN } = row.inputs;
     const found = isoelectricPoint({ fullyProtonatedCharge: z0, pKa }, 40);
-    if (answer === null) {
+    if (row.answer === null) {
       expect(found).toEqual({ ok: false, reason: 'charge-stays-positive' });
     } else {
-      expect(number(found.ok ? found.pH : found.reason)).toBe(number(String(answer)));
+      expect([found.ok ? number(found.pH) : found.reason]).toEqual(numbersOf(row));
     }
   });
 
   test.each(rowsOf('titration_ideal'))(
     'a titration, as the mixture of every point: %s',
-    (_, { inputs, answer }) => {
-      const { V0 = '', titrant_volumes: volumes = [], pKw = '' } = inputs;
+    (_, row) => {
+      const { V0 = '', titrant_volumes: volumes = [], pKw = '' } = row.inputs;
       const points = volumes.map((volume) => {
         const sum = new Wide(V0).plus(volume);
         const [sample, titrant] = [V0, volume].map((part) => new Wide(part).dividedBy(sum));
         return solved(
           {
             acids: [
-              ...acidsOf(inputs.systems, sample),
-              ...acidsOf(inputs.titrant_systems, titrant),
+              ...acidsOf(row.inputs.systems, sample),
+              ...acidsOf(row.inputs.titrant_systems, titrant),
             ],
             ions: ionsOf([
-              { spectators: inputs.spectators, share: sample ?? whole },
-              { spectators: inputs.titrant_spectators, share: titrant ?? whole },
+              { spectators: row.inputs.spectators, share: sample ?? whole },
+              { spectators: row.inputs.titrant_spectators, share: titrant ?? whole },
             ]),
             pKw,
           },
           40,
         ).pH;
       });
-      expect(points.map(number)).toEqual([answer].flat().map((each) => number(String(each))));
+      expect(points.map(number)).toEqual(numbersOf(row));
     },
   );
 });
