@@ -1,10 +1,8 @@
+import { csvOf } from '../chart/export/csv';
 import { conditionsOf } from './conditions-of';
 import type { Layer } from './curves-state';
 import type { DrawnCurve } from './drawn-curve';
 import type { FigureExtras } from './figure-extras';
-
-/** A cell as RFC 4180 has it. */
-const cell = (text: string) => (/[",\r\n]/.test(text) ? `"${text.replaceAll('"', '""')}"` : text);
 
 /** The figure's curves: the first one, then those beside it. */
 interface CurvesInCsv {
@@ -43,5 +41,5 @@ export function curveCsv({ drawn, shown, extras }: CurvesInCsv): string {
       model,
     ]);
   });
-  return [head, ...rows].map((row) => `${row.map(cell).join(',')}\r\n`).join('');
+  return csvOf([head, ...rows]);
 }

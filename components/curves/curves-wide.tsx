@@ -5,6 +5,7 @@ import { Page } from '../shell/page';
 import { Button } from '../ui/button';
 import { Dialog } from '../ui/dialog';
 import { Formula } from '../ui/formula';
+import { FileButtons } from '../leaving/file-buttons';
 import { drawerHeights, RequestDrawer } from '../request/request-drawer';
 import { space, useTheme } from '../ui/theme';
 import { useLayout } from '../ui/use-layout';
@@ -13,7 +14,6 @@ import { Words } from '../ui/words';
 import { CompareInputs } from './compare-inputs';
 import { CurveNotices } from './curve-notices';
 import { CurvePlot } from './curve-plot';
-import { ExportButtons } from './export-buttons';
 import { LayerBoxes } from './layer-boxes';
 import { NumbersTable } from './numbers-table';
 import { SidePanel } from './side-panel';
@@ -21,7 +21,7 @@ import { SystemInputs } from './system-inputs';
 import { linkTo } from './use-address';
 import { useCopy } from '../ui/use-copy';
 import type { Curves } from './use-curves';
-import { useExports } from './use-exports';
+import { numbersHeld, useExports } from './use-exports';
 import { useScreenRequest } from './use-screen-request';
 
 const headHeight = 76;
@@ -99,7 +99,7 @@ export function CurvesWide({ curves }: { readonly curves: Curves }) {
         inputsWidth={inputs}
       />
       <Dialog title="Export" open={exporting} onClose={() => setExporting(false)}>
-        <ExportButtons {...exports} />
+        <FileButtons save={exports.save} numbers={numbersHeld} />
       </Dialog>
     </>
   );

@@ -1,12 +1,4 @@
-import { useRef } from 'react';
-import type { View } from 'react-native';
-import { embeddedFonts } from '../chart/export/embedded-fonts';
-import { pngOf } from '../chart/export/png';
-import { fileName, saveFile } from '../chart/export/save-file';
-import { standaloneSvg } from '../chart/export/standalone-svg';
-import { elementOf } from '../ui/element';
-import { fonts, useTheme } from '../ui/theme';
-import { useToast } from '../ui/toast';
+import { useFigureFiles } from '../chart/export/use-figure-files';
 import { basesOf, provenanceWords } from '../handbook/bases';
 import { conditionsText } from './conditions-of';
 import { curveCsv } from './curve-csv';
@@ -17,49 +9,26 @@ interface ExportOptions {
   readonly captioned: boolean;
 }
 
-/** The files that leave the screen, and the figure they are made from. */
-export function useExports(
+/** What the CSV holds, in words. */
+export const numbersHeld = 'Every point of the curve, as the API gave it.';
+
+/** The files that leave Curves, and the figure they are made from. */
+export const useExports = (
   { drawn, shown, extras, title }: Pick<Curves, 'drawn' | 'shown' | 'extras' | 'title'>,
   { captioned }: ExportOptions,
-) {
-  const figure = useRef<View>(null);
-  const { colours } = useTheme();
-  const say = useToast();
-
-  const svg = async () => {
-    const element = elementOf(figure.current)?.querySelector('svg');
-    if (!element || !drawn) return undefined;
-    const sources = basesOf(drawn.constants).map(
-      (basis) => `${basis.source}. ${provenanceWords(basis)}.`,
-    );
-    return standaloneSvg(element, {
-      title,
-      notes: [...(captioned ? [] : [conditionsText(drawn)]), ...sources],
-      ink: colours.ink,
-      inkSoft: colours.inkSoft,
-      page: colours.page,
-      face: fonts.words,
-      fonts: await embeddedFonts(),
-    });
-  };
-  const save = async (kind: 'csv' | 'svg' | 'png') => {
-    const content = async () => {
-      if (kind === 'csv') {
-        return drawn && new Blob([curveCsv({ drawn, shown, extras })], { type: 'text/csv' });
-      }
-      const drawing = await svg();
-      if (!drawing) return undefined;
-      if (kind === 'png') return pngOf(drawing);
-      return new Blob([drawing.markup], { type: 'image/svg+xml' });
-    };
-    try {
-      const blob = await content();
-      if (blob) saveFile(fileName(title, kind), blob);
-    } catch {
-      say({ text: `This browser could not make the ${kind.toUpperCase()} file.` });
-    }
-  };
-  return { figure, save };
-}
+) =>
+  useFigureFiles({
+    title,
+    notes: () =>
+      drawn
+        ? [
+            ...(captioned ? [] : [conditionsText(drawn)]),
+            ...basesOf(drawn.constants).map(
+              (basis) => `${basis.source}. ${provenanceWords(basis)}.`,
+            ),
+          ]
+        : [],
+    csv: () => drawn && curveCsv({ drawn, shown, extras }),
+  });
 
 export type Exports = ReturnType<typeof useExports>;

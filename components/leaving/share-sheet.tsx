@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { View } from 'react-native';
 import type { FigureSave } from '../chart/export/use-figure-files';
 import { requestCode, type WrittenRequest } from '../request/request-code';
@@ -20,11 +21,13 @@ interface ShareSheetProps {
   readonly request: WrittenRequest | undefined;
   /** What the call gives: `this curve`. */
   readonly gives: string;
+  /** Chooses the call, where there are several. */
+  readonly which?: ReactNode;
 }
 
 /** All the ways a result leaves a phone: the link, files, the request. */
 export function ShareSheet(props: ShareSheetProps) {
-  const { open, onClose, link, save, numbers, request, gives } = props;
+  const { open, onClose, link, save, numbers, request, gives, which } = props;
   const copy = useCopy();
   const [language, setLanguage] = useLanguage();
   return (
@@ -44,6 +47,7 @@ export function ShareSheet(props: ShareSheetProps) {
               The request
             </Words>
             <Words kind="help">{aboutRequest(gives)}</Words>
+            {which}
             <RequestView request={request} language={language} onLanguage={setLanguage} />
             <Button
               icon="copy"

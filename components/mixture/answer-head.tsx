@@ -92,7 +92,7 @@ const styles = StyleSheet.create({
     flexShrink: 1,
     minWidth: 0,
     rowGap: space[3],
-    ...webStyle({ display: 'grid', gridTemplateColumns: 'repeat(auto-fill, minmax(104px, 1fr))' }),
+    ...webStyle({ display: 'grid', gridTemplateColumns: 'repeat(auto-fit, minmax(104px, 1fr))' }),
   },
   fact: {
     borderLeftWidth: 1,
