@@ -20,6 +20,12 @@ const size = 12;
 /** Where a curve has moved by this part of its largest move, its name tells them apart best. */
 const farEnough = 0.6;
 
+/** The room that the value at the cursor takes, right of its dot. */
+function valueAt(line: readonly Point[], x: number): Rect[] {
+  const at = line.find((point) => point.x >= x);
+  return at ? [{ x, y: at.y - 20, width: 56, height: 18 }] : [];
+}
+
 /** Names of single lines that are compared, each where it stands farthest from the first. */
 export function BesideNames({ rect, first, others, placing }: BesideNamesProps) {
   const { colours } = useTheme();
@@ -38,7 +44,13 @@ export function BesideNames({ rect, first, others, placing }: BesideNamesProps) 
           points: points.filter((point, i) => isIn(point) && (moves[i] ?? 0) >= least),
         };
       }),
-      { bounds: rect, zero: bottom(rect), cursor: placing, lines: [first.filter(isIn)] },
+      {
+        bounds: rect,
+        zero: bottom(rect),
+        cursor: placing,
+        lines: [first.filter(isIn)],
+        taken: valueAt(first, placing),
+      },
     );
   }, [rect, first, others, placing]);
   return placed.map(({ key, box }) => (

@@ -16,11 +16,13 @@ interface CapacityCurveProps {
   readonly x: Scale;
   readonly compact: boolean;
   readonly placing: number;
+  /** Whether the curves beside are named here. */
+  readonly named: boolean;
 }
 
 /** Buffer capacity of the system at its total, over pH. */
 export const CapacityCurve = memo(function CapacityCurve(props: CapacityCurveProps) {
-  const { extras, rect, x, compact, placing } = props;
+  const { extras, rect, x, compact, placing, named } = props;
   const { capacity, beside } = extras;
   const lines = useMemo(() => {
     const ghosts = beside.flatMap(({ name, capacity: other }): CapacityLine[] =>
@@ -31,7 +33,7 @@ export const CapacityCurve = memo(function CapacityCurve(props: CapacityCurvePro
       : [];
     return [...ghosts, ...whole];
   }, [capacity, beside]);
-  const named = useMemo(() => {
+  const px = useMemo(() => {
     if (!capacity) return undefined;
     const y = capacityScale(rect, capacityTop(capacity));
     const pointsOf = ({ pH, values }: Capacity) =>
@@ -43,7 +45,7 @@ export const CapacityCurve = memo(function CapacityCurve(props: CapacityCurvePro
       ),
     };
   }, [capacity, beside, rect, x]);
-  if (!capacity || !named) return null;
+  if (!capacity || !px) return null;
   return (
     <>
       <CapacityPanel
@@ -64,7 +66,7 @@ export const CapacityCurve = memo(function CapacityCurve(props: CapacityCurvePro
           </>
         }
       />
-      <BesideNames rect={rect} {...named} placing={placing} />
+      {named && <BesideNames rect={rect} {...px} placing={placing} />}
     </>
   );
 });

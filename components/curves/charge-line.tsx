@@ -18,6 +18,8 @@ interface ChargeLineProps {
   readonly x: Scale;
   readonly compact: boolean;
   readonly placing: number;
+  /** Whether the curves beside are named here. */
+  readonly named: boolean;
 }
 
 /** The mean charge over pH. */
@@ -28,13 +30,14 @@ export const ChargeLine = memo(function ChargeLine({
   x,
   compact,
   placing,
+  named,
 }: ChargeLineProps) {
   const points = useMemo(() => chargesOf(drawn), [drawn]);
   const ghosts = useMemo(
     () => beside.map(({ name, drawn: other }) => ({ key: name, points: chargesOf(other) })),
     [beside],
   );
-  const named = useMemo(() => {
+  const lineOf = useMemo(() => {
     const y = chargeScale(endCharges(drawn), rect);
     const px = (curve: DrawnCurve) =>
       chargesOf(curve).map(({ pH, charge }) => ({ x: x(pH), y: y(charge) }));
@@ -55,7 +58,7 @@ export const ChargeLine = memo(function ChargeLine({
         inside={compact}
         head={compact ? undefined : <>{meanChargeSign} mean charge</>}
       />
-      <BesideNames rect={rect} {...named} placing={placing} />
+      {named && <BesideNames rect={rect} {...lineOf} placing={placing} />}
     </>
   );
 });

@@ -1,3 +1,4 @@
+import { useState } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { SystemCombobox } from '../handbook/system-combobox';
 import { systemTitle } from '../handbook/system-title';
@@ -15,6 +16,8 @@ export function CompareInputs({ state, others, drawn, extras, change }: Curves) 
   const { beside } = state;
   const setAt = (index: number, asked: CurveAsked) => change({ beside: beside.with(index, asked) });
   const full = beside.length >= besideAtMost;
+  // One that was just added is there to be changed.
+  const [added, setAdded] = useState<number>();
   return (
     <View style={styles.list}>
       <Words kind="label">Compare</Words>
@@ -27,7 +30,7 @@ export function CompareInputs({ state, others, drawn, extras, change }: Curves) 
           <View key={index} role="group" aria-label={`Compared with ${title}`}>
             <View style={styles.head}>
               <View style={styles.title}>
-                <Disclosure label={title} startsOpen={other?.error !== null}>
+                <Disclosure label={title} startsOpen={index === added}>
                   <SystemCombobox
                     label="System"
                     value={known === undefined ? '' : systemTitle(known)}
@@ -65,7 +68,10 @@ export function CompareInputs({ state, others, drawn, extras, change }: Curves) 
           label="Compare with…"
           disabled={full}
           why={`At most ${besideAtMost + 1} curves lie over each other here.`}
-          onPress={() => change({ beside: [...beside, nextBeside(state)] })}
+          onPress={() => {
+            setAdded(beside.length);
+            change({ beside: [...beside, nextBeside(state)] });
+          }}
         />
       </View>
     </View>

@@ -44,16 +44,19 @@ export function shiftOf(first: DrawnCurve, beside: DrawnCurve): Shift {
 
 const titleOf = ({ system }: DrawnCurve) => systemTitle(system.name ?? 'Your constants');
 
-/** What sets a curve beside apart from the first, in short: `I 0.15 · 37 °C`. */
+/**
+ * What sets a curve beside apart from the first, in short: `I 0.15 · 37 °C`. The model is
+ * said where both hold at an ionic strength: elsewhere every model is the ideal one.
+ */
 export function differenceName(first: DrawnCurve, beside: DrawnCurve): string {
   const [a, b] = [first.asked.conditions, beside.asked.conditions];
+  // At I = 0 every model is the ideal one.
+  const noSalt = [a, b].some(({ ionicStrength }) => Number(ionicStrength) === 0);
   const parts = [
     haveSameForms(first, beside) ? undefined : titleOf(beside),
     Number(a.ionicStrength) === Number(b.ionicStrength) ? undefined : `I ${b.ionicStrength}`,
     Number(a.temperature) === Number(b.temperature) ? undefined : `${b.temperature} °C`,
-    a.activityModel === b.activityModel || Number(b.ionicStrength) === 0
-      ? undefined
-      : modelInShort(b.activityModel),
+    a.activityModel === b.activityModel || noSalt ? undefined : modelInShort(b.activityModel),
   ].filter((part) => part !== undefined);
   return parts.length === 0 ? `${titleOf(beside)}, the same` : parts.join(' · ');
 }

@@ -14,7 +14,7 @@ import type { Reading } from './follow-curve';
 import { alphaScale } from './fraction-lines';
 import { lgConcentration, lgRange } from './lg-c';
 import { lgScale } from './lg-c-lines';
-import { shownCapacity, shownCharge, trueMinus } from './rounded';
+import { dotCapacity, shownCharge, trueMinus } from './rounded';
 
 /** Below this a marker on the line would only crowd the zero line. */
 const worthMarking = 0.015;
@@ -103,7 +103,7 @@ function CapacityDot({ capacity, rect, reading, cursor }: CapacityDotProps) {
       y={value > top ? undefined : capacityScale(rect, top)(value)}
       top={rect.y}
       limit={right(rect)}
-      text={shownCapacity(value)}
+      text={dotCapacity(value)}
     />
   );
 }

@@ -60,6 +60,8 @@ export function CurvesFigure(props: CurvesFigureProps) {
   const named = { ...shared, cursor, placing };
   const { panels } = layout;
   const { beside, capacity, isoelectricPoint } = extras;
+  // Where the fractions are drawn, the names stand there.
+  const lines = { ...shared, placing, named: panels.fractions === undefined };
   return (
     <View style={{ width, height: layout.height }}>
       <View ref={ref} role="img" aria-label={describeFigure(drawn, reading, layers, extras)}>
@@ -73,12 +75,8 @@ export function CurvesFigure(props: CurvesFigureProps) {
               x={x}
             />
           )}
-          {panels.charge && (
-            <ChargeLine {...shared} beside={beside} rect={panels.charge} placing={placing} />
-          )}
-          {panels.capacity && (
-            <CapacityCurve {...shared} extras={extras} rect={panels.capacity} placing={placing} />
-          )}
+          {panels.charge && <ChargeLine {...lines} beside={beside} rect={panels.charge} />}
+          {panels.capacity && <CapacityCurve {...lines} extras={extras} rect={panels.capacity} />}
           {panels['lg-c'] && (
             <LgCLines {...named} rect={panels['lg-c']} total={total} capacity={capacity} />
           )}

@@ -69,7 +69,7 @@ export function CurvesPhone({ curves }: { readonly curves: Curves }) {
         <Pressable
           role="button"
           aria-haspopup="dialog"
-          aria-label={`${title}: change the system`}
+          aria-label={`${title}: change the system or its conditions`}
           onPress={() => setOpen('system')}
           style={styles.title}
         >
@@ -159,7 +159,7 @@ export function CurvesPhone({ curves }: { readonly curves: Curves }) {
           </View>
         </View>
       )}
-      <Dialog title="Change the system" open={open === 'system'} onClose={close}>
+      <Dialog title="System and conditions" open={open === 'system'} onClose={close}>
         <View style={styles.inputs}>
           <SystemInputs {...curves} choose={pick} />
           <CompareInputs {...curves} />

@@ -17,6 +17,8 @@ interface FailureNoticeProps {
   readonly onPass?: () => void;
 }
 
+const titleOf = (status: number) => (status === 429 ? 'Too many curves at once' : undefined);
+
 /** Why a call failed, in the service's words, and what to do. */
 export function FailureNotice(props: FailureNoticeProps) {
   const { failure, isFetching, refetch, title, onPass } = props;
@@ -24,11 +26,13 @@ export function FailureNotice(props: FailureNoticeProps) {
   const { problem, retryAfter } = failure;
   const busy = problem.status === 429 || problem.status === 503;
   const reasons = problem.errors?.map(({ detail }) => detail) ?? [];
-  const pass = conditionFaults(failure).passable ? onPass : undefined;
+  const { passable } = conditionFaults(failure);
+  const pass = passable ? onPass : undefined;
+  const said = passable ? reasons : [...new Set([problem.detail, ...reasons])];
   return (
     <Notice
       tone={busy ? 'warn' : 'bad'}
-      title={problem.status === 429 ? 'Too many curves at once' : (title ?? problem.title)}
+      title={titleOf(problem.status) ?? title ?? (passable ? 'Not computed' : problem.title)}
       requestId={problem.requestId}
     >
       {busy ? (
@@ -38,7 +42,7 @@ export function FailureNotice(props: FailureNoticeProps) {
             : `Try again in ${retryAfter ?? 60} s.`}
         </Words>
       ) : (
-        [...new Set([problem.detail, ...reasons])].map(
+        said.map(
           (reason) => reason !== undefined && <Words key={reason}>{trueMinus(reason)}</Words>,
         )
       )}

@@ -32,6 +32,10 @@ export function shownCapacity(value: number): string {
     : text.toFixed(Math.max(0, 2 - Math.floor(Math.log10(value))));
 }
 
+/** The same beside a dot in a drawing, where there is no room for a power of ten. */
+export const dotCapacity = (value: number): string =>
+  value < 0.01 ? '< 0.01' : value >= 1e5 ? value.toPrecision(3) : shownCapacity(value);
+
 /** A ratio to three digits, with an exponent from 10³ on and below 10⁻³. */
 export function shownRatio(ratio: string): string {
   const value = new Exact(ratio).toSignificantDigits(3);

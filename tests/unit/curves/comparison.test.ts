@@ -41,11 +41,14 @@ describe('two curves over each other', () => {
   });
 
   test('the name says what differs and nothing else', () => {
-    expect(differenceName(first, beside)).toBe('I 0.15 · Davies');
+    expect(differenceName(first, beside)).toBe('I 0.15');
     expect(differenceName(first, acid(4.7, { ...inSalt, temperature: '37' }))).toBe(
-      'I 0.15 · 37 °C · Davies',
+      'I 0.15 · 37 °C',
     );
     expect(differenceName(beside, first)).toBe('I 0');
+    expect(differenceName(beside, acid(4.6, { ...inSalt, activityModel: 'guntelberg' }))).toBe(
+      'Güntelberg',
+    );
     expect(differenceName(first, { ...acid(4.6, {}, 'formic acid'), formulas: ['A'] })).toBe(
       'Formic acid',
     );
