@@ -1,7 +1,9 @@
+import { besideMpmath } from './beside-mpmath';
+import { tenTriprotic } from './ten-triprotic';
 import { triproticCurve } from './triprotic-curve';
 
 /** Benches, each a file: it checks its outputs, then gives timings and ratios of one run. */
-const benches = [triproticCurve];
+const benches = [triproticCurve, besideMpmath, tenTriprotic];
 const rounds = 5;
 
 const results = benches.map((bench) => bench(rounds));
@@ -13,8 +15,9 @@ if (process.argv.includes('--json')) {
   for (const { title, timings, ratios } of results) {
     console.log(`${title} (medians of ${rounds} interleaved rounds)`);
     for (const { name, milliseconds } of timings) {
-      console.log(line(name, `${milliseconds.toFixed(1)} ms`));
+      console.log(line(name, `${milliseconds.toFixed(milliseconds < 10 ? 2 : 1)} ms`));
     }
-    for (const { name, ratio } of ratios) console.log(line(name, `${ratio.toFixed(0)} x`));
+    for (const { name, ratio } of ratios)
+      console.log(line(name, `${ratio.toFixed(ratio < 10 ? 2 : 0)} x`));
   }
 }
