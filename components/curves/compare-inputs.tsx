@@ -8,6 +8,7 @@ import { space } from '../ui/theme';
 import { Words } from '../ui/words';
 import { ConditionFields } from './condition-fields';
 import type { CurveAsked } from './curve-asked';
+import { changedConditions } from './curve-conditions';
 import { besideAtMost, nextBeside } from './curves-state';
 import type { Curves } from './use-curves';
 
@@ -45,7 +46,10 @@ export function CompareInputs({ state, others, drawn, extras, change }: Curves) 
                   <ConditionFields
                     conditions={asked.conditions}
                     onChange={(part) =>
-                      setAt(index, { ...asked, conditions: { ...asked.conditions, ...part } })
+                      setAt(index, {
+                        ...asked,
+                        conditions: changedConditions(asked.conditions, part),
+                      })
                     }
                     error={other?.error ?? null}
                   />

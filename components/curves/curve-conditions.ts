@@ -3,14 +3,13 @@ import { ionicStrengthAsked, temperatureAsked } from '../conditions/asked-quanti
 import { typedQuantity, type AskedQuantity } from '../conditions/typed-quantity';
 import type { Pair } from '../fragment/pairs';
 
-/** Activity models that one system can be drawn with: its counter-ions are not known here. */
+/** Activity models that one system can be drawn with: the others need every ion in the solution. */
 export const curveModels = [
   'ideal',
   'debye-huckel',
   'extended-debye-huckel',
   'guntelberg',
   'davies',
-  'specific-ion-interaction',
 ] as const;
 export type CurveModel = (typeof curveModels)[number];
 
@@ -33,23 +32,48 @@ export const firstConditions: CurveConditions = {
   outOfRange: 'refuse',
 };
 
-const names = ['temperature', 'ionicStrength', 'activityModel', 'outOfRange'] as const;
+/** A stated ionic strength without a model is one by Davies: here as in the API. */
+export const modelAt = (ionicStrength: string): CurveModel =>
+  Number(ionicStrength) === 0 ? 'ideal' : 'davies';
 
-/** The part of a call that says them; nothing of what is so by itself. */
+/** A part of them changed. A first ionic strength brings a model under which it counts. */
+export function changedConditions(
+  before: CurveConditions,
+  part: Partial<CurveConditions>,
+): CurveConditions {
+  const after = { ...before, ...part };
+  const wasLeftOpen = before.activityModel === modelAt(before.ionicStrength);
+  return part.ionicStrength !== undefined && wasLeftOpen
+    ? { ...after, activityModel: modelAt(after.ionicStrength) }
+    : after;
+}
+
+/** The part of a call that says them; nothing where all of it is so by itself. */
 export function conditionsAsked(asked: CurveConditions): { readonly conditions?: Conditions } {
-  const differing = names.filter((name) => asked[name] !== firstConditions[name]);
-  if (differing.length === 0) return {};
-  return { conditions: Object.fromEntries(differing.map((name) => [name, asked[name]])) };
+  const { temperature, ionicStrength, activityModel, outOfRange } = asked;
+  const first = firstConditions;
+  const conditions: Conditions = {
+    ...(temperature === first.temperature ? {} : { temperature }),
+    ...(ionicStrength === first.ionicStrength && activityModel === first.activityModel
+      ? {}
+      : { ionicStrength, activityModel }),
+    ...(outOfRange === first.outOfRange ? {} : { outOfRange }),
+  };
+  return Object.keys(conditions).length === 0 ? {} : { conditions };
 }
 
 /** Keys of the fragment that carry them. */
 export const conditionKeys = ['T', 'I', 'model', 'beyond'] as const;
 
 export function conditionPairs(asked: CurveConditions): Pair[] {
-  return names.map((name, i) => [
-    conditionKeys[i] ?? name,
-    asked[name] === firstConditions[name] ? undefined : asked[name],
-  ]);
+  const { temperature, ionicStrength, activityModel, outOfRange } = asked;
+  const first = firstConditions;
+  return [
+    ['T', temperature === first.temperature ? undefined : temperature],
+    ['I', ionicStrength === first.ionicStrength ? undefined : ionicStrength],
+    ['model', activityModel === modelAt(ionicStrength) ? undefined : activityModel],
+    ['beyond', outOfRange === first.outOfRange ? undefined : outOfRange],
+  ];
 }
 
 function readQuantity(text: string | undefined, first: string, asked: AskedQuantity) {
@@ -62,14 +86,14 @@ export function readConditions(values: ReadonlyMap<string, string>) {
   const first = firstConditions;
   const temperature = readQuantity(values.get('T'), first.temperature, temperatureAsked);
   const ionicStrength = readQuantity(values.get('I'), first.ionicStrength, ionicStrengthAsked);
-  const model = values.get('model') ?? first.activityModel;
+  const model = values.get('model') ?? modelAt(ionicStrength.value);
   const activityModel = curveModels.find((known) => known === model);
   const beyond = values.get('beyond') ?? first.outOfRange;
   const outOfRange = (['refuse', 'compute'] as const).find((known) => known === beyond);
   const conditions: CurveConditions = {
     temperature: temperature.value,
     ionicStrength: ionicStrength.value,
-    activityModel: activityModel ?? first.activityModel,
+    activityModel: activityModel ?? modelAt(ionicStrength.value),
     outOfRange: outOfRange ?? first.outOfRange,
   };
   const faulty = temperature.faulty || ionicStrength.faulty || !activityModel || !outOfRange;

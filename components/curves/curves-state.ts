@@ -1,6 +1,6 @@
 import type { StoredChoice } from '../constants/choice';
 import { firstChoice, type CurveAsked } from './curve-asked';
-import { firstConditions } from './curve-conditions';
+import { changedConditions, firstConditions, type CurveConditions } from './curve-conditions';
 
 /** What can be drawn on the one pH axis, from above. */
 export const layers = [
@@ -55,17 +55,8 @@ export const firstState: CurvesState & { readonly choice: StoredChoice } = {
  * one, or without salt where there is some; then at body temperature.
  */
 export function nextBeside({ choice, conditions, beside }: CurvesState): CurveAsked {
-  if (beside.length > 0) return { choice, conditions: { ...conditions, temperature: '37' } };
-  if (Number(conditions.ionicStrength) > 0) {
-    return { choice, conditions: { ...conditions, ionicStrength: '0' } };
-  }
-  const { activityModel } = conditions;
-  return {
-    choice,
-    conditions: {
-      ...conditions,
-      ionicStrength: '0.15',
-      activityModel: activityModel === 'ideal' ? 'davies' : activityModel,
-    },
-  };
+  const change = (part: Partial<CurveConditions>) => changedConditions(conditions, part);
+  if (beside.length > 0) return { choice, conditions: change({ temperature: '37' }) };
+  const ionicStrength = Number(conditions.ionicStrength) > 0 ? '0' : '0.15';
+  return { choice, conditions: change({ ionicStrength }) };
 }

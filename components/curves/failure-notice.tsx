@@ -1,11 +1,10 @@
 import { StyleSheet, View } from 'react-native';
 import { ProblemError } from '../../shared/client';
-import { conditionFaults } from '../conditions/condition-faults';
+import { conditionFaults, saidHere } from '../conditions/condition-faults';
 import { Button } from '../ui/button';
 import { Notice } from '../ui/notice';
 import { space } from '../ui/theme';
 import { Words } from '../ui/words';
-import { trueMinus } from './rounded';
 
 interface FailureNoticeProps {
   readonly failure: Error;
@@ -42,9 +41,7 @@ export function FailureNotice(props: FailureNoticeProps) {
             : `Try again in ${retryAfter ?? 60} s.`}
         </Words>
       ) : (
-        said.map(
-          (reason) => reason !== undefined && <Words key={reason}>{trueMinus(reason)}</Words>,
-        )
+        said.map((reason) => reason !== undefined && <Words key={reason}>{saidHere(reason)}</Words>)
       )}
       {!isFetching && (
         <View style={styles.again}>

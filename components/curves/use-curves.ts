@@ -4,7 +4,7 @@ import type { Choice } from '../constants/choice';
 import { plainSystem } from '../constants/choice';
 import { systemTitle } from '../handbook/system-title';
 import { givenConstants } from './curve-asked';
-import type { CurveConditions } from './curve-conditions';
+import { changedConditions, type CurveConditions } from './curve-conditions';
 import { rangeOf } from './curve-grid';
 import { useCurve, useReading } from './curve-queries';
 import { firstState, layersOfView } from './curves-state';
@@ -59,7 +59,7 @@ export function useCurves({ rail }: { readonly rail: boolean }) {
     change,
     /** Changes a part of the conditions. */
     setConditions: (part: Partial<CurveConditions>) =>
-      change({ conditions: { ...conditions, ...part } }),
+      change({ conditions: changedConditions(conditions, part) }),
     move: (next: string) => change({ pH: next }),
     /** Begins a system of one's own from the one that is drawn. */
     typeOwn: () => {

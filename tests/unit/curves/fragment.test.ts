@@ -93,7 +93,7 @@ describe('the fragment of the address', () => {
       outOfRange: 'refuse',
     } as const;
     expect(formatFragment({ ...firstState, conditions: inPlasma, total: '0.01' })).toBe(
-      'system=phosphoric-acid&T=37&I=0.15&model=davies&pH=7.40&c=0.01',
+      'system=phosphoric-acid&T=37&I=0.15&pH=7.40&c=0.01',
     );
   });
 
