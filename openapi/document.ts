@@ -21,7 +21,7 @@ function securityOf(access: Access): Record<string, string[]>[] {
 
 /** Refusals that any operation of a kind may give. */
 function refusalsOf(operation: Operation): ProblemName[] {
-  const { body, query, access, callsPerMinute, refuses = [] } = operation;
+  const { body, query, access, callsPerMinute, anyHost, refuses = [] } = operation;
   return [
     ...(query ? (['invalid-request'] as const) : []),
     ...(body ? (['malformed-json', 'invalid-request', 'body-too-large'] as const) : []),
@@ -29,6 +29,7 @@ function refusalsOf(operation: Operation): ProblemName[] {
     ...refusalsOfAccess(access),
     ...(callsPerMinute ? (['too-many-requests', 'unavailable'] as const) : []),
     'not-acceptable',
+    ...(anyHost ? [] : (['misdirected-request'] as const)),
     ...refuses,
   ];
 }

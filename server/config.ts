@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { parseNetwork, type Network } from './http/networks';
 
 const pepper = /^[1-9]\d*:[A-Za-z0-9_-]{43,}$/;
 
@@ -23,6 +24,21 @@ const secret = z
   .regex(/^[A-Za-z0-9_-]{43,}$/, 'must be 32 bytes or more in base64url')
   .transform((value) => Buffer.from(value, 'base64url'));
 
+/** Comma-separated networks; none of everybody, which would be nobody's proxy. */
+const networks = z.string().transform((list, context): Network[] =>
+  list.split(',').flatMap((entry) => {
+    const network = parseNetwork(entry.trim());
+    if (network && network.prefix > 0) return [network];
+    context.addIssue({
+      code: 'custom',
+      message: network
+        ? `${entry.trim()} is everybody: name the proxies`
+        : `${JSON.stringify(entry.trim())} is no network: write for example 10.0.0.0/8 or 2001:db8::/32`,
+    });
+    return [];
+  }),
+);
+
 const environment = z
   .object({
     NODE_ENV: z.enum(['development', 'test', 'production']).default('development'),
@@ -31,6 +47,7 @@ const environment = z
     PUBLIC_URL: z
       .url({ protocol: /^https?$/, error: 'must be an http or https address' })
       .optional(),
+    TRUSTED_PROXIES: networks.optional(),
     DATABASE_URL: z.url({
       protocol: /^postgres(ql)?$/,
       error: 'must be a postgresql:// address',
@@ -57,6 +74,8 @@ export interface Config {
   readonly port: number;
   /** Origin of links and problem types, without a trailing slash; this machine's where not given. */
   readonly publicUrl: string | undefined;
+  /** Peers whose X-Forwarded-For is read; nobody's where none are named. */
+  readonly trustedProxies: readonly Network[];
   readonly databaseUrl: string;
   /** Peppers of API keys by version; the highest version makes new digests. */
   readonly keyPeppers: ReadonlyMap<number, Buffer>;
@@ -87,6 +106,7 @@ export function readConfig(source: Readonly<Record<string, string | undefined>>)
     host: values.HOST,
     port: values.PORT,
     publicUrl: values.PUBLIC_URL?.replace(/\/+$/, ''),
+    trustedProxies: values.TRUSTED_PROXIES ?? [],
     databaseUrl: values.DATABASE_URL,
     keyPeppers: values.KEY_PEPPERS,
     sessionSecret: values.SESSION_SECRET,

@@ -27,7 +27,7 @@ export async function startServer(config: Config, logger: Logger): Promise<Runni
   const { port } = server.address() as AddressInfo;
   const publicUrl = config.publicUrl ?? `http://localhost:${port}`;
   const services = createServices(database, config, publicUrl);
-  server.on('request', createApp({ config, publicUrl, services, logger }));
+  server.on('request', createApp({ config, publicUrl, port, services, logger }));
   const close = async () => {
     // A browser keeps spare connections on which nothing was ever asked; they would be waited for.
     const patience = setTimeout(() => server.closeAllConnections(), patienceMs);

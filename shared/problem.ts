@@ -17,6 +17,7 @@ export const problemTypes = {
   'not-acceptable': [406, 'The answer cannot be given in that form'],
   'body-too-large': [413, 'The body is too large'],
   'unsupported-media-type': [415, 'The body is not JSON'],
+  'misdirected-request': [421, 'The service is not at that host'],
   'no-answer': [422, 'The chemistry has no such answer'],
   'over-limit': [422, 'The call asks for more than one call may'],
   'too-many-requests': [429, 'Too many calls'],

@@ -1,5 +1,5 @@
 import { randomUUID } from 'node:crypto';
-import type { IncomingMessage, ServerResponse } from 'node:http';
+import type { Request, Response } from 'express';
 import { pino, type DestinationStream, type Logger } from 'pino';
 import { pinoHttp, type HttpLogger } from 'pino-http';
 import type { Config } from '../config';
@@ -22,15 +22,15 @@ export const createLogger = (level: Config['logLevel'], destination?: Destinatio
 
 const traceparent = /^00-([0-9a-f]{32})-[0-9a-f]{16}-[0-9a-f]{2}$/;
 
-const levelOf = (_request: IncomingMessage, response: ServerResponse, error?: Error) =>
+const levelOf = (_request: Request, response: Response, error?: Error) =>
   error || response.statusCode >= 500 ? 'error' : response.statusCode >= 400 ? 'warn' : 'info';
 
 /**
- * One line a call: method, path without query, status, time. Headers and bodies are never logged.
+ * One line a call: method, path without query, status, time, address. Headers and bodies are never logged.
  * Gives each call its id, answered as X-Request-Id.
  */
-export const requestLog = (logger: Logger): HttpLogger =>
-  pinoHttp({
+export const requestLog = (logger: Logger): HttpLogger<Request, Response> =>
+  pinoHttp<Request, Response>({
     logger,
     quietReqLogger: true,
     genReqId: (_request, response) => {
@@ -40,9 +40,9 @@ export const requestLog = (logger: Logger): HttpLogger =>
     },
     customAttributeKeys: { reqId: 'requestId', responseTime: 'ms' },
     customLogLevel: levelOf,
-    customProps: (request: IncomingMessage) => {
+    customProps: (request, { locals }) => {
       const trace = traceparent.exec(String(request.headers.traceparent))?.[1];
-      return trace === undefined ? {} : { trace };
+      return { address: locals.address, ...(trace && { trace }) };
     },
     autoLogging: { ignore: ({ url }) => url === '/livez' || url === '/readyz' },
     serializers: {

@@ -72,6 +72,11 @@ interface Declared<
   readonly access: A;
   /** Calls a minute for each caller: an address where nobody is known, else a key or a person. */
   readonly callsPerMinute?: number;
+  /**
+   * Answers under any Host. Only for what reads nothing of a request and gives nothing away: load
+   * balancers ask each instance by its address, and many cannot be told a name to ask under.
+   */
+  readonly anyHost?: true;
   readonly body?: Body;
   /** Parts of the path in braces; one that does not fit is a 404. */
   readonly params?: Params;

@@ -23,8 +23,8 @@ export const rateLimiter = ({ name, callsPerMinute, database }: Limit): RateLimi
     standardHeaders: 'draft-8',
     legacyHeaders: false,
     store: new RateWindows(database, name),
-    keyGenerator: (request, response) =>
-      response.locals.caller?.name ?? ipKeyGenerator(request.ip ?? ''),
+    keyGenerator: (_request, response) =>
+      response.locals.caller?.name ?? ipKeyGenerator(response.locals.address ?? ''),
     handler: (_request, _response, next) => {
       next(new Refusal('too-many-requests', `At most ${callsPerMinute} calls a minute.`));
     },

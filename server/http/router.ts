@@ -84,7 +84,7 @@ const answer =
       accepted: String(response.locals.accepted),
       caller: response.locals.caller,
       signal: goneSignal(response),
-      address: request.ip ?? '',
+      address: response.locals.address ?? '',
       refreshToken: pages.cookies.read(request).refresh,
     };
     // Its own declaration gave the handler its types; the guard and `read` have made them true.

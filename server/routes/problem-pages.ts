@@ -26,6 +26,8 @@ const advice: Readonly<Record<ProblemName, string>> = {
   'body-too-large':
     'GET /v1/limits says how large a body may be. Split the work over several calls.',
   'unsupported-media-type': 'Send Content-Type: application/json, in UTF-8.',
+  'misdirected-request':
+    'Call the service under its public address. Behind a proxy, have the proxy pass the Host on as it came.',
   'no-answer':
     'The request is well formed, but the chemistry has no such answer, or no model here can give it honestly. The detail says why, in the trade’s words, and what would help.',
   'over-limit':

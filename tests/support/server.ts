@@ -25,20 +25,31 @@ export interface TestServer {
   readonly close: () => Promise<void>;
 }
 
+interface Wanted {
+  readonly withApp?: boolean;
+  /** Where the environment is another than usual. */
+  readonly config?: Partial<Config>;
+}
+
 /** A migrated and seeded database of its own, and a real server on a free port. */
-export async function startTestServer({ withApp = false } = {}): Promise<TestServer> {
+export async function startTestServer({
+  withApp = false,
+  config: changes = {},
+}: Wanted = {}): Promise<TestServer> {
   const { url, appUrl, appRole, drop } = await createTestDatabase();
   const config: Config = {
     environment: 'test',
     host: '127.0.0.1',
     port: 0,
     publicUrl: undefined,
+    trustedProxies: [],
     databaseUrl: appUrl,
     keyPeppers: new Map([[1, randomBytes(32)]]),
     sessionSecret: randomBytes(32),
     webRoot: withApp ? process.env.WEB_ROOT : undefined,
     logLevel: 'info',
     computeThreads: 1,
+    ...changes,
   };
   const logs: string[] = [];
   const sink = new Writable({

@@ -1,13 +1,16 @@
 import path from 'node:path';
 import { Piscina } from 'piscina';
-import { Queue } from './queue';
 import { Refusal } from '../../refusal';
+import { Queue } from '../queue';
 import type { Work, Worked } from './worker';
 
 // The worker stands beside this file, compiled or not as this file is.
 const extension = path.extname(__filename);
 const filename = path.join(__dirname, `worker${extension}`);
 const loader = extension === '.ts' ? { execArgv: ['--require', 'tsx/cjs'] } : {};
+
+/** Cost that may wait at once: some seconds of work, as the slowest kind of call counts it. */
+const mostWaiting = 36_000_000;
 
 /** What a call weighs, and whether its caller is still there. */
 export interface Load {
@@ -21,7 +24,7 @@ export class ComputePool {
   private readonly queue: Queue;
 
   constructor(threads: number) {
-    this.queue = new Queue(threads);
+    this.queue = new Queue({ places: threads, mostWaiting });
     this.pool = new Piscina({
       filename,
       ...loader,

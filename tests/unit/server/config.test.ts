@@ -24,6 +24,17 @@ test('peppers keep their versions', () => {
   expect([...readConfig({ ...right, KEY_PEPPERS: pair }).keyPeppers.keys()]).toEqual([1, 2]);
 });
 
+test('trusted proxies are networks of either family; without any nobody is believed', () => {
+  const list = '10.0.0.0/8, 192.0.2.1,2001:db8::/32';
+  const prefixes = readConfig({ ...right, TRUSTED_PROXIES: list }).trustedProxies;
+  expect(prefixes.map(({ family, prefix }) => [family, prefix])).toEqual([
+    [4, 8],
+    [4, 32],
+    [6, 32],
+  ]);
+  expect(readConfig(right).trustedProxies).toEqual([]);
+});
+
 const rows: [string, Record<string, string | undefined>, RegExp][] = [
   ['no database', { DATABASE_URL: undefined }, /DATABASE_URL is missing/],
   ['a database of another kind', { DATABASE_URL: 'mysql://x' }, /DATABASE_URL: .*postgresql/],
@@ -34,6 +45,9 @@ const rows: [string, Record<string, string | undefined>, RegExp][] = [
   ['a port too high', { PORT: '70000' }, /PORT/],
   ['another host outside production', { HOST: '0.0.0.0' }, /HOST: .*only in production/],
   ['production without its address', { NODE_ENV: 'production' }, /PUBLIC_URL is missing.*required/],
+  ['a proxy by name', { TRUSTED_PROXIES: '10.0.0.0/8,proxy' }, /TRUSTED_PROXIES: "proxy" is no/],
+  ['a slip in a proxy', { TRUSTED_PROXIES: '10.0.0.1/8' }, /"10.0.0.1\/8" is no network/],
+  ['trust in everybody', { TRUSTED_PROXIES: '0.0.0.0/0' }, /0.0.0.0\/0 is everybody/],
   ['an unknown kind of environment', { NODE_ENV: 'staging' }, /NODE_ENV/],
 ];
 test.each(rows)('%s is refused by name and reason', (_name, change, message) => {

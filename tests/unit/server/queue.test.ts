@@ -1,4 +1,4 @@
-import { Queue } from '../../../server/services/compute/queue';
+import { Queue } from '../../../server/services/queue';
 
 /** Work that ends when told to. */
 function work() {
@@ -10,10 +10,11 @@ function work() {
 }
 /** Every promise that can go on has gone on. */
 const settled = () => new Promise((resolve) => setImmediate(resolve));
+const mostWaiting = 36_000_000;
 const here = () => new AbortController().signal;
 
 test('so many work at once, the others in the order they came', async () => {
-  const queue = new Queue(2);
+  const queue = new Queue({ places: 2, mostWaiting });
   const started: number[] = [];
   const works = [0, 1, 2, 3].map(work);
   const runs = works.map(({ run }, i) =>
@@ -34,7 +35,7 @@ test('so many work at once, the others in the order they came', async () => {
 });
 
 test('work that fails gives its place to the next', async () => {
-  const queue = new Queue(1);
+  const queue = new Queue({ places: 1, mostWaiting });
   const failing = queue.run(1, here(), () => Promise.reject(new Error('no')));
   const next = queue.run(1, here(), () => Promise.resolve('done'));
   await expect(failing).rejects.toThrow('no');
@@ -42,7 +43,7 @@ test('work that fails gives its place to the next', async () => {
 });
 
 test('a caller who goes away leaves the queue', async () => {
-  const queue = new Queue(1);
+  const queue = new Queue({ places: 1, mostWaiting });
   const first = work();
   const running = queue.run(1, here(), first.run);
   const gone = new AbortController();
@@ -56,7 +57,7 @@ test('a caller who goes away leaves the queue', async () => {
 });
 
 test('more waiting work than some seconds’ worth is refused', async () => {
-  const queue = new Queue(1);
+  const queue = new Queue({ places: 1, mostWaiting });
   const first = work();
   const running = [queue.run(12_000_000, here(), first.run)];
   for (let i = 0; i < 3; i += 1)

@@ -1,12 +1,16 @@
-import { Refusal } from '../../refusal';
+import { Refusal } from '../refusal';
 
 interface Waiting {
   readonly cost: number;
   readonly start: () => void;
 }
 
-/** Cost that may wait at once: some seconds of work, as the slowest kind of call counts it. */
-const mostWaiting = 36_000_000;
+interface Bounds {
+  /** Calls that work at once. */
+  readonly places: number;
+  /** Cost that may wait at once. */
+  readonly mostWaiting: number;
+}
 
 /**
  * Lets so many calls work at once, the others in the order they came. A call whose caller has gone
@@ -16,7 +20,7 @@ export class Queue {
   private readonly waiting: Waiting[] = [];
   private working = 0;
 
-  constructor(private readonly places: number) {}
+  constructor(private readonly bounds: Bounds) {}
 
   async run<T>(cost: number, signal: AbortSignal, work: () => Promise<T>): Promise<T> {
     await this.turn(cost, signal);
@@ -31,13 +35,13 @@ export class Queue {
 
   private async turn(cost: number, signal: AbortSignal): Promise<void> {
     // Whoever waits is handed the place of one that is done.
-    if (this.working >= this.places) await this.wait(cost, signal);
+    if (this.working >= this.bounds.places) await this.wait(cost, signal);
     else this.working += 1;
   }
 
   private wait(cost: number, signal: AbortSignal): Promise<void> {
     const before = this.waiting.reduce((sum, one) => sum + one.cost, 0);
-    if (before + cost > mostWaiting) {
+    if (before + cost > this.bounds.mostWaiting) {
       throw new Refusal('unavailable', 'Too many calls are waiting. Try again in a few seconds.');
     }
     return new Promise((resolve, reject) => {
