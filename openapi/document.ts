@@ -162,6 +162,7 @@ export function openApiDocument(operations: readonly Operation[]) {
       { name: 'Systems', description: 'The handbook and the organization’s own systems.' },
       { name: 'People', description: 'Who is signed in, and where.' },
       { name: 'Keys', description: 'API keys of the organization.' },
+      { name: 'Audit', description: 'What was done in the organization, and by whom.' },
       { name: 'Service', description: 'The service itself.' },
     ],
   });

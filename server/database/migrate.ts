@@ -5,8 +5,8 @@ const identifier = /^[a-z_][a-z0-9_]{0,62}$/;
 
 /**
  * Brings the schema up to date and, where the running role is another than the owner, lets it read
- * and write rows, nothing more; then the handbook, which every environment has. An advisory lock
- * makes two migrations at once wait for each other.
+ * and write rows, nothing more, and only add to those of the audit; then the handbook, which every
+ * environment has. An advisory lock makes two migrations at once wait for each other.
  */
 export async function migrate(database: DataSource, runningRole?: string): Promise<string[]> {
   if (runningRole !== undefined && !identifier.test(runningRole)) {
@@ -30,5 +30,6 @@ async function grantRows(database: DataSource, role: string): Promise<void> {
     GRANT USAGE ON SCHEMA public TO ${role};
     GRANT SELECT, INSERT, UPDATE, DELETE ON ALL TABLES IN SCHEMA public TO ${role};
     REVOKE INSERT, UPDATE, DELETE ON schema_migrations FROM ${role};
+    REVOKE UPDATE, DELETE ON audit_events FROM ${role};
   `);
 }

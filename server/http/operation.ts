@@ -2,7 +2,7 @@ import type { ZodObject, ZodType, z } from 'zod';
 import type { ProblemName } from '../../shared/problem';
 import type { Role, Scope } from '../../shared/scopes';
 import type { Services } from '../services';
-import type { Caller, SessionCaller } from '../services/caller';
+import type { Caller, CallSource, SessionCaller } from '../services/caller';
 import type { Tokens } from '../services/sessions/session-service';
 
 /**
@@ -28,16 +28,16 @@ interface Call<A extends Access, Body, Params, Query> {
   readonly services: Services;
   /** The media type agreed upon, one of `produces`. */
   readonly accepted: string;
-  /** Whoever calls, where the access asks who it is. */
+  /** Whoever calls and from where, where the access asks who it is. */
   readonly caller: A extends { roles: unknown }
-    ? SessionCaller
+    ? SessionCaller & CallSource
     : A extends 'public' | 'own-pages'
       ? undefined
-      : Caller;
+      : Caller & CallSource;
   /** Aborted when the caller has gone. */
   readonly signal: AbortSignal;
-  /** The peer's network address. */
-  readonly address: string;
+  /** Where the call comes from, whoever calls. */
+  readonly source: CallSource;
   /** The refresh token of the caller's cookie. */
   readonly refreshToken: string | undefined;
 }
@@ -68,7 +68,7 @@ interface Declared<
   readonly operationId: string;
   readonly summary: string;
   readonly description: string;
-  readonly tag: 'Compute' | 'Systems' | 'People' | 'Keys' | 'Service';
+  readonly tag: 'Compute' | 'Systems' | 'People' | 'Keys' | 'Audit' | 'Service';
   readonly access: A;
   /** Calls a minute for each caller: an address where nobody is known, else a key or a person. */
   readonly callsPerMinute?: number;

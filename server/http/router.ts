@@ -3,7 +3,7 @@ import { z, type ZodType } from 'zod';
 import type { Fault } from '../../shared/problem';
 import { Refusal } from '../refusal';
 import type { Services } from '../services';
-import type { Caller } from '../services/caller';
+import type { Caller, CallSource } from '../services/caller';
 import { jsonBody } from './body';
 import { callerOf, type OwnPages } from './caller';
 import { revalidated } from './etag';
@@ -75,16 +75,23 @@ function goneSignal(response: Response): AbortSignal {
   return gone.signal;
 }
 
+const sourceOf = (response: Response): CallSource => ({
+  address: response.locals.address ?? '',
+  requestId: String(response.getHeader('X-Request-Id')),
+});
+
 const answer =
   (operation: Operation, services: Services, pages: OwnPages) =>
   async (request: Request, response: Response): Promise<void> => {
+    const { caller } = response.locals;
+    const source = sourceOf(response);
     const call = {
       ...read(operation, request),
       services,
       accepted: String(response.locals.accepted),
-      caller: response.locals.caller,
+      caller: caller && { ...caller, ...source },
+      source,
       signal: goneSignal(response),
-      address: response.locals.address ?? '',
       refreshToken: pages.cookies.read(request).refresh,
     };
     // Its own declaration gave the handler its types; the guard and `read` have made them true.

@@ -1,4 +1,5 @@
 import type { Operation } from '../http/operation';
+import { listAuditEvents } from './audit-events';
 import { bufferCapacity, publicBufferCapacity } from './buffer-capacity';
 import { fractions, publicFractions } from './fractions';
 import { livez, readyz } from './health';
@@ -41,6 +42,7 @@ export const operations: readonly Operation[] = [
   listKeys,
   readKey,
   revokeKey,
+  listAuditEvents,
   limits,
   livez,
   readyz,

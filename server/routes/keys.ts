@@ -1,14 +1,13 @@
 import { z } from 'zod';
 import { issuedKey, keyAnswer, keyList, keyRequest } from '../../shared/keys';
 import { pageQuery } from '../../shared/page';
-import { nextLink, readCursor, writeCursor } from '../http/cursor';
+import { nextLink, readPlace, writePlace } from '../http/cursor';
 import { operation } from '../http/operation';
 
 /** A scientist computes and has no keys. */
 const keepers = { roles: ['admin', 'developer'] } as const;
 
 const json = 'application/json';
-const position = z.tuple([z.iso.datetime(), z.uuid()]);
 const params = z.strictObject({
   id: z.uuid().meta({
     description: 'Identifier of the key’s row.',
@@ -50,11 +49,10 @@ export const listKeys = operation({
   produces: [json],
   examples: {},
   handle: async ({ query: { limit, cursor }, caller, services }) => {
-    const [createdAt, id] = cursor === undefined ? [] : readCursor(cursor, position);
-    const after = createdAt && id ? { createdAt: new Date(createdAt), id } : undefined;
+    const after = readPlace(cursor);
     const { items, hasMore } = await services.keyConsole.list(caller, { limit, after });
     const last = hasMore ? items.at(-1) : undefined;
-    const next = last && writeCursor([last.createdAt, last.id]);
+    const next = last && writePlace(last.createdAt, last.id);
     return {
       type: json,
       body: JSON.stringify({ items }),

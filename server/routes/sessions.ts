@@ -40,8 +40,8 @@ export const signIn = operation({
       answer: exampleAccount,
     },
   },
-  handle: async ({ body, address, services }) => {
-    const { account, ...session } = await services.sessions.signIn({ ...body, address });
+  handle: async ({ body, source, services }) => {
+    const { account, ...session } = await services.sessions.signIn({ ...body, ...source });
     return {
       type: json,
       body: JSON.stringify(account),
@@ -66,9 +66,9 @@ export const refreshSession = operation({
   produces: [json],
   refuses: ['sign-in-needed'],
   examples: {},
-  handle: async ({ refreshToken, services }) => {
+  handle: async ({ refreshToken, source, services }) => {
     if (refreshToken === undefined) throw notSignedIn();
-    const { account, ...session } = await services.sessions.refresh(refreshToken);
+    const { account, ...session } = await services.sessions.refresh(refreshToken, source);
     return { type: json, body: JSON.stringify(account), session };
   },
 });
@@ -85,7 +85,7 @@ export const signOut = operation({
   produces: [json],
   examples: {},
   handle: async ({ caller, services }) => {
-    await services.sessions.end(caller.sessionId);
+    await services.sessions.end(caller);
     return { session: 'ended' };
   },
 });

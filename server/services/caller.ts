@@ -7,6 +7,22 @@ export interface Member {
   readonly role: Role;
 }
 
+/** The call by which something is done. */
+export interface CallSource {
+  /** The peer's network address. */
+  readonly address: string;
+  /** As X-Request-Id answers it. */
+  readonly requestId: string;
+}
+
+/** Whoever does something, as far as is known; nothing is known of what the service does of itself. */
+export interface Actor extends Partial<CallSource> {
+  readonly organizationId?: string;
+  readonly personId?: string;
+  readonly keyId?: string;
+  readonly sessionId?: string;
+}
+
 interface Standing {
   /** What the caller is counted and logged as. */
   readonly name: string;
@@ -17,6 +33,7 @@ interface Standing {
 
 export interface KeyCaller extends Standing {
   readonly kind: 'key';
+  readonly keyId: string;
 }
 
 export interface SessionCaller extends Standing, Member {

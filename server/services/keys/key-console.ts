@@ -6,9 +6,11 @@ import { ApiKey } from '../../database/entities/api-key';
 import { Membership } from '../../database/entities/membership';
 import { Person } from '../../database/entities/person';
 import { Refusal } from '../../refusal';
-import type { Member } from '../caller';
+import { recordAct } from '../audit/record-act';
+import type { Actor, Member } from '../caller';
 import type { KeyDigests } from './key-digest';
 import { makeKey } from './key-format';
+import type { KeyNotices } from './key-notices';
 
 interface Row extends ApiKey {
   readonly issuer: { readonly id: string; readonly name: string };
@@ -18,19 +20,23 @@ interface Row extends ApiKey {
 /** Rows of one page, after the last row of the page before. */
 export interface Page {
   readonly limit: number;
-  readonly after?: { readonly createdAt: Date; readonly id: string } | undefined;
+  readonly after?: { readonly at: Date; readonly id: string } | undefined;
 }
+
+type KeyKeeper = Member & Actor;
 
 /** What people do with keys: an admin with all of the organization's, a developer with their own. */
 export class KeyConsole {
   constructor(
     private readonly database: DataSource,
     private readonly digests: KeyDigests,
+    /** Tells the admins, where mail is sent. */
+    private readonly notices?: KeyNotices,
     private readonly now: () => Date = () => new Date(),
   ) {}
 
   /** Issues a key. The key itself is in the answer and nowhere else. */
-  async issue(person: Member, wanted: KeyRequest): Promise<IssuedKey> {
+  async issue(person: KeyKeeper, wanted: KeyRequest): Promise<IssuedKey> {
     const beyond = wanted.scopes.filter((scope) => !scopesOfRole[person.role].includes(scope));
     if (beyond.length > 0) {
       throw new Refusal('role-insufficient', `Your role does not have ${beyond.join(', ')}.`);
@@ -40,7 +46,7 @@ export class KeyConsole {
     const id = randomUUID();
     const createdAt = this.now();
     const expiresAt = new Date(createdAt.getTime() + expiresInDays * 86_400_000);
-    await this.database.getRepository(ApiKey).insert({
+    const row = {
       id,
       publicId,
       organizationId: person.organizationId,
@@ -52,18 +58,22 @@ export class KeyConsole {
       expiresAt,
       revokedAt: null,
       lastUsedAt: null,
+    };
+    const shown = { publicId, name, scopes, expiresAt: expiresAt.toISOString() };
+    await this.database.transaction(async (manager) => {
+      await manager.insert(ApiKey, row);
+      await recordAct(manager, person, { act: 'key.issued', subjectId: id, details: shown });
+      await this.notices?.issued(manager, person, row, createdAt);
     });
-    return { id, key, publicId, name, scopes, expiresAt: expiresAt.toISOString() };
+    this.notices?.send();
+    return { id, key, ...shown };
   }
 
   /** Keys, newest first, and whether there are more. */
   async list(person: Member, page: Page): Promise<KeyList & { hasMore: boolean }> {
     const query = this.rows(person).limit(page.limit + 1);
     if (page.after) {
-      query.andWhere('(key.createdAt, key.id) < (:createdAt, :afterId)', {
-        createdAt: page.after.createdAt,
-        afterId: page.after.id,
-      });
+      query.andWhere('(key.createdAt, key.id) < (:at, :id)', page.after);
     }
     const rows = await this.fetch(query);
     const items = rows.slice(0, page.limit).map((row) => this.answer(row));
@@ -76,12 +86,26 @@ export class KeyConsole {
   }
 
   /** Revokes a key for good; done twice it is what it was. It is dead at its next call. */
-  async revoke(person: Member, id: string): Promise<KeyAnswer> {
+  async revoke(person: KeyKeeper, id: string): Promise<KeyAnswer> {
     const found = await this.find(person, id);
-    if (found.revokedAt !== null) return this.answer(found);
-    const revokedAt = this.now();
-    await this.database.getRepository(ApiKey).update({ id, revokedAt: IsNull() }, { revokedAt });
-    return this.answer({ ...found, revokedAt });
+    if (found.revokedAt === null) {
+      const { publicId, name } = found;
+      await this.database.transaction(async (manager) => {
+        const revokedAt = this.now();
+        const { affected } = await manager.update(
+          ApiKey,
+          { id, revokedAt: IsNull() },
+          { revokedAt },
+        );
+        // Somebody else was first: then that is the act.
+        if (affected === 0) return;
+        const details = { publicId, name };
+        await recordAct(manager, person, { act: 'key.revoked', subjectId: id, details });
+        await this.notices?.revoked(manager, person, found, revokedAt);
+      });
+      this.notices?.send();
+    }
+    return this.read(person, id);
   }
 
   private async find(person: Member, id: string): Promise<Row> {

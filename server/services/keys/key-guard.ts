@@ -41,6 +41,7 @@ export class KeyGuard {
       ok: true,
       caller: {
         kind: 'key',
+        keyId: found.id,
         name: `key:${found.publicId}`,
         organizationId: found.organizationId,
         scopes: new Set(found.scopes.filter((scope) => allowed.includes(scope))),

@@ -1,15 +1,23 @@
 import { randomUUID } from 'node:crypto';
-import { IsNull, type DataSource } from 'typeorm';
+import { IsNull, Not, type DataSource } from 'typeorm';
 import type { AccountAnswer } from '../../../shared/account';
 import { scopesOfRole } from '../../../shared/scopes';
 import { Person } from '../../database/entities/person';
 import { Session } from '../../database/entities/session';
 import { Refusal } from '../../refusal';
-import type { Member, SessionCaller } from '../caller';
+import type { Actor, CallSource, Member, SessionCaller } from '../caller';
 import type { AccessTokens } from './access-token';
 import { passwordIs } from './passwords';
 import { digestOf, makeRefreshToken, sessionOfToken } from './refresh-token';
 import type { Attempt, SignInThrottle } from './sign-in-throttle';
+import {
+  recordChoice,
+  recordLeaving,
+  recordOpening,
+  recordRefusal,
+  recordReuse,
+  recordSignOut,
+} from './session-acts';
 import { accountIn, firstPlace, roleIn } from './standing';
 
 /** Days that a session lives at most, however often it is refreshed. */
@@ -23,6 +31,9 @@ export interface Tokens {
 }
 
 type SignedIn = Tokens & { readonly account: AccountAnswer };
+type Place = Omit<Member, 'role'>;
+type Source = Partial<CallSource>;
+type SignIn = Attempt & Source & { readonly password: string };
 type Renewed = Partial<Tokens> & Omit<SignedIn, 'refresh'>;
 
 interface Parts {
@@ -31,6 +42,9 @@ interface Parts {
   readonly throttle: SignInThrottle;
   readonly now?: () => Date;
 }
+
+/** The nil UUID (RFC 9562 §5.9), which no person has. */
+const nobody = '00000000-0000-0000-0000-000000000000';
 
 /** Nobody is signed in, or no longer. */
 export const notSignedIn = () => new Refusal('sign-in-needed', 'Sign in, then try again.');
@@ -43,7 +57,7 @@ export class SessionService {
   }
 
   /** Signs in. Unknown person, wrong password and nowhere to belong are one and the same answer. */
-  async signIn({ password, ...attempt }: Attempt & { password: string }): Promise<SignedIn> {
+  async signIn({ password, ...attempt }: SignIn): Promise<SignedIn> {
     const { database, throttle } = this.parts;
     await throttle.check(attempt);
     const person = await database
@@ -53,19 +67,23 @@ export class SessionService {
       .where('lower(person.email) = lower(:email)', { email: attempt.email })
       .getOne();
     const right = await passwordIs(password, person?.passwordHash ?? null);
-    const place = person && right ? await firstPlace(database.manager, person.id) : undefined;
+    // Looked up for whoever it is, so that nobody can tell by the time who is known.
+    const place = await firstPlace(database.manager, person?.id ?? nobody);
     if (!person || !right || place === undefined) {
-      await throttle.failed(attempt);
+      if (await throttle.failed(attempt)) {
+        const refused = { personId: person?.id, organizationId: place, isRight: right };
+        await recordRefusal(database.manager, attempt, refused);
+      }
       throw new Refusal('sign-in-refused', 'The e-mail address or the password is not right.');
     }
-    return this.open(person.id, place);
+    return this.open({ personId: person.id, organizationId: place }, attempt);
   }
 
   /**
    * Renews both tokens. The token before, within ten seconds, is a race of two tabs and gets a new
    * access token alone. Any other token that names the session is a stolen one: the session ends.
    */
-  async refresh(token: string): Promise<Renewed> {
+  async refresh(token: string, source: Source = {}): Promise<Renewed> {
     const id = sessionOfToken(token);
     if (id === undefined) throw notSignedIn();
     const answer = await this.parts.database.transaction(async (manager) => {
@@ -78,6 +96,8 @@ export class SessionService {
       const account = await accountIn(manager, session.personId, session.organizationId);
       if (use === 'stolen' || !account) {
         await manager.update(Session, id, { endedAt: this.now() });
+        const record = use === 'stolen' ? recordReuse : recordLeaving;
+        await record(manager, session, source);
         return undefined;
       }
       const access = this.access(session);
@@ -101,10 +121,13 @@ export class SessionService {
   }
 
   /** Ends a session; its tokens are dead at their next use. */
-  async end(sessionId: string): Promise<void> {
-    await this.parts.database
-      .getRepository(Session)
-      .update({ id: sessionId, endedAt: IsNull() }, { endedAt: this.now() });
+  async end(caller: Actor & Pick<SessionCaller, 'sessionId'>): Promise<void> {
+    const { sessionId: id } = caller;
+    await this.parts.database.transaction(async (manager) => {
+      const change = { endedAt: this.now() };
+      const { affected } = await manager.update(Session, { id, endedAt: IsNull() }, change);
+      if (affected !== 0) await recordSignOut(manager, caller);
+    });
   }
 
   /** Who an access token speaks for now, or undefined where its session is over. */
@@ -132,24 +155,26 @@ export class SessionService {
     };
   }
 
-  async account({ personId, organizationId }: Omit<Member, 'role'>): Promise<AccountAnswer> {
+  async account({ personId, organizationId }: Place): Promise<AccountAnswer> {
     const account = await accountIn(this.parts.database.manager, personId, organizationId);
     if (!account) throw notSignedIn();
     return account;
   }
 
   /** Works in another organization of the same person from now on. */
-  async choose(
-    { sessionId, personId }: SessionCaller,
-    organizationId: string,
-  ): Promise<AccountAnswer> {
-    const account = await accountIn(this.parts.database.manager, personId, organizationId);
+  async choose(caller: Actor & SessionCaller, organizationId: string): Promise<AccountAnswer> {
+    const { manager } = this.parts.database;
+    const account = await accountIn(manager, caller.personId, organizationId);
     if (!account) throw new Refusal('not-found', 'You do not belong to such an organization.');
-    await this.parts.database.getRepository(Session).update(sessionId, { organizationId });
+    await manager.transaction(async (within) => {
+      const elsewhere = { id: caller.sessionId, organizationId: Not(organizationId) };
+      const { affected } = await within.update(Session, elsewhere, { organizationId });
+      if (affected !== 0) await recordChoice(within, caller, account.organization);
+    });
     return account;
   }
 
-  private async open(personId: string, organizationId: string) {
+  private async open({ personId, organizationId }: Place, source: Source) {
     const account = await this.account({ personId, organizationId });
     const id = randomUUID();
     const refresh = makeRefreshToken(id);
@@ -165,7 +190,10 @@ export class SessionService {
       expiresAt: new Date(now.getTime() + sessionDays * 86_400_000),
       endedAt: null,
     };
-    await this.parts.database.getRepository(Session).insert(session);
+    await this.parts.database.transaction(async (manager) => {
+      await manager.insert(Session, session);
+      await recordOpening(manager, session, source);
+    });
     return { account, refresh, access: this.access(session) };
   }
 

@@ -34,8 +34,13 @@ export class SignInThrottle {
     }
   }
 
-  async failed(attempt: Attempt): Promise<void> {
-    for (const [row] of this.rows(attempt)) await this.failures.increment(row);
+  /** Counts a failure; answers whether it is within both bounds, however many came at once. */
+  async failed(attempt: Attempt): Promise<boolean> {
+    let within = true;
+    for (const [row, most] of this.rows(attempt)) {
+      within = (await this.failures.increment(row)).totalHits <= most && within;
+    }
+    return within;
   }
 
   private rows({ email, address }: Attempt): [row: string, most: number][] {
