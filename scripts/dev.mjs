@@ -7,6 +7,7 @@ import {
 } from './lib/development.mjs';
 import { command, untilStopped } from './lib/lifetime.mjs';
 import { takeLock } from './lib/lock.mjs';
+import { openMail } from './lib/mail.mjs';
 import { requireNode } from './lib/node-version.mjs';
 import { installPackages } from './lib/packages.mjs';
 import { inLocal, inRoot } from './lib/paths.mjs';
@@ -28,11 +29,12 @@ await command(async () => {
   await step('Packages', installPackages);
   const secrets = await loadSecrets(inLocal('secrets.json'));
   const database = await openDatabase(given, secrets, lock);
+  const mail = await openMail(given);
   await step('Fonts', async () => void (await runNode([inRoot('scripts/fonts.mjs')])));
 
   const metroPort = await freePort(8081);
   const settings = { ...given, publicUrl: `http://localhost:${metroPort}` };
-  const env = developmentEnvironment(settings, secrets, database);
+  const env = developmentEnvironment(settings, secrets, { ...database, ...mail.variables });
   await prepareData(settings, env, sourceEntry);
   const server = await serveSource(settings, env);
   const metro = await startMetro(settings, metroPort);

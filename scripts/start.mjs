@@ -2,6 +2,7 @@ import { buildServer, buildWeb } from './lib/build.mjs';
 import { openDatabase } from './lib/database.mjs';
 import { command, untilStopped } from './lib/lifetime.mjs';
 import { takeLock } from './lib/lock.mjs';
+import { openMail } from './lib/mail.mjs';
 import { requireNode } from './lib/node-version.mjs';
 import { installPackages } from './lib/packages.mjs';
 import { inLocal } from './lib/paths.mjs';
@@ -26,13 +27,14 @@ await command(async () => {
   await step('Packages', installPackages);
   const secrets = await loadSecrets(inLocal('secrets.json'));
   const database = await openDatabase(settings, secrets, lock);
+  const mail = await openMail(settings);
   await step('Server', buildServer);
   await step('Web app', buildWeb);
 
-  const env = serverEnvironment(settings, secrets, database);
+  const env = serverEnvironment(settings, secrets, { ...database, ...mail.variables });
   await prepareData(settings, env, builtEntry);
   const server = await serve(settings, env);
-  say(whatNext(settings));
+  say(whatNext({ ...settings, mailUrl: mail.url }));
 
   const died = await Promise.race([untilStopped(), server.ended.then(server.died)]);
   if (died) throw died;

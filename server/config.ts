@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { parseNetwork, type Network } from './http/networks';
+import type { MailSettings } from './services/mail/mailer';
 
 const pepper = /^[1-9]\d*:[A-Za-z0-9_-]{43,}$/;
 
@@ -48,6 +49,10 @@ const environment = z
       .url({ protocol: /^https?$/, error: 'must be an http or https address' })
       .optional(),
     TRUSTED_PROXIES: networks.optional(),
+    SMTP_URL: z
+      .url({ protocol: /^smtps?$/, hostname: /./, error: 'must be an smtp:// or smtps:// address' })
+      .optional(),
+    MAIL_FROM: z.email('must be an e-mail address alone').optional(),
     DATABASE_URL: z.url({
       protocol: /^postgres(ql)?$/,
       error: 'must be a postgresql:// address',
@@ -61,6 +66,9 @@ const environment = z
   .superRefine((values, context) => {
     const refuse = (name: string, message: string) =>
       context.addIssue({ code: 'custom', path: [name], message });
+    if (values.SMTP_URL !== undefined && values.MAIL_FROM === undefined) {
+      refuse('MAIL_FROM', 'is required beside SMTP_URL');
+    }
     if (values.NODE_ENV === 'production') {
       if (values.PUBLIC_URL === undefined) refuse('PUBLIC_URL', 'is required in production');
     } else if (values.HOST !== '127.0.0.1') {
@@ -76,6 +84,8 @@ export interface Config {
   readonly publicUrl: string | undefined;
   /** Peers whose X-Forwarded-For is read; nobody's where none are named. */
   readonly trustedProxies: readonly Network[];
+  /** How mail is sent; undefined where none is. */
+  readonly mail: MailSettings | undefined;
   readonly databaseUrl: string;
   /** Peppers of API keys by version; the highest version makes new digests. */
   readonly keyPeppers: ReadonlyMap<number, Buffer>;
@@ -85,6 +95,11 @@ export interface Config {
   readonly logLevel: 'debug' | 'info' | 'warn' | 'error' | 'silent';
   readonly computeThreads: number | undefined;
 }
+
+const mailOf = ({ SMTP_URL, MAIL_FROM }: z.output<typeof environment>) =>
+  SMTP_URL === undefined || MAIL_FROM === undefined
+    ? undefined
+    : { smtpUrl: SMTP_URL, from: MAIL_FROM };
 
 /** The environment is wrong; the message names each variable and its reason. */
 export class ConfigError extends Error {}
@@ -107,6 +122,7 @@ export function readConfig(source: Readonly<Record<string, string | undefined>>)
     port: values.PORT,
     publicUrl: values.PUBLIC_URL?.replace(/\/+$/, ''),
     trustedProxies: values.TRUSTED_PROXIES ?? [],
+    mail: mailOf(values),
     databaseUrl: values.DATABASE_URL,
     keyPeppers: values.KEY_PEPPERS,
     sessionSecret: values.SESSION_SECRET,

@@ -8,8 +8,8 @@ import { isReady } from './serve.mjs';
 import { say, step } from './steps.mjs';
 
 /** TypeScript as it stands, by tsx; the app's origin is the public one, Metro hands calls on. */
-export const developmentEnvironment = (settings, secrets, database) => ({
-  ...serverEnvironment(settings, secrets, database),
+export const developmentEnvironment = (settings, secrets, opened) => ({
+  ...serverEnvironment(settings, secrets, opened),
   PUBLIC_URL: settings.publicUrl,
   TSX_TSCONFIG_PATH: 'server/tsconfig.json',
 });

@@ -9,7 +9,7 @@ import { say, step } from './steps.mjs';
 
 const leash = inRoot('scripts', 'lib', 'leash.mjs');
 
-/** /readyz is asked under the public name: the server refuses other hosts. */
+/** /readyz is asked under the public name, as callers will. */
 export const isReady = ({ host, port, publicUrl }) =>
   answers({ host, port, path: '/readyz', name: new URL(publicUrl).host });
 

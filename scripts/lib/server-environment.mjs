@@ -2,11 +2,11 @@ import { inLocal, inRoot } from './paths.mjs';
 
 /**
  * What the server is told, on top of what the caller's environment says: the caller's pepper and
- * public address win, and what leads to the database comes from whoever opened it.
+ * public address win, and what leads to database and mail comes from whoever opened them.
  */
-export const serverEnvironment = (settings, secrets, database) => ({
+export const serverEnvironment = (settings, secrets, opened) => ({
   ...process.env,
-  ...database,
+  ...opened,
   NODE_ENV: settings.mode,
   HOST: settings.host,
   PORT: String(settings.port),

@@ -16,6 +16,7 @@ const checks = {
   PUBLIC_URL: [(value) => isAddress(value, /^https?:$/), 'must be an http or https address'],
   DATABASE_URL: postgres,
   MIGRATION_DATABASE_URL: postgres,
+  SMTP_URL: [(value) => isAddress(value, /^smtps?:$/), 'must be an smtp:// or smtps:// address'],
 };
 
 /**
@@ -42,5 +43,6 @@ export function readSettings(env) {
     publicUrl: given('PUBLIC_URL') ?? `http://localhost:${port}`,
     databaseUrl: given('DATABASE_URL'),
     migrationUrl: given('MIGRATION_DATABASE_URL'),
+    smtpUrl: given('SMTP_URL'),
   };
 }

@@ -22,12 +22,17 @@ ${people.join('\n')}
 }
 
 /** What to do now that it serves. */
-export function whatNext({ publicUrl, mode }) {
+export function whatNext({ publicUrl, mode, mailUrl }) {
   const key = demoKeyFile();
   const call = existsSync(key) ? firstCall(publicUrl, relative(root, key)) : '';
   return `
   Open ${publicUrl}
-  The API's own page is ${publicUrl}/docs
+  The API's own page is ${publicUrl}/docs${
+    mailUrl
+      ? `
+  E-mail is kept at ${mailUrl} and sent nowhere`
+      : ''
+  }
 ${mode === 'production' ? '' : demoPeople()}${call}
   The log is in .local/server.log. Ctrl-C stops everything that was started.`;
 }

@@ -43,6 +43,7 @@ export async function startTestServer({
     port: 0,
     publicUrl: undefined,
     trustedProxies: [],
+    mail: undefined,
     databaseUrl: appUrl,
     keyPeppers: new Map([[1, randomBytes(32)]]),
     sessionSecret: randomBytes(32),
@@ -61,7 +62,7 @@ export async function startTestServer({
   const database = await createDataSource(url).initialize();
   await migrate(database, appRole);
   await seedDemo(database);
-  const services = createServices(database, config, 'http://localhost');
+  const services = createServices({ database, config, publicUrl: 'http://localhost' });
   const key = await demoKeyFor(services, undefined);
   const start = () => startServer(config, createLogger('info', sink));
   const server = await start();
