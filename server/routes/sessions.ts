@@ -40,8 +40,9 @@ export const signIn = operation({
       answer: exampleAccount,
     },
   },
-  handle: async ({ body, source, services }) => {
-    const { account, ...session } = await services.sessions.signIn({ ...body, ...source });
+  handle: async ({ body, source, signal, services }) => {
+    const attempt = { ...body, ...source };
+    const { account, ...session } = await services.sessions.signIn(attempt, signal);
     return {
       type: json,
       body: JSON.stringify(account),

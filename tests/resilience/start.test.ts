@@ -3,7 +3,9 @@ import { existsSync } from 'node:fs';
 import { readFile, stat } from 'node:fs/promises';
 import { connect, createServer, type AddressInfo, type Server } from 'node:net';
 import { Client } from 'pg';
+import { demoPassword } from '../../server/services/demo/demo-data';
 import { createTestDatabase, type TestDatabase } from '../support/database';
+import { rawCall, statusIn } from '../support/raw-call';
 import { makeCheckout, runScript, type Checkout, type Command } from './checkout';
 
 let checkout: Checkout;
@@ -60,6 +62,19 @@ async function serverOf({ child }: Command): Promise<number> {
   return Number(pid);
 }
 
+/** Signs a demo person in, as a browser would. Answers what POSTs as that person. */
+async function signedInAt(url: string, email: string) {
+  const post = (address: string, body: string, cookie = '') =>
+    fetch(url + address, {
+      method: 'POST',
+      headers: { Origin: url, 'Content-Type': 'application/json', Cookie: cookie },
+      body,
+    });
+  const answer = await post('/v1/sessions', JSON.stringify({ email, password: demoPassword }));
+  const cookies = answer.headers.getSetCookie().map((cookie) => cookie.split(';')[0]);
+  return (address: string, body: string) => post(address, body, cookies.join('; '));
+}
+
 test('PORT=abc stops the start with the name and the reason', async () => {
   const run = start({ PORT: 'abc' });
   expect(await run.ended).toBe(1);
@@ -104,6 +119,38 @@ test('a start’s first call is answered with the key that it points to', async 
     body,
   });
   expect(response.status).toBe(200);
+  expect(await interrupt(run)).toBe(0);
+});
+
+test('a start’s mail goes nowhere: it is read at the address that the start names, by nobody elsewhere', async () => {
+  const run = await serving();
+  const [, mailPort] = /E-mail is kept at http:\/\/localhost:(\d+)/.exec(run.output()) ?? [];
+  const page = `http://localhost:${mailPort}/`;
+  expect(await (await fetch(page)).text()).toBe('No mail yet.\n');
+  const key = (await readFile(checkout.path('.local', 'demo-key'), 'utf8')).trim();
+  const developer = await signedInAt(`http://localhost:${port}`, 'developer@larkmoor.example');
+  const body = JSON.stringify({ name: 'lims', scopes: ['compute'] });
+  expect((await developer('/v1/keys', body)).status).toBe(201);
+  // The page is told of a mail before the server hears that it was taken: the row is gone after.
+  const client = new Client({ connectionString: database.url });
+  await client.connect();
+  for (let left = 1; left > 0;) {
+    const { rows } = await client.query<{ left: number }>(
+      'SELECT count(*)::int AS left FROM mail_outbox',
+    );
+    left = rows[0]?.left ?? 0;
+  }
+  await client.end();
+  const asJson = { headers: { Accept: 'application/json' } };
+  const [mail, ...others] = await (await fetch(page, asJson)).json();
+  expect(others).toEqual([]);
+  expect(mail).toMatchObject({
+    to: ['admin@larkmoor.example'],
+    text: expect.stringContaining('lims'),
+  });
+  expect(mail.text).not.toContain(key);
+  const rebound = await rawCall(page, ['GET / HTTP/1.1', `Host: evil.example:${mailPort}`]);
+  expect([statusIn(rebound), rebound.includes('lims')]).toEqual([404, false]);
   expect(await interrupt(run)).toBe(0);
 });
 

@@ -56,8 +56,11 @@ export class SessionService {
     this.now = parts.now ?? (() => new Date());
   }
 
-  /** Signs in. Unknown person, wrong password and nowhere to belong are one and the same answer. */
-  async signIn({ password, ...attempt }: SignIn): Promise<SignedIn> {
+  /**
+   * Signs in. Unknown person, wrong password and nowhere to belong are one and the same answer. The
+   * signal tells that the caller has gone, and no password is hashed for nobody.
+   */
+  async signIn({ password, ...attempt }: SignIn, signal?: AbortSignal): Promise<SignedIn> {
     const { database, throttle } = this.parts;
     await throttle.check(attempt);
     const person = await database
@@ -66,7 +69,7 @@ export class SessionService {
       .addSelect('person.passwordHash')
       .where('lower(person.email) = lower(:email)', { email: attempt.email })
       .getOne();
-    const right = await passwordIs(password, person?.passwordHash ?? null);
+    const right = await passwordIs(password, person?.passwordHash ?? null, signal);
     // Looked up for whoever it is, so that nobody can tell by the time who is known.
     const place = await firstPlace(database.manager, person?.id ?? nobody);
     if (!person || !right || place === undefined) {
