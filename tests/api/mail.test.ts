@@ -217,6 +217,16 @@ describe('a post office', () => {
     expect(await rows()).toEqual([]);
   });
 
+  test('sends nothing unencrypted to a server that may be another machine', async () => {
+    const before = mail.taken.length;
+    await leave();
+    // The same server under a name of 127.0.0.1 that is not known for one.
+    const smtpUrl = mail.settings.smtpUrl.replace('127.0.0.1', '127.1');
+    await office({ ...mail.settings, smtpUrl }).drain();
+    expect(mail.taken).toHaveLength(before);
+    expect((await rows())[0]?.last_error).toMatch(/STARTTLS/);
+  });
+
   test('that died with a mail in its hands leaves it to the next, under the same Message-ID', async () => {
     await leave();
     const dying = office();

@@ -1,4 +1,6 @@
-import { openMailbox, type ReceivedMail } from '../../scripts/lib/mailbox.mjs';
+const scripts = () => import('../../scripts/lib/mailbox.mjs');
+type Open = Awaited<ReturnType<typeof scripts>>['openMailbox'];
+type ReceivedMail = Parameters<Parameters<Open>[0]>[0];
 
 export interface TestMail {
   /** What the server under test is told. */
@@ -14,6 +16,7 @@ export interface TestMail {
 
 /** A real SMTP server on a free port, whose messages are read here. */
 export async function startTestMail(): Promise<TestMail> {
+  const { openMailbox } = await scripts();
   const taken: ReceivedMail[] = [];
   const waiting = new Set<() => void>();
   const { url, close } = await openMailbox(async (mail) => {
