@@ -1,6 +1,7 @@
 import type { Warning } from '../../shared/model';
 import { Notice } from '../ui/notice';
 import { Words } from '../ui/words';
+import { WithFormulas } from './with-formulas';
 
 const titles: Readonly<Record<Warning['code'], string>> = {
   'inverted-constants': 'Computed as given',
@@ -24,7 +25,7 @@ export function Warnings({ warnings }: { readonly warnings: readonly Warning[] }
   return warnings.map(({ code, message, pointer }) => (
     <Notice key={`${code} ${pointer} ${message}`} tone="warn" title={titles[code]}>
       <Words kind="help" tone="ink">
-        {message.replace(/-(?=\d)/g, '\u2212')}
+        <WithFormulas text={message} />
       </Words>
     </Notice>
   ));

@@ -11,7 +11,11 @@ import type { Mixture } from './use-mixture';
 import { shownAmount, shownCapacity, shownPerDegree, shownPH, shownShift } from './rounded';
 
 /** The pH, large, and what goes with it. */
-export function AnswerHead({ answered, trialPH }: Pick<Mixture, 'answered' | 'trialPH'>) {
+export function AnswerHead({
+  answered,
+  call,
+  trialPH,
+}: Pick<Mixture, 'answered' | 'call' | 'trialPH'>) {
   const { colours } = useTheme();
   const { rail, readOutAside } = useLayout();
   if (!answered) return null;
@@ -20,7 +24,9 @@ export function AnswerHead({ answered, trialPH }: Pick<Mixture, 'answered' | 'tr
   return (
     <View style={[styles.head, rail && styles.wide, { borderBottomColor: colours.edge }]}>
       <View>
-        <Words kind="label">pH of this mixture</Words>
+        <Words kind="label" tone={call.error ? 'warn' : 'ink'}>
+          {call.error ? 'pH of the mixture before' : 'pH of this mixture'}
+        </Words>
         <Numerals size={64} tone="well">
           {shownPH(answer.pH)}
         </Numerals>

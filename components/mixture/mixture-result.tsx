@@ -37,7 +37,7 @@ export function MixtureResult({ mixture, plotHeight, compact, figure }: MixtureR
       {!answered && call.isFetching && <Skeleton label="The pH is being computed" lines={8} />}
       {answered && (
         <>
-          <AnswerHead answered={answered} trialPH={trialPH} />
+          <AnswerHead answered={answered} call={call} trialPH={trialPH} />
           <Announced answered={answered} />
           <Warnings warnings={answered.answer.model.warnings} />
           {answered.asked.body.components?.length === 0 && (
@@ -47,9 +47,9 @@ export function MixtureResult({ mixture, plotHeight, compact, figure }: MixtureR
           )}
         </>
       )}
-      <CapacityPlot {...mixture} height={plotHeight} compact={compact} figure={figure} />
       {answered && (
         <>
+          <CapacityPlot answered={answered} height={plotHeight} compact={compact} figure={figure} />
           <SpeciesTable answered={answered} />
           <IonsTable answered={answered} />
           <CopyDigits answered={answered} />

@@ -1,6 +1,6 @@
 import { View } from 'react-native';
 import type { Shortcut } from '../../shared/mixtures';
-import { trueMinus } from '../curves/rounded';
+import { WithFormulas } from '../answer/with-formulas';
 import { Numerals } from '../ui/numerals';
 import { Quantity } from '../ui/quantity';
 import { space } from '../ui/theme';
@@ -38,7 +38,9 @@ export function Shortcuts({ answered: { answer } }: { readonly answered: Answere
               {component && `${componentTitle(component)}: `}
               {rules[name]} gives pH <Numerals>{pH}</Numerals>, which is <Off error={error} />.
             </Words>
-            <Words kind="help">{trueMinus(why)}</Words>
+            <Words kind="help">
+              <WithFormulas text={why} />
+            </Words>
           </View>
         );
       })}
