@@ -31,12 +31,14 @@ function component(
 }
 
 /** KH2PO4 and Na2HPO4, 0.025 mol/L each, by Davies at 25 °C, as /v1/mixtures answers. */
-const phosphate = component('phosphoric acid', 0, '0.05', [
-  '0.000007299943430299538',
-  '0.4999897206399115',
-  '0.4999972072481209',
-  '0.000005772168537297620',
-]);
+const phosphateOf = (total: string) =>
+  component('phosphoric acid', 0, total, [
+    '0.000007299943430299538',
+    '0.4999897206399115',
+    '0.4999972072481209',
+    '0.000005772168537297620',
+  ]);
+const phosphate = phosphateOf('0.05');
 const water = { hydrogen: '1.701074525130779e-7', hydroxide: '9.752536425460782e-8' };
 const pH = 6.876459120162433;
 
@@ -76,7 +78,6 @@ describe('the capacity around an answer', () => {
   });
 });
 
-const half = (form: string): Component => ({ ...phosphate, total: '0.025', name: form });
 const answered = {
   asked: {
     body: {
@@ -95,7 +96,7 @@ const answered = {
     hydrogenActivityCoefficient: '0.78',
     hydroxideActivityCoefficient: '0.78',
     bufferCapacity: '0.02878593987453230',
-    components: [half('phosphoric acid'), half('phosphoric acid')],
+    components: [phosphateOf('0.025'), phosphateOf('0.025')],
     ions: [{ ion: null, charge: 2, concentration: '0.1', activityCoefficient: '0.37' }],
   },
 } as unknown as Answered;
