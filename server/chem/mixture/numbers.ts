@@ -162,7 +162,3 @@ export function stateNumbers(root: Root, digits: number): { pH: string; ionicStr
   });
   return { pH, ionicStrength: ionic };
 }
-
-/** pH alone, for differences. */
-export const pHOf = (root: Root, precision: number): Decimal =>
-  root.solvedTo(precision + root.loss).u.log(10);
