@@ -121,7 +121,7 @@ export function fittingStrengths(balance: Balance, doubles: DoubleBalance): Fitt
     const I = end * depth * ratio ** i;
     const here: Point = { I, over: excess(I) };
     if (!Number.isFinite(here.over)) return { ok: false, reason: 'no-ionic-strength' };
-    if (before && turns(before, last, here)) {
+    if (before && before.I > 0 && turns(before, last, here)) {
       const middle = across(excess, before.I, I);
       if (middle !== undefined) {
         values.push(between(excess, before.I, middle), between(excess, middle, I));
