@@ -184,11 +184,12 @@ function pairs({ ionPairs }: ResolvedMixture, inert: readonly InertContent[]): P
 }
 
 /** What is in the flask. Refused with `invalid-request` where its parts do not fit each other. */
-export function contentsOf(request: ResolvedMixture): Contents {
+export function contentsOf(
+  request: ResolvedMixture,
+  placeOf = (index: number) => `/components/${index}`,
+): Contents {
   const components = request.components.map((component, i) =>
-    'heldBy' in component
-      ? held(component, `/components/${i}`)
-      : weighed(component, `/components/${i}`),
+    'heldBy' in component ? held(component, placeOf(i)) : weighed(component, placeOf(i)),
   );
   const inert = together([
     ...components.flatMap((one) =>
