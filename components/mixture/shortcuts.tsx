@@ -18,7 +18,12 @@ const rules: Readonly<Record<Shortcut['name'], React.ReactNode>> = {
       pH = ½({pKa} {'\u2212'} lg <Quantity of="concentration" />)
     </>
   ),
-  'weak-base-root': <>the root formula of a weak base</>,
+  'weak-base-root': (
+    <>
+      pH = ½(
+      <Quantity of="pKw" /> + {pKa} + lg <Quantity of="concentration" />)
+    </>
+  ),
 };
 
 /** Which shortcuts of the trade would have been wrong here, by how much, and why. */

@@ -24,8 +24,8 @@ export const answers = (page: Page, pH: string): Promise<void> =>
 export const row = (page: Page, name: string): Locator =>
   page.getByRole('group', { name, exact: true });
 
-/** Chooses an option of a select by its words. */
-export async function choose(within: Page | Locator, label: string, option: RegExp | string) {
+/** Chooses an option of a select, as it is said. */
+export async function choose(within: Page | Locator, label: string, option: RegExp) {
   const box = within.getByRole('combobox', { name: label, exact: true });
   await box.click();
   await box.page().getByRole('option', { name: option }).click();
