@@ -42,6 +42,8 @@ export interface PairContent {
   readonly ion: string;
   readonly charge: number;
   readonly lgK: string;
+  /** Whether it is ours, of 25 °C, and not the caller’s. */
+  readonly isRecalled: boolean;
   readonly concentration: string;
 }
 
@@ -179,7 +181,8 @@ function pairs({ ionPairs }: ResolvedMixture, inert: readonly InertContent[]): P
       const detail = 'Give lg K: it is known here of Ca^2+ alone.';
       throw misfit('missing', `${pointer}/lgK`, detail);
     }
-    return { ion, charge: present.charge, lgK: constant, concentration: present.concentration };
+    const { charge, concentration } = present;
+    return { ion, charge, lgK: constant, isRecalled: lgK === undefined, concentration };
   });
 }
 

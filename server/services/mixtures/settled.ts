@@ -6,6 +6,7 @@ import { noAnswer } from '../chemistry/refuse';
 import { type SystemUsed, systemUsed } from '../chemistry/system-used';
 import { type AtTemperature, balanceOf, henryConstantAt } from './balance-of';
 import { type Contents, contentsOf, type ResolvedMixture } from './contents';
+import { ionWarnings } from './ion-warnings';
 
 /** A mixture ready to be computed, and where its constants come from. */
 export interface SettledMixture {
@@ -54,6 +55,7 @@ export function settledMixture(
     },
   };
   const warnings: Warning[] = systems.flatMap((used) => used.warnings);
+  warnings.push(...ionWarnings(contents, conditions));
   if (ionicStrength !== 'self-consistent') {
     warnings.push(...rangeWarnings(conditions, Number(ionicStrength)));
   }
