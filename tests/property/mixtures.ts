@@ -4,9 +4,9 @@ import {
   type ActivityChoice,
   type Balance,
   type ConstantKind,
-  type InertIon,
   waterAt,
 } from '../../server/chem';
+import type { InertIon } from '../../server/chem/mixture/balance';
 import { decimalOf, decimalWithin } from './generators';
 import { Wide } from './oracle';
 
