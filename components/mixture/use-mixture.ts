@@ -65,5 +65,3 @@ function useFlask(state: MixtureState, change: (part: Partial<MixtureState>) => 
       ),
   };
 }
-
-export type Flask = ReturnType<typeof useFlask>;
