@@ -32,6 +32,7 @@ async function copied(page: Page, button: string) {
 describe('what leaves the screen', () => {
   test('the CSV is the curve as it was fetched', async () => {
     const { page } = await openCurves(server, wide);
+    await page.getByRole('table', { name: 'Maxima of buffer capacity' }).waitFor();
     await page.getByRole('button', { name: 'Export' }).click();
     const { name, bytes } = await download(page, 'Numbers (CSV)');
     expect(name).toBe('Phosphoric-acid.csv');
