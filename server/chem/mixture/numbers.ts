@@ -91,7 +91,10 @@ function valuesOf(problem: Balance, { balance, u, at, state }: SolvedBalance) {
     ...acids.flatMap(({ acid, fractions, gammas, total }) => [
       { value: total, exact: !acid.held },
       ...fractions.flatMap((one, j) => [
-        solved(one.times(total)),
+        // A gas holds this very concentration.
+        acid.held && j === acid.reference
+          ? given(new context(acid.amount))
+          : solved(one.times(total)),
         solved(one),
         solved(nth(gammas, j)),
       ]),
