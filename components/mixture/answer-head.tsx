@@ -5,6 +5,7 @@ import { Quantity } from '../ui/quantity';
 import { Raised } from '../ui/raised';
 import { space, useTheme } from '../ui/theme';
 import { useLayout } from '../ui/use-layout';
+import { useLong } from '../ui/use-settled';
 import { webStyle } from '../ui/web-style';
 import { Words } from '../ui/words';
 import type { Mixture } from './use-mixture';
@@ -18,6 +19,7 @@ export function AnswerHead({
 }: Pick<Mixture, 'answered' | 'call' | 'trialPH'>) {
   const { colours } = useTheme();
   const { rail, readOutAside } = useLayout();
+  const isLate = useLong(call.isFetching);
   if (!answered) return null;
   const { answer } = answered;
   const concentrationPH = shownPH(answer.pHOfConcentration);
@@ -25,7 +27,11 @@ export function AnswerHead({
     <View style={[styles.head, rail && styles.wide, { borderBottomColor: colours.edge }]}>
       <View>
         <Words kind="label" tone={call.error ? 'warn' : 'ink'}>
-          {call.error ? 'pH of the mixture before' : 'pH of this mixture'}
+          {call.error
+            ? 'pH of the mixture before'
+            : isLate
+              ? 'pH of this mixture is coming'
+              : 'pH of this mixture'}
         </Words>
         <Numerals size={64} tone="well">
           {shownPH(answer.pH)}

@@ -4,7 +4,7 @@ import { DataTable } from '../ui/data-table';
 import { Disclosure } from '../ui/disclosure';
 import { space } from '../ui/theme';
 import { CapacityFigure } from './capacity-figure';
-import { conditionsInFigure } from './conditions-text';
+import { conditionsInFigure, ConditionsLine } from './conditions-text';
 import { describeCapacity } from './describe';
 import type { Answered } from './mixture-queries';
 import { drawnCapacity, type DrawnCapacity } from './drawn-capacity';
@@ -39,6 +39,7 @@ export function CapacityPlot({ answered, height, compact, figure }: CapacityPlot
           />
         )}
       </View>
+      {compact && <ConditionsLine answered={answered} />}
       <CapacityNumbers drawn={drawn} />
     </View>
   );

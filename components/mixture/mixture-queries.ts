@@ -53,8 +53,6 @@ export function useMixtureAnswer(asked: MixtureAsked | undefined) {
   return {
     ...query,
     answered: useLast(query.data),
-    /** What is shown is what stands in the flask, and not what stood there before. */
-    isCurrent: query.data !== undefined && settled === wanted,
   };
 }
 

@@ -4,7 +4,7 @@ import type { Conditions } from '../../shared/conditions';
 import { Exact } from '../../shared/decimal';
 import type { PublicMixtureRequestInput } from '../../shared/mixtures';
 import { systemAsked, type Choice } from '../constants/choice';
-import { ammonium } from './counter-ions';
+import { ammonium, counterIonOf } from './counter-ions';
 import { electrolyteOf } from './electrolytes';
 import { formOf, unchargedForm, type KnownSystem } from './known-system';
 import type { ElectrolytePart, MixtureState, WeighedPart } from './mixture-state';
@@ -56,7 +56,7 @@ function weighed(part: WeighedPart, system: KnownSystem | undefined): ComponentA
       { system: ammonia, form: ammoniaForm, concentration: times(concentration, -charge) },
     ];
   }
-  const isOwn = counterIon !== undefined && charge !== 0;
+  const isOwn = charge !== 0 && counterIonOf(charge, counterIon) === counterIon;
   return [{ ...asked, form, ...(isOwn && { counterIon }) }];
 }
 

@@ -68,6 +68,17 @@ describe('the call of a mixture', () => {
     expect(asked?.components).toEqual([0, 0]);
   });
 
+  test.each([0, 1])(
+    'leaves out chloride with form %i of an acid, which has no use for it',
+    (form) => {
+      const part = { choice: stored('phosphoric-acid'), form, concentration: '0.05' };
+      const asked = mixtureAsked(flask({ parts: [{ ...part, counterIon: 'Cl^-' }] }), known);
+      expect(asked?.body.components).toEqual([
+        { system: { id: 'phosphoric-acid' }, concentration: '0.05', form },
+      ]);
+    },
+  );
+
   test('names the ions of salts, the pairs of calcium, the air over the flask', () => {
     const asked = mixtureAsked(
       flask({
