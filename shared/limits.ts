@@ -44,8 +44,8 @@ export const pointsWorth = {
     water: 20,
     leastDigits: 30,
     /** Ions by which each of these models’ work doubles. */
-    interactionIons: 200,
-    pitzerIons: 25,
+    interactionIons: 100,
+    pitzerIons: 20,
   },
   capacityMaxima: 100,
   root: 60,
