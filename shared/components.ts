@@ -79,6 +79,3 @@ export const heldComponent = z
 export const component = z
   .union([weighedComponent, heldComponent])
   .meta({ id: 'Component', description: 'A component, weighed in or held by a gas phase.' });
-
-export type Component = z.infer<typeof component>;
-export type WeighedComponent = z.infer<typeof weighedComponent>;

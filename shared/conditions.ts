@@ -89,5 +89,4 @@ export const conditions = z.strictObject(conditionsShape).meta({
 
 export type Conditions = z.infer<typeof conditions>;
 export type ActivityModel = z.infer<typeof activityModel>;
-export type Basis = z.infer<typeof basis>;
 export type OutOfRange = z.infer<typeof outOfRange>;

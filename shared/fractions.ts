@@ -129,7 +129,6 @@ export const manyFractionsAnswer = z
   .meta({ id: 'ManyFractionsAnswer', description: 'Species fractions of several systems.' });
 
 export type FractionsRequest = z.infer<typeof fractionsRequest>;
-export type FractionsQuery = z.infer<typeof fractionsQuery>;
 export type FractionsRequestInput = z.input<typeof fractionsRequest>;
 export type PublicFractionsRequestInput = z.input<typeof publicFractionsRequest>;
 export type FractionPoint = z.infer<typeof point>;

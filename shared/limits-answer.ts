@@ -1,9 +1,13 @@
 import { z } from 'zod';
 import { limits, pointsWorth } from './limits';
 
+const { mixture, capacityMaxima, root } = pointsWorth;
 const costFormula =
   'cost = sum over systems of points × (protons + 1) × (digits + 20); ' +
-  `a mixture counts as ${pointsWorth.mixture} points, with 4 species for the water, maxima of a buffer capacity as ${pointsWorth.capacityMaxima} more, an isoelectric point or a pH for a fraction as ${pointsWorth.root} (with the isoionic point as a mixture)`;
+  `maxima of a buffer capacity count as ${capacityMaxima} more points, an isoelectric point or a pH for a fraction as ${root}. ` +
+  `A solution of a mixture, or an isoionic point, counts as (${mixture.points} + ${mixture.pointsPerProton} × most protons of a system) points × (species and ions + ${mixture.water}) × (digits, at least ${mixture.leastDigits}, + 20), ` +
+  `by specific-ion-interaction × (1 + species and ions / ${mixture.interactionIons}), by pitzer × (1 + species and ions / ${mixture.pitzerIons}); ` +
+  `where dpH/dT is known, four solutions with ${mixture.leastDigits} digits are added`;
 const unitFormula = `computeUnits = ceil(cost / ${limits.costOfOneUnit})`;
 
 const count = (description: string, example: number) => z.int().meta({ description, example });

@@ -33,11 +33,23 @@ export const costOf = (points: number, species: number, digits: number) =>
   points * species * (digits + 20);
 
 /**
- * Points that a question without points is worth: how often a mixture is evaluated until all its
- * digits are there, its change with temperature included; the search for maxima of a capacity; a
- * root of a system alone.
+ * Points that a question without points is worth: a solution of a mixture’s charge balance, with
+ * what it is counted by; the search for maxima of a capacity; a root of a system alone.
  */
-export const pointsWorth = { mixture: 150, capacityMaxima: 100, root: 20 } as const;
+export const pointsWorth = {
+  mixture: {
+    points: 35,
+    pointsPerProton: 3,
+    /** Species that the water and the search count as. */
+    water: 20,
+    leastDigits: 30,
+    /** Ions by which each of these models’ work doubles. */
+    interactionIons: 100,
+    pitzerIons: 20,
+  },
+  capacityMaxima: 100,
+  root: 60,
+} as const;
 
 /** Compute units of a cost: one for each 10,000 begun. */
 export const computeUnitsOf = (cost: number) => Math.ceil(cost / limits.costOfOneUnit);

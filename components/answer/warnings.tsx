@@ -1,6 +1,7 @@
 import type { Warning } from '../../shared/model';
 import { Notice } from '../ui/notice';
 import { Words } from '../ui/words';
+import { WithFormulas } from './with-formulas';
 
 const titles: Readonly<Record<Warning['code'], string>> = {
   'inverted-constants': 'Computed as given',
@@ -19,13 +20,28 @@ const titles: Readonly<Record<Warning['code'], string>> = {
   'parameters-of-another-temperature': 'Parameters of another temperature',
 };
 
-/** What to know about a figure that was computed, in the answer's words. */
+/** What to know about a figure that was computed, in the answer's words: one notice, however many. */
 export function Warnings({ warnings }: { readonly warnings: readonly Warning[] }) {
-  return warnings.map(({ code, message, pointer }) => (
-    <Notice key={`${code} ${pointer} ${message}`} tone="warn" title={titles[code]}>
-      <Words kind="help" tone="ink">
-        {message.replace(/-(?=\d)/g, '\u2212')}
-      </Words>
+  const [first, ...others] = warnings;
+  if (!first) return null;
+  if (others.length === 0) {
+    return (
+      <Notice tone="warn" title={titles[first.code]}>
+        <Words kind="help" tone="ink">
+          <WithFormulas text={first.message} />
+        </Words>
+      </Notice>
+    );
+  }
+  return (
+    <Notice tone="warn" title={`${warnings.length} things to know`}>
+      {warnings.map(({ code, message, pointer }) => (
+        <Words key={`${code} ${pointer} ${message}`} kind="help" tone="ink">
+          <Words kind="label">{titles[code]}</Words>
+          {'. '}
+          <WithFormulas text={message} />
+        </Words>
+      ))}
     </Notice>
-  ));
+  );
 }

@@ -39,6 +39,9 @@ interface CapacityPanelProps {
 export const capacityScale = (rect: Rect, top: number) =>
   linearScale([0, top], [bottom(rect), rect.y]);
 
+/** A part below this share of the axis is not drawn: no bundle of dashes on the zero line. */
+const penDown = 0.004;
+
 const strokes = { whole: 2.25, ghost: 1.25 } as const;
 
 /** Buffer capacity over pH, clipped at the top, with its maxima marked. */
@@ -52,7 +55,7 @@ export function CapacityPanel(props: CapacityPanelProps) {
       const { key, pH, values, kind, style } = line;
       const dash = kind === 'ghost' ? ghostDash(ghosts.indexOf(line)) : undefined;
       const points = values.map((value, i) => ({ x: x(pH[i] ?? 0), y: value }));
-      const clipped = clipCurve(points, [0, top]);
+      const clipped = clipCurve(points, [style ? top * penDown : 0, top]);
       const d = linePath(clipped.map((point) => ({ ...point, y: y(point.y) })));
       return { key, kind, style, dash, d };
     });

@@ -25,7 +25,8 @@ export interface ConditionFaults {
 /** The service's words, without what only a caller of the API can do: a button does it here. */
 export const saidHere = (detail: string) =>
   detail
-    .replace(/,? or "outOfRange": "compute"\./, '.')
+    .replace(/,? or "outOfRange": "compute"[^.]*\./, '.')
+    .replace(', give constants for this one.', ' or give constants for this one.')
     .replace('"activityModel": "ideal"', 'the ideal model')
     .replace(/-(?=\d)/g, '\u2212');
 

@@ -1,17 +1,19 @@
 import { memo, useMemo } from 'react';
 import { TSpan } from 'react-native-svg';
 import { CapacityPanel, capacityScale, type CapacityLine } from '../chart/capacity-panel';
-import type { Rect } from '../chart/geometry';
+import { right, type Rect } from '../chart/geometry';
 import type { Scale } from '../chart/scale';
 import { betaSign, concentrationSign } from '../chart/symbols';
 import { totalInWords } from './total-in-words';
 import { fonts } from '../ui/theme';
 import { BesideNames } from './beside-names';
-import { capacityTop, type Capacity } from './capacity';
+import { capacityTop, expectedTop, type Capacity } from './capacity';
 import type { FigureExtras } from './figure-extras';
 
 interface CapacityCurveProps {
   readonly extras: FigureExtras;
+  /** mol/L. */
+  readonly total: number;
   readonly rect: Rect;
   readonly x: Scale;
   readonly compact: boolean;
@@ -22,7 +24,7 @@ interface CapacityCurveProps {
 
 /** Buffer capacity of the system at its total, over pH. */
 export const CapacityCurve = memo(function CapacityCurve(props: CapacityCurveProps) {
-  const { extras, rect, x, compact, placing, named } = props;
+  const { extras, total, rect, x, compact, placing, named } = props;
   const { capacity, beside } = extras;
   const lines = useMemo(() => {
     const ghosts = beside.flatMap(({ name, capacity: other }): CapacityLine[] =>
@@ -45,15 +47,14 @@ export const CapacityCurve = memo(function CapacityCurve(props: CapacityCurvePro
       ),
     };
   }, [capacity, beside, rect, x]);
-  if (!capacity || !px) return null;
   return (
     <>
       <CapacityPanel
         rect={rect}
         x={x}
-        top={capacityTop(capacity)}
+        top={capacity ? capacityTop(capacity) : expectedTop(total)}
         lines={lines}
-        maxima={capacity.maxima.filter(({ pH }) => x(pH) >= rect.x && x(pH) <= rect.x + rect.width)}
+        maxima={capacity?.maxima.filter(({ pH }) => x(pH) >= rect.x && x(pH) <= right(rect)) ?? []}
         inside={compact}
         head={
           <>
@@ -61,12 +62,12 @@ export const CapacityCurve = memo(function CapacityCurve(props: CapacityCurvePro
             {compact ? ' at ' : ' buffer capacity at '}
             {concentrationSign}
             {' = '}
-            <TSpan fontFamily={fonts.numbers}>{totalInWords(capacity.total)}</TSpan>
+            <TSpan fontFamily={fonts.numbers}>{totalInWords(capacity?.total ?? total)}</TSpan>
             {' mmol/L, in mmol/L per pH'}
           </>
         }
       />
-      {named && <BesideNames rect={rect} {...px} placing={placing} />}
+      {named && px && <BesideNames rect={rect} {...px} placing={placing} />}
     </>
   );
 });

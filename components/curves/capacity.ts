@@ -76,7 +76,14 @@ const lonePeak = Math.LN10 / 4;
 export function capacityTop({ maxima, total, pH }: Capacity): number {
   const [from = 0, to = 14] = [pH[0], pH[pH.length - 1]];
   const drawn = maxima.filter((peak) => peak.pH >= from && peak.pH <= to);
-  const highest = Math.max(lonePeak * total * perMole, ...drawn.map(({ value }) => value));
+  return topOver(Math.max(lonePeak * total * perMole, ...drawn.map(({ value }) => value)));
+}
+
+/** The same while only the total is known, mol/L. */
+export const expectedTop = (total: number): number => topOver(lonePeak * total * perMole);
+
+/** The next round number above. */
+function topOver(highest: number): number {
   const power = 10 ** Math.floor(Math.log10(highest));
   return (tops.find((top) => top * power >= highest * 1.02) ?? 10) * power;
 }

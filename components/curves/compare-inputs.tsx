@@ -32,27 +32,29 @@ export function CompareInputs({ state, others, drawn, extras, change }: Curves) 
             <View style={styles.head}>
               <View style={styles.title}>
                 <Disclosure label={title} startsOpen={index === added}>
-                  <SystemCombobox
-                    label="System"
-                    value={known === undefined ? '' : systemTitle(known)}
-                    onPick={(id) => setAt(index, { ...asked, choice: { kind: 'stored', id } })}
-                    onTypeOwn={() =>
-                      setAt(index, {
-                        ...asked,
-                        choice: drawn ? { kind: 'typed', system: drawn.system } : state.choice,
-                      })
-                    }
-                  />
-                  <ConditionFields
-                    conditions={asked.conditions}
-                    onChange={(part) =>
-                      setAt(index, {
-                        ...asked,
-                        conditions: changedConditions(asked.conditions, part),
-                      })
-                    }
-                    error={other?.error ?? null}
-                  />
+                  <View style={styles.fields}>
+                    <SystemCombobox
+                      label="System"
+                      value={known === undefined ? '' : systemTitle(known)}
+                      onPick={(id) => setAt(index, { ...asked, choice: { kind: 'stored', id } })}
+                      onTypeOwn={() =>
+                        setAt(index, {
+                          ...asked,
+                          choice: drawn ? { kind: 'typed', system: drawn.system } : state.choice,
+                        })
+                      }
+                    />
+                    <ConditionFields
+                      conditions={asked.conditions}
+                      onChange={(part) =>
+                        setAt(index, {
+                          ...asked,
+                          conditions: changedConditions(asked.conditions, part),
+                        })
+                      }
+                      error={other?.error ?? null}
+                    />
+                  </View>
                 </Disclosure>
               </View>
               <Button
@@ -86,5 +88,6 @@ const styles = StyleSheet.create({
   list: { gap: space[2] },
   head: { flexDirection: 'row', alignItems: 'flex-start', gap: space[1] },
   title: { flex: 1, minWidth: 0 },
+  fields: { gap: space[2] },
   add: { alignItems: 'flex-start' },
 });

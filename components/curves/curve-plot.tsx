@@ -1,7 +1,7 @@
 import type { Ref } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { Empty } from '../ui/empty';
-import { useTheme } from '../ui/theme';
+import { space, useTheme } from '../ui/theme';
 import { useLong } from '../ui/use-settled';
 import { Words } from '../ui/words';
 import type { Layer } from './curves-state';
@@ -33,12 +33,16 @@ export function CurvePlot({ curves, layers, ...figure }: CurvePlotProps) {
       total={Number(state.total)}
       onMove={move}
     >
-      {empty && <Empty title="Nothing is drawn">Choose a layer to draw it over the pH axis.</Empty>}
-      {!drawn && curve.error && !empty && (
-        <Empty title="Nothing is drawn yet">
-          The curve asked for was refused; change what is asked.
-        </Empty>
-      )}
+      <View style={figure.compact && styles.inside}>
+        {empty && (
+          <Empty title="Nothing is drawn">Choose a layer to draw it over the pH axis.</Empty>
+        )}
+        {!drawn && curve.error && !empty && (
+          <Empty title="Nothing is drawn yet">
+            The curve asked for was refused; change what is asked.
+          </Empty>
+        )}
+      </View>
       {late && (
         <View role="status" style={[styles.late, { backgroundColor: colours.page }]}>
           <Words kind="help">The new curve is being computed</Words>
@@ -49,5 +53,6 @@ export function CurvePlot({ curves, layers, ...figure }: CurvePlotProps) {
 }
 
 const styles = StyleSheet.create({
+  inside: { marginHorizontal: space[4] },
   late: { position: 'absolute', top: 0, right: 16 },
 });

@@ -76,7 +76,9 @@ export function CurvesFigure(props: CurvesFigureProps) {
             />
           )}
           {panels.charge && <ChargeLine {...lines} beside={beside} rect={panels.charge} />}
-          {panels.capacity && <CapacityCurve {...lines} extras={extras} rect={panels.capacity} />}
+          {panels.capacity && (
+            <CapacityCurve {...lines} extras={extras} total={total} rect={panels.capacity} />
+          )}
           {panels['lg-c'] && (
             <LgCLines {...named} rect={panels['lg-c']} total={total} capacity={capacity} />
           )}

@@ -44,7 +44,7 @@ export const firstState: CurvesState & { readonly choice: StoredChoice } = {
   choice: firstChoice,
   conditions: firstConditions,
   pH: '7.40',
-  layers: ['fractions', 'predominance', 'charge'],
+  layers: ['fractions', 'predominance', 'charge', 'capacity'],
   view: 'fractions',
   total: '0.05',
   beside: [],

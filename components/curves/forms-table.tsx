@@ -7,6 +7,7 @@ import { space, useTheme } from '../ui/theme';
 import { Words } from '../ui/words';
 import type { DrawnCurve } from './drawn-curve';
 import type { Reading } from './follow-curve';
+import { rowsAtMost } from './folded';
 import { FormRow } from './read-out-row';
 import { trueMinus } from './rounded';
 
@@ -17,7 +18,6 @@ interface FormsTableProps {
 }
 
 /** A system with more forms than this shows only those worth a row, and the rest when asked. */
-const rowsAtMost = 8;
 const worthARow = 0.001;
 
 /** The forms in order of charge, with their fractions; the greatest is bold and never moved. */

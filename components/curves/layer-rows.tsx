@@ -7,6 +7,7 @@ import { capacityAt, hydrogenAt, hydroxideAt, type Capacity } from './capacity';
 import type { DrawnCurve } from './drawn-curve';
 import type { Reading } from './follow-curve';
 import { lgConcentration, shownLg } from './lg-c';
+import { Folded, rowsAtMost } from './folded';
 import { ValueRow } from './read-out-row';
 import { shownCapacity, trueMinus } from './rounded';
 import { totalInWords } from './total-in-words';
@@ -51,19 +52,21 @@ export function HoldsBest({
           <Quantity of="beta" /> has no maximum here: it only grows towards strong acid and base.
         </Words>
       ) : (
-        <View role="table" aria-label="Maxima of buffer capacity">
-          {peaks.map(({ pH, value }) => (
-            <ValueRow
-              key={pH}
-              label={
-                <Words>
-                  at pH <Numerals>{pH.toFixed(2)}</Numerals>
-                </Words>
-              }
-              value={shownCapacity(value)}
-            />
-          ))}
-        </View>
+        <Folded label={`Show all ${peaks.length} maxima`} fold={peaks.length > rowsAtMost}>
+          <View role="table" aria-label="Maxima of buffer capacity">
+            {peaks.map(({ pH, value }) => (
+              <ValueRow
+                key={pH}
+                label={
+                  <Words>
+                    at pH <Numerals>{pH.toFixed(2)}</Numerals>
+                  </Words>
+                }
+                value={shownCapacity(value)}
+              />
+            ))}
+          </View>
+        </Folded>
       )}
     </View>
   );

@@ -11,7 +11,7 @@ const gives: Readonly<Record<ScreenRequest['key'], string>> = {
 
 /** The call that is looked at, and which it is where the screen is made of several. */
 export function useScreenRequest({ state, shown, drawn, curve }: Curves) {
-  const [chosen, setChosen] = useState<ScreenRequest['key']>('curve');
+  const [chosen, setChosen] = useState<ScreenRequest['key']>();
   const grid = curve.isCurrent ? drawn?.grid : undefined;
   const { choice, conditions, total } = state;
   const requests = useMemo(
@@ -22,7 +22,9 @@ export function useScreenRequest({ state, shown, drawn, curve }: Curves) {
       ),
     [choice, conditions, total, shown, grid],
   );
-  const { key, request } = requests.find((one) => one.key === chosen) ?? requests[0];
+  // A phone's view of capacity is about capacity.
+  const ofView = shown[0] === 'capacity' ? 'capacity' : 'curve';
+  const { key, request } = requests.find((one) => one.key === (chosen ?? ofView)) ?? requests[0];
   return {
     request,
     gives: gives[key],

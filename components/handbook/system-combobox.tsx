@@ -16,8 +16,8 @@ interface SystemComboboxProps {
   readonly value: string;
   readonly onPick: (id: string) => void;
   readonly onTypeOwn: () => void;
-  /** It was asked for a moment ago: the next key is its. */
-  readonly startsFocused?: boolean;
+  /** It was asked for a moment ago: the next key is its, and what may be chosen is in sight. */
+  readonly startsOpen?: boolean;
 }
 
 interface Typing {
@@ -39,21 +39,21 @@ export function SystemCombobox({
   value,
   onPick,
   onTypeOwn,
-  startsFocused = false,
+  startsOpen = false,
 }: SystemComboboxProps) {
   const id = useId();
   const input = useRef<TextInput>(null);
   const latest = useRef<string>(undefined);
   const online = useOnline();
-  const [{ text, open, moved }, setTyping] = useState(resting);
+  const [{ text, open, moved }, setTyping] = useState({ ...resting, open: startsOpen });
   const [picked, setPicked] = useState('');
   const isTyped = text !== undefined && text.trim() !== '';
   const search = useSystemSearch(text ?? '', shownAtMost, open && isTyped);
   const isSlow = useLong(isTyped && online && !search.isCurrent && !search.error);
 
   useEffect(() => {
-    if (startsFocused) input.current?.focus();
-  }, [startsFocused]);
+    if (startsOpen) input.current?.focus();
+  }, [startsOpen]);
 
   const options = systemOptions(isTyped ? (search.systems ?? []) : undefined);
   const hasMatch = isTyped && search.isCurrent && options.length > 1;

@@ -40,7 +40,7 @@ export function AddComponent({ parts, onAdd }: AddComponentProps) {
         <SystemCombobox
           label="New component"
           value=""
-          startsFocused
+          startsOpen
           onPick={(id) => add({ kind: 'stored', id })}
           onTypeOwn={() => add({ kind: 'typed', system: plainSystem })}
         />

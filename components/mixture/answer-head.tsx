@@ -5,22 +5,34 @@ import { Quantity } from '../ui/quantity';
 import { Raised } from '../ui/raised';
 import { space, useTheme } from '../ui/theme';
 import { useLayout } from '../ui/use-layout';
+import { useLong } from '../ui/use-settled';
 import { webStyle } from '../ui/web-style';
 import { Words } from '../ui/words';
 import type { Mixture } from './use-mixture';
 import { shownAmount, shownCapacity, shownPerDegree, shownPH, shownShift } from './rounded';
 
 /** The pH, large, and what goes with it. */
-export function AnswerHead({ answered, trialPH }: Pick<Mixture, 'answered' | 'trialPH'>) {
+export function AnswerHead({
+  answered,
+  call,
+  trialPH,
+}: Pick<Mixture, 'answered' | 'call' | 'trialPH'>) {
   const { colours } = useTheme();
   const { rail, readOutAside } = useLayout();
+  const isLate = useLong(call.isFetching);
   if (!answered) return null;
   const { answer } = answered;
   const concentrationPH = shownPH(answer.pHOfConcentration);
   return (
     <View style={[styles.head, rail && styles.wide, { borderBottomColor: colours.edge }]}>
       <View>
-        <Words kind="label">pH of this mixture</Words>
+        <Words kind="label" tone={call.error ? 'warn' : 'ink'}>
+          {call.error
+            ? 'pH of the mixture before'
+            : isLate
+              ? 'pH of this mixture is coming'
+              : 'pH of this mixture'}
+        </Words>
         <Numerals size={64} tone="well">
           {shownPH(answer.pH)}
         </Numerals>

@@ -75,7 +75,7 @@ export function CapacityFigure(props: CapacityFigureProps) {
   };
   const taken = useTaken(rect, compact, dot);
   const pH = shownPH(String(drawn.at.pH)).replace('-', '\u2212');
-  const line = { x: cursor, top: own.top - 10, axis, width, text: pH };
+  const line = { x: cursor, top: own.top - 6, axis, width, text: pH };
   return (
     <View ref={ref} role="img" aria-label={sentence}>
       <Svg width={width} height={height} aria-hidden>
@@ -112,10 +112,14 @@ export function CapacityFigure(props: CapacityFigureProps) {
   );
 }
 
-/** Whether the whole rises with pH where the answer stands. */
+/** Room of the value beside its dot, pH. */
+const beside = 0.8;
+
+/** Whether the whole stands higher just after the answer's pH than just before it. */
 function rises({ pH, whole, at }: DrawnCapacity): boolean {
-  const next = pH.findIndex((value) => value > at.pH);
-  return (whole[next] ?? 0) > (whole[next - 1] ?? 0);
+  const most = (from: number, to: number) =>
+    Math.max(...whole.filter((_, i) => (pH[i] ?? 0) > from && (pH[i] ?? 0) < to));
+  return most(at.pH, at.pH + beside) > most(at.pH - beside, at.pH);
 }
 
 /** What is written in the panel before names are: the value at the pH, numerals inside it. */

@@ -45,7 +45,12 @@ export function CapacityNames({ drawn, rect, x, y, cursor, taken }: CapacityName
   const named = useMemo(() => {
     const { pH, top, parts } = drawn;
     const wanted = [
-      ...(parts.length > 1 ? [{ key: whole, title: 'all together', values: buffered(drawn) }] : []),
+      {
+        key: whole,
+        // Alone, a part is all there is; its name needs no second one.
+        title: parts.length > 1 ? 'all together' : '',
+        values: buffered(drawn),
+      },
       ...parts.map(({ title, series: key, values }) => ({
         key,
         title: shortened(title),

@@ -2,53 +2,45 @@ import { useMemo, useState, type Ref } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { DataTable } from '../ui/data-table';
 import { Disclosure } from '../ui/disclosure';
-import { Skeleton } from '../ui/skeleton';
 import { space } from '../ui/theme';
-import { Words } from '../ui/words';
 import { CapacityFigure } from './capacity-figure';
-import { conditionsInFigure } from './conditions-text';
+import { conditionsInFigure, ConditionsLine } from './conditions-text';
 import { describeCapacity } from './describe';
+import type { Answered } from './mixture-queries';
 import { drawnCapacity, type DrawnCapacity } from './drawn-capacity';
-import type { Mixture } from './use-mixture';
 import { shownAmount } from './rounded';
 
-interface CapacityPlotProps extends Pick<Mixture, 'capacity' | 'state'> {
+interface CapacityPlotProps {
+  readonly answered: Answered;
   readonly height: number;
   readonly compact: boolean;
   readonly figure: Ref<View>;
 }
 
 /** The place of the capacity curve: as wide as it finds, as high as it is told. */
-export function CapacityPlot({ capacity, state, height, compact, figure }: CapacityPlotProps) {
-  const { curve, isFetching, error } = capacity;
+export function CapacityPlot({ answered, height, compact, figure }: CapacityPlotProps) {
   const [width, setWidth] = useState(0);
-  const drawn = useMemo(() => curve && drawnCapacity(curve), [curve]);
+  const drawn = useMemo(() => drawnCapacity(answered), [answered]);
   return (
     <View>
       <View
         onLayout={({ nativeEvent }) => setWidth(Math.floor(nativeEvent.layout.width))}
         style={[{ minHeight: height }, compact && styles.edge]}
       >
-        {curve && drawn && width > 0 && (
+        {width > 0 && (
           <CapacityFigure
             ref={figure}
             drawn={drawn}
-            sentence={describeCapacity(drawn, curve.of)}
+            sentence={describeCapacity(drawn, answered)}
             width={width}
             height={height}
             compact={compact}
-            caption={conditionsInFigure(curve.of)}
+            caption={conditionsInFigure(answered)}
           />
         )}
-        {!curve && isFetching && <Skeleton label="The capacity is being computed" lines={6} />}
-        {!curve && error && <Words kind="help">The capacity curve could not be fetched.</Words>}
       </View>
-      {state.air !== undefined && (
-        <View style={compact ? undefined : styles.note}>
-          <Words kind="help">Without what the air takes up or gives off.</Words>
-        </View>
-      )}
-      {drawn && <CapacityNumbers drawn={drawn} />}
+      {compact && <ConditionsLine answered={answered} />}
+      <CapacityNumbers drawn={drawn} />
     </View>
   );
 }
@@ -91,5 +83,4 @@ function CapacityNumbers({ drawn }: { readonly drawn: DrawnCapacity }) {
 const styles = StyleSheet.create({
   // From gutter to gutter.
   edge: { marginHorizontal: -space[4] },
-  note: { marginLeft: 36 },
 });

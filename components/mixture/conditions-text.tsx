@@ -2,6 +2,8 @@ import { TSpan } from 'react-native-svg';
 import { Exact } from '../../shared/decimal';
 import { ionicStrengthSign } from '../chart/symbols';
 import { modelInShort } from '../conditions/activity-models';
+import { Numerals } from '../ui/numerals';
+import { Quantity } from '../ui/quantity';
 import { fonts } from '../ui/theme';
 import type { Answered } from './mixture-queries';
 
@@ -21,6 +23,18 @@ function conditionsOf({ answer }: Answered): readonly [string, string] {
 
 /** The conditions as plain text, for files. */
 export const conditionsText = (answered: Answered) => conditionsOf(answered).join('I');
+
+/** The conditions as a line of text. */
+export function ConditionsLine({ answered }: { readonly answered: Answered }) {
+  const [before, after] = conditionsOf(answered);
+  return (
+    <Numerals size={12} tone="inkSoft">
+      {before}
+      <Quantity of="ionicStrength" />
+      {after}
+    </Numerals>
+  );
+}
 
 /** The conditions inside a drawing. */
 export function conditionsInFigure(answered: Answered) {

@@ -4,6 +4,10 @@ import { chargeOf } from './salt-formula';
 /** The ion that a form is weighed in with where nothing is said, as the contract has it. */
 export const usualCounterIon = (charge: number) => (charge < 0 ? 'Na^+' : 'Cl^-');
 
+/** The counter-ion that a form of this charge has: the one chosen, where it is of the other sign. */
+export const counterIonOf = (charge: number, chosen: string | undefined) =>
+  chosen !== undefined && chargeOf(chosen) * charge < 0 ? chosen : usualCounterIon(charge);
+
 /**
  * Ammonium gives up protons itself. A salt of it is asked for as what it is made of, ammonia and
  * the uncharged acid: the composition is the same, and nothing of it is left out.

@@ -12,6 +12,13 @@ export interface PlacedFaults {
   readonly conditions: ConditionFaults;
 }
 
+/** The refusal with the faults alone that are of the conditions: others stand beside their rows. */
+function ofConditions(error: Error | null): Error | null {
+  if (!(error instanceof ProblemError)) return null;
+  const errors = error.problem.errors?.filter(({ pointer }) => pointer.startsWith('/conditions'));
+  return new ProblemError({ ...error.problem, errors: errors ?? [] });
+}
+
 /** Puts each fault of a refused call beside what it is about. */
 export function placeFaults(error: Error | null, asked: MixtureAsked | undefined): PlacedFaults {
   const parts = new Map<number, string>();
@@ -33,6 +40,9 @@ export function placeFaults(error: Error | null, asked: MixtureAsked | undefined
     strongAcid: flask.get('strongAcid'),
     strongBase: flask.get('strongBase'),
     air: flask.get('air'),
-    conditions: conditionFaults(error),
+    conditions: {
+      ...conditionFaults(ofConditions(error)),
+      passable: conditionFaults(error).passable,
+    },
   };
 }

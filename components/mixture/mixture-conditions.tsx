@@ -21,6 +21,7 @@ export function MixtureConditions({
 }: Pick<Mixture, 'state' | 'answered' | 'faults' | 'change'>) {
   const { temperature, model, ionicStrength, beyond } = state;
   const { colours } = useTheme();
+  const fault = faults.conditions.at.ionicStrength;
   const own = answered?.answer.ionicStrengthOfComposition;
   return (
     <View style={[styles.block, { borderTopColor: colours.rule }]}>
@@ -50,6 +51,7 @@ export function MixtureConditions({
           { value: 'given', label: 'Given' },
         ]}
         value={ionicStrength === undefined ? 'own' : 'given'}
+        {...(ionicStrength === undefined && fault !== undefined && { error: fault })}
         onChange={(kind) =>
           change({
             ionicStrength:
@@ -64,7 +66,7 @@ export function MixtureConditions({
           value={ionicStrength}
           onChange={(next) => change({ ionicStrength: next })}
           help="Sets the activity coefficients alone."
-          error={faults.conditions.at.ionicStrength}
+          error={fault}
         />
       )}
       <Disclosure label="More" startsOpen={beyond}>

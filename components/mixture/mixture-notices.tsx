@@ -28,9 +28,7 @@ export function MixtureNotices({ mixture }: { readonly mixture: Mixture }) {
       )}
       {online && failure && passable && (
         <Notice tone="warn" title="Beyond what is trusted">
-          {Object.values(faults.conditions.at).map((reason) => (
-            <Words key={reason}>{reason}</Words>
-          ))}
+          <Words>The reason stands beside what it is about.</Words>
           <View style={styles.all}>
             <Button label="Compute all the same" onPress={() => change({ beyond: true })} />
           </View>

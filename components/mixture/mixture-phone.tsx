@@ -38,7 +38,7 @@ export function MixturePhone({ mixture }: { readonly mixture: Mixture }) {
       dock={
         answered && (
           <Dock>
-            <DockedAnswer answered={answered} />
+            <DockedAnswer answered={answered} isOld={mixture.call.error !== null} />
           </Dock>
         )
       }
@@ -65,13 +65,19 @@ export function MixturePhone({ mixture }: { readonly mixture: Mixture }) {
   );
 }
 
+interface DockedAnswerProps {
+  readonly answered: Answered;
+  /** Of the mixture before: the present one was refused. */
+  readonly isOld: boolean;
+}
+
 /** The answer in one line. It is said where it stands in full. */
-function DockedAnswer({ answered: { answer } }: { readonly answered: Answered }) {
+function DockedAnswer({ answered: { answer }, isOld }: DockedAnswerProps) {
   return (
     <View aria-hidden style={styles.answer}>
       <Words kind="section">
-        pH{' '}
-        <Numerals size={24} tone="well">
+        {isOld ? 'pH before ' : 'pH '}
+        <Numerals size={24} tone={isOld ? 'inkSoft' : 'well'}>
           {shownPH(answer.pH)}
         </Numerals>
       </Words>

@@ -1,26 +1,17 @@
 import { useQueries, useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import type { BufferCapacityAnswer } from '../../shared/buffer-capacity';
 import type { MixtureAnswer } from '../../shared/mixtures';
 import { computeClient, patience, typingRest } from '../answer/compute-client';
 import type { Choice } from '../constants/choice';
 import { systemQuery } from '../handbook/handbook-queries';
 import { useSettled } from '../ui/use-settled';
-import { capacityGrid, rangeAround } from './capacity-grid';
 import { storedSystem, typedSystem, type KnownSystem } from './known-system';
-import type { MixtureAsked, SystemOf } from './mixture-request';
-import { capacityAsked, withTrialAcid } from './mixture-request';
+import { withTrialAcid, type MixtureAsked, type SystemOf } from './mixture-request';
 
 /** An answer with the call that it is of: they stay together while a new one is on its way. */
 export interface Answered {
   readonly asked: MixtureAsked;
   readonly answer: MixtureAnswer;
-}
-
-/** The capacity curve around an answer. */
-export interface CapacityCurve {
-  readonly of: Answered;
-  readonly capacity: BufferCapacityAnswer;
 }
 
 /** The stored systems in the flask, read from the handbook; `systemOf` is undefined until then. */
@@ -62,8 +53,6 @@ export function useMixtureAnswer(asked: MixtureAsked | undefined) {
   return {
     ...query,
     answered: useLast(query.data),
-    /** What is shown is what stands in the flask, and not what stood there before. */
-    isCurrent: query.data !== undefined && settled === wanted,
   };
 }
 
@@ -80,22 +69,4 @@ export function useTrialAcid(answered: Answered | undefined): string | undefined
     ...patience,
   });
   return data;
-}
-
-/** The capacity curve around the answer; the last one stays until the new one is there. */
-export function useCapacityCurve(answered: Answered | undefined) {
-  const query = useQuery({
-    queryKey: ['mixture capacity', answered?.asked, answered?.answer.ionicStrengthUsed],
-    enabled: answered !== undefined,
-    queryFn: async ({ signal }): Promise<CapacityCurve> => {
-      if (!answered) throw new Error('There is no answer to draw a curve around.');
-      const { asked, answer } = answered;
-      const species = answer.components.reduce((sum, one) => sum + one.species.length, 2);
-      const grid = capacityGrid(rangeAround(answer.pH), species);
-      const body = capacityAsked(asked.body, answer.ionicStrengthUsed, grid);
-      return { of: answered, capacity: await computeClient.publicBufferCapacity(body, { signal }) };
-    },
-    ...patience,
-  });
-  return { ...query, curve: useLast(query.data) };
 }

@@ -1,11 +1,10 @@
 import type { z } from 'zod';
-import type { PublicBufferCapacityRequestInput } from '../../shared/buffer-capacity';
 import type { component as componentSchema } from '../../shared/components';
 import type { Conditions } from '../../shared/conditions';
 import { Exact } from '../../shared/decimal';
 import type { PublicMixtureRequestInput } from '../../shared/mixtures';
 import { systemAsked, type Choice } from '../constants/choice';
-import { ammonium } from './counter-ions';
+import { ammonium, counterIonOf } from './counter-ions';
 import { electrolyteOf } from './electrolytes';
 import { formOf, unchargedForm, type KnownSystem } from './known-system';
 import type { ElectrolytePart, MixtureState, WeighedPart } from './mixture-state';
@@ -57,7 +56,7 @@ function weighed(part: WeighedPart, system: KnownSystem | undefined): ComponentA
       { system: ammonia, form: ammoniaForm, concentration: times(concentration, -charge) },
     ];
   }
-  const isOwn = counterIon !== undefined && charge !== 0;
+  const isOwn = charge !== 0 && counterIonOf(charge, counterIon) === counterIon;
   return [{ ...asked, form, ...(isOwn && { counterIon }) }];
 }
 
@@ -121,41 +120,13 @@ export const withTrialAcid = (body: PublicMixtureRequestInput): PublicMixtureReq
   strongAcid: new Exact(body.strongAcid ?? '0').plus(trialAcid).toFixed(),
 });
 
-/** A system that buffers, with all that was weighed in of it, in whatever forms. */
-export interface Buffering {
-  readonly system: ComponentAsked['system'];
-  readonly concentration: string;
-  /** Indices of `components` in the call and in its answer. */
-  readonly components: readonly number[];
-}
-
-/** What buffers in a call: each system once, in the order in which it first comes. */
-export function bufferingIn({ components = [] }: PublicMixtureRequestInput): Buffering[] {
-  const found = new Map<string, Buffering>();
+/** The places in a call's components of each system that was weighed in, once a system. */
+export function systemsIn({ components = [] }: PublicMixtureRequestInput): number[][] {
+  const found = new Map<string, number[]>();
   components.forEach((one, index) => {
     if (!('concentration' in one)) return;
     const key = JSON.stringify(one.system);
-    const { concentration = '0', components: others = [] } = found.get(key) ?? {};
-    found.set(key, {
-      system: one.system,
-      concentration: new Exact(concentration).plus(one.concentration).toFixed(),
-      components: [...others, index],
-    });
+    found.set(key, [...(found.get(key) ?? []), index]);
   });
   return [...found.values()];
 }
-
-/** The capacity curve around an answer, at the ionic strength that the answer was computed with. */
-export const capacityAsked = (
-  body: PublicMixtureRequestInput,
-  ionicStrength: string,
-  pH: { readonly from: string; readonly to: string; readonly step: string },
-): PublicBufferCapacityRequestInput => ({
-  components: bufferingIn(body).map(({ system, concentration }) => ({ system, concentration })),
-  pH,
-  conditions: { ...body.conditions, ionicStrength },
-  digits: capacityDigits,
-});
-
-/** Digits of the capacity curve: more than a screen can show, few enough to be quick. */
-export const capacityDigits = 6;

@@ -17,6 +17,7 @@ import { describeAnswer } from './describe';
 import { mixtureFigures, mixtureRows } from './mixture-csv';
 import type { Answered } from './mixture-queries';
 import { MixtureNotices } from './mixture-notices';
+import { shownAmount, shownPH } from './rounded';
 import { Shortcuts } from './shortcuts';
 import { IonsTable, SpeciesTable } from './species-table';
 import type { Mixture } from './use-mixture';
@@ -37,9 +38,10 @@ export function MixtureResult({ mixture, plotHeight, compact, figure }: MixtureR
       {!answered && call.isFetching && <Skeleton label="The pH is being computed" lines={8} />}
       {answered && (
         <>
-          <AnswerHead answered={answered} trialPH={trialPH} />
+          <AnswerHead answered={answered} call={call} trialPH={trialPH} />
           <Announced answered={answered} />
           <Warnings warnings={answered.answer.model.warnings} />
+          <OtherStates answered={answered} />
           {answered.asked.body.components?.length === 0 && (
             <Words tone="inkSoft">
               Nothing here holds the pH: a trace of carbon dioxide from the air would move it.
@@ -47,9 +49,9 @@ export function MixtureResult({ mixture, plotHeight, compact, figure }: MixtureR
           )}
         </>
       )}
-      <CapacityPlot {...mixture} height={plotHeight} compact={compact} figure={figure} />
       {answered && (
         <>
+          <CapacityPlot answered={answered} height={plotHeight} compact={compact} figure={figure} />
           <SpeciesTable answered={answered} />
           <IonsTable answered={answered} />
           <CopyDigits answered={answered} />
@@ -80,6 +82,16 @@ function Announced({ answered }: { readonly answered: Answered }) {
       {sentence}
     </div>
   );
+}
+
+/** The smallest of several ionic strengths is the answer; the others are told. */
+function OtherStates({ answered: { answer } }: { readonly answered: Answered }) {
+  return answer.otherIonicStrengths.map(({ ionicStrength, pH }) => (
+    <Words key={ionicStrength} tone="inkSoft">
+      An ionic strength of <Numerals>{shownAmount(ionicStrength)}</Numerals> mol/L fits too, with pH{' '}
+      <Numerals>{shownPH(pH)}</Numerals>.
+    </Words>
+  ));
 }
 
 function CopyDigits({ answered }: { readonly answered: Answered }) {

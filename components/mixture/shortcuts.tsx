@@ -1,6 +1,6 @@
 import { View } from 'react-native';
 import type { Shortcut } from '../../shared/mixtures';
-import { trueMinus } from '../curves/rounded';
+import { WithFormulas } from '../answer/with-formulas';
 import { Numerals } from '../ui/numerals';
 import { Quantity } from '../ui/quantity';
 import { space } from '../ui/theme';
@@ -18,7 +18,12 @@ const rules: Readonly<Record<Shortcut['name'], React.ReactNode>> = {
       pH = ½({pKa} {'\u2212'} lg <Quantity of="concentration" />)
     </>
   ),
-  'weak-base-root': <>the root formula of a weak base</>,
+  'weak-base-root': (
+    <>
+      pH = ½(
+      <Quantity of="pKw" /> + {pKa} + lg <Quantity of="concentration" />)
+    </>
+  ),
 };
 
 /** Which shortcuts of the trade would have been wrong here, by how much, and why. */
@@ -38,7 +43,9 @@ export function Shortcuts({ answered: { answer } }: { readonly answered: Answere
               {component && `${componentTitle(component)}: `}
               {rules[name]} gives pH <Numerals>{pH}</Numerals>, which is <Off error={error} />.
             </Words>
-            <Words kind="help">{trueMinus(why)}</Words>
+            <Words kind="help">
+              <WithFormulas text={why} />
+            </Words>
           </View>
         );
       })}

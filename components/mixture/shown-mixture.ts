@@ -3,7 +3,7 @@ import type { MixtureAnswer } from '../../shared/mixtures';
 import { genericFormulas } from '../curves/species-formulas';
 import { systemTitle } from '../handbook/system-title';
 import type { Answered } from './mixture-queries';
-import { bufferingIn } from './mixture-request';
+import { systemsIn } from './mixture-request';
 
 export interface ShownSpecies {
   readonly formula: string;
@@ -18,8 +18,8 @@ export interface ShownSpecies {
 export interface ShownSystem {
   readonly key: string;
   readonly title: string;
-  /** mol/L. */
-  readonly total: string;
+  /** As the answer has them, one for each time it was weighed in. */
+  readonly members: readonly MixtureAnswer['components'][number][];
   readonly species: readonly ShownSpecies[];
 }
 
@@ -38,7 +38,7 @@ export const componentTitle = ({ name }: MixtureAnswer['components'][number]) =>
 
 /** The systems of an answer: what was weighed in as several forms is one, as it is in the flask. */
 export function shownSystems({ asked, answer }: Answered): ShownSystem[] {
-  const weighed = bufferingIn(asked.body).map(({ components }) => components);
+  const weighed = systemsIn(asked.body);
   const once = new Set(weighed.flat());
   const others = answer.components.flatMap((_, index) => (once.has(index) ? [] : [[index]]));
   return [...weighed, ...others].flatMap((indices) => {
@@ -52,7 +52,7 @@ export function shownSystems({ asked, answer }: Answered): ShownSystem[] {
     return {
       key: indices.join(' '),
       title: componentTitle(first),
-      total: sum(members.map(({ total }) => total)),
+      members,
       species: first.species.map((one, at) => ({
         formula: one.formula ?? generic[at] ?? '',
         charge: one.charge,

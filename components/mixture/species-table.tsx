@@ -1,4 +1,5 @@
 import { View } from 'react-native';
+import { WithFormulas } from '../answer/with-formulas';
 import { DataTable, type Row } from '../ui/data-table';
 import { Formula } from '../ui/formula';
 import { Numerals } from '../ui/numerals';
@@ -46,7 +47,7 @@ export function SpeciesTable({ answered }: { readonly answered: Answered }) {
         {systems.map((system) => (
           <View key={system.key}>
             <Words kind="button" heading={3}>
-              {system.title}
+              <WithFormulas text={system.title} />
             </Words>
             <DataTable
               caption={`Forms of ${system.title}`}
@@ -73,7 +74,14 @@ export function SpeciesTable({ answered }: { readonly answered: Answered }) {
 const rowsOf = ({ key, title, species }: ShownSystem): Row[] =>
   species.map((one, index) => ({
     key: `${key} ${index}`,
-    component: index === 0 ? title : <span className="only-said">{title}</span>,
+    component:
+      index === 0 ? (
+        <Words>
+          <WithFormulas text={title} />
+        </Words>
+      ) : (
+        <span className="only-said">{title}</span>
+      ),
     ...cells(one, 14),
   }));
 

@@ -2,12 +2,7 @@ import { useState } from 'react';
 import { systemTitle } from '../handbook/system-title';
 import { useToast } from '../ui/toast';
 import { placeFaults } from './faults';
-import {
-  useCapacityCurve,
-  useKnownSystems,
-  useMixtureAnswer,
-  useTrialAcid,
-} from './mixture-queries';
+import { useKnownSystems, useMixtureAnswer, useTrialAcid } from './mixture-queries';
 import { mixtureAsked } from './mixture-request';
 import type { ElectrolytePart, MixtureState, WeighedPart } from './mixture-state';
 import { useAddress } from './use-address';
@@ -19,7 +14,6 @@ export function useMixture() {
   const asked = mixtureAsked(state, systemOf);
   const call = useMixtureAnswer(asked);
   const trialPH = useTrialAcid(call.answered);
-  const capacity = useCapacityCurve(call.answered);
   return {
     state,
     faulty,
@@ -30,7 +24,6 @@ export function useMixture() {
     call,
     answered: call.answered,
     trialPH,
-    capacity,
     faults: placeFaults(call.error, asked),
     change,
     flask: useFlask(state, change),
@@ -72,5 +65,3 @@ function useFlask(state: MixtureState, change: (part: Partial<MixtureState>) => 
       ),
   };
 }
-
-export type Flask = ReturnType<typeof useFlask>;

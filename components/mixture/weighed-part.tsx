@@ -11,10 +11,10 @@ import { Numerals } from '../ui/numerals';
 import { space, useTheme } from '../ui/theme';
 import { Words } from '../ui/words';
 import { concentrationAsked } from './asked-quantities';
-import { broughtOf, counterIonsFor, usualCounterIon } from './counter-ions';
+import { broughtOf, counterIonOf, counterIonsFor, usualCounterIon } from './counter-ions';
 import { formOf, unchargedForm, type KnownSystem } from './known-system';
 import type { WeighedPart as Part } from './mixture-state';
-import { chargeOf, saltFormula } from './salt-formula';
+import { saltFormula } from './salt-formula';
 
 interface WeighedPartProps {
   readonly part: Part;
@@ -75,10 +75,6 @@ interface FormProps {
   readonly system: KnownSystem;
   readonly onChange: (part: Part) => void;
 }
-
-/** The counter-ion that a form of this charge has: the one chosen, where it is of the other sign. */
-const counterIonOf = (charge: number, chosen: string | undefined) =>
-  chosen !== undefined && chargeOf(chosen) * charge < 0 ? chosen : usualCounterIon(charge);
 
 function FormChoice({ part, system, onChange }: FormProps) {
   const form = formOf(part.form, system);

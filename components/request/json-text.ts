@@ -12,15 +12,26 @@ function inline(value: unknown): string {
   return `{ ${Object.entries(value).map(pair).join(', ')} }`;
 }
 
+const isObject = (value: unknown) => typeof value === 'object' && value !== null;
+
+/** A list of objects has a line for each; anything else stands in one. */
+function member(value: unknown, indent: string): string {
+  const isList = Array.isArray(value) && value.length > 1 && value.every(isObject);
+  if (!isList) return inline(value);
+  const lines = value.map((one) => `${indent}    ${inline(one)}`);
+  return `[\n${lines.join(',\n')}\n${indent}  ]`;
+}
+
 const pair = ([key, value]: [string, unknown]) => `${scalar(key)}: ${inline(value)}`;
 
 /**
- * An object as JSON to be read: one member a line, further lines after `indent`. Strings hold no raw
- * control character, so that the text is at once valid JSON, Python and TypeScript.
+ * An object as JSON to be read: one member a line, lists of objects one object a line, further lines
+ * after `indent`. Strings hold no raw control character, so that the text is at once valid JSON,
+ * Python and TypeScript.
  */
 export function jsonText(value: object, indent = ''): string {
   const members = Object.entries(value)
-    .filter(([, member]) => member !== undefined)
-    .map((member) => `${indent}  ${pair(member)}`);
+    .filter(([, written]) => written !== undefined)
+    .map(([key, written]) => `${indent}  ${scalar(key)}: ${member(written, indent)}`);
   return `{\n${members.join(',\n')}\n${indent}}`;
 }

@@ -113,7 +113,8 @@ export function Field({
           onKeyPress={onKeyDown && ((event) => onKeyDown(event as unknown as FieldKey))}
           // The field keeps the focus after Enter, so that the next value can be typed at once.
           blurOnSubmit={false}
-          aria-label={hideLabel ? label : undefined}
+          // Also where the label stands over it: in a sheet it may be scrolled out of sight.
+          aria-label={label}
           aria-labelledby={hideLabel ? undefined : ids.label}
           aria-describedby={described || undefined}
           aria-invalid={invalid || undefined}

@@ -26,12 +26,12 @@ export { shownAs } from './activity/ion';
 export { specificInteractionAmong } from './activity/specific-interaction';
 export { pitzerAmong } from './activity/pitzer';
 
-export { type Acid, type Balance, type InertIon, ionsOf } from './mixture/balance';
+export { type Acid, type Balance, ionsOf } from './mixture/balance';
 export { type Equilibrium, equilibrium } from './mixture/equilibrium';
 export type { BalanceNumbers } from './mixture/numbers';
 
 export { type BufferSolution, waterExponents } from './capacity/solution';
-export { type BufferCapacityPoint, bufferCapacityPoints } from './capacity/buffer-capacity';
+export { bufferCapacityPoints } from './capacity/buffer-capacity';
 export { capacityMaxima } from './capacity/capacity-maxima';
 export { isoelectricPoint } from './points/isoelectric-point';
 export { pHForFraction } from './points/ph-for-fraction';

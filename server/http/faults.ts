@@ -31,15 +31,21 @@ const strangers = (issues: readonly Issue[]) =>
     0,
   );
 
+/** A number where one of the branches is a decimal: it is that decimal, whatever else it may be. */
+const isNumberForDecimal = ([first]: readonly Issue[]) =>
+  first !== undefined && first.path.length === 0 && codeOf(first) === 'decimal-must-be-string';
+
 /**
  * The branch of a union that the caller meant: of those that got past the outermost type, the one
  * with the fewest fields missing or unknown.
  */
 function meantBranch(branches: readonly (readonly Issue[])[]) {
-  const [meant] = branches
+  const [meant] = branches.filter(isNumberForDecimal);
+  if (meant) return meant;
+  const [nearest] = branches
     .filter(([first]) => first && !(first.code === 'invalid_type' && first.path.length === 0))
     .sort((one, other) => strangers(one) - strangers(other));
-  return meant ?? branches.find(([first]) => first && codeOf(first) === 'decimal-must-be-string');
+  return nearest;
 }
 
 function faultsOfIssue(issue: Issue, parents: Path): Fault[] {

@@ -34,9 +34,9 @@ const wrongBodies: [name: string, body: unknown, fault: string][] = [
   ],
   ['an unknown field', { system, pH: '7', digit: 5 }, '/digit unknown-field'],
   [
-    'conditions, which come later',
-    { system, pH: '7', conditions: {} },
-    '/conditions unknown-field',
+    'a condition that is none',
+    { system, pH: '7', conditions: { ionicstrength: '0.1' } },
+    '/conditions/ionicstrength unknown-field',
   ],
   [
     'a system both by id and in full',

@@ -55,6 +55,26 @@ describe.each([320, 390, 1280])('at %i px', (width) => {
         expect(await axeFaults(page)).toEqual([]);
       }
     });
+
+    test('axe finds nothing in the layers, a curve beside and a refusal', async () => {
+      const beside = 'with=system%3Dglycine%26T%3D37%26I%3D0.15';
+      const layers = 'layers=fractions,predominance,charge,capacity,lg-c,isoelectric-point';
+      const fragment = `system=glycine&I=0.1&pH=6.00&view=capacity&${layers}&${beside}`;
+      const { page } = await openCurves(server, view, fragment);
+      await page.getByRole('table', { name: 'Maxima of buffer capacity' }).waitFor();
+      await page.getByRole('table', { name: /^How far I 0\.15/ }).waitFor();
+      expect(await axeFaults(page)).toEqual([]);
+
+      if (!onRail) await page.getByRole('button', { name: /change the system/ }).click();
+      await page.getByRole('textbox', { name: 'Ionic strength' }).fill('5');
+      await page.getByRole('button', { name: 'Compute all the same' }).first().waitFor();
+      await page.getByRole('button', { name: /^I 0\.15/ }).click();
+      await page
+        .getByRole('group', { name: /^Compared with/ })
+        .getByText('Temperature')
+        .waitFor();
+      expect(await axeFaults(page)).toEqual([]);
+    });
   });
 });
 

@@ -176,7 +176,7 @@ describe('on a wide screen', () => {
 
   test('layers can be taken away and brought back', async () => {
     const { page } = await openCurves(server, wide);
-    for (const name of ['Fractions', 'Predominance', 'Mean charge']) {
+    for (const name of ['Fractions', 'Predominance', 'Mean charge', 'Buffer capacity']) {
       await page.getByRole('checkbox', { name }).click();
     }
     await page.getByText('Nothing is drawn').waitFor();

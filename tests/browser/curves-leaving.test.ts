@@ -32,14 +32,19 @@ async function copied(page: Page, button: string) {
 describe('what leaves the screen', () => {
   test('the CSV is the curve as it was fetched', async () => {
     const { page } = await openCurves(server, wide);
+    await page.getByRole('table', { name: 'Maxima of buffer capacity' }).waitFor();
     await page.getByRole('button', { name: 'Export' }).click();
     const { name, bytes } = await download(page, 'Numbers (CSV)');
     expect(name).toBe('Phosphoric-acid.csv');
     const rows = bytes.toString().split('\r\n');
-    expect(rows[0]).toBe('pH,H3PO4,H2PO4^-,HPO4^2-,PO4^3-,mean charge');
+    expect(rows[0]).toBe(
+      'pH,H3PO4,H2PO4^-,HPO4^2-,PO4^3-,mean charge,total/(mol/L),buffer capacity/(mol/L per pH),' +
+        'temperature/°C,ionic strength/(mol/L),activity model',
+    );
     expect(rows).toHaveLength(1 + 701 + 1);
+    // β = ln 10·(c(H⁺) + c(OH⁻) + c·v), v from the fractions of the row.
     expect(rows.find((row) => row.startsWith('7.40,'))).toBe(
-      '7.40,0.00000215937,0.385768,0.614223,0.00000689170,-1.614235',
+      '7.40,0.00000215937,0.385768,0.614223,0.00000689170,-1.614235,0.05,0.0272827,25,0,ideal',
     );
   });
 

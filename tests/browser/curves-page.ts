@@ -51,6 +51,14 @@ export const formRow = (page: Page, spoken: string): Locator =>
 export const showsValue = (page: Page, spoken: string, value: string): Promise<void> =>
   formRow(page, spoken).filter({ hasText: value }).waitFor();
 
+/** The read-out's row of a single figure, with its value. */
+export const valueRow = (page: Page, label: RegExp, value: string): Locator =>
+  page
+    .getByRole('table', { name: 'Mean charge and ratio at the cursor' })
+    .getByRole('row')
+    .filter({ hasText: label })
+    .filter({ hasText: value });
+
 /** Waits until the address's fragment is this. */
 export const fragmentIs = async (page: Page, fragment: string): Promise<void> => {
   await page.waitForFunction((wanted) => window.location.hash === `#${wanted}`, fragment);

@@ -112,7 +112,7 @@ describe('the address', () => {
     await page.getByRole('option', { name: /Glycine/ }).click();
     await page.getByRole('textbox', { name: 'pH' }).fill('9.5');
     await page.getByRole('checkbox', { name: 'Mean charge' }).click();
-    const fragment = 'system=glycine&pH=9.50&layers=fractions,predominance';
+    const fragment = 'system=glycine&pH=9.50&layers=fractions,predominance,capacity';
     await fragmentIs(page, fragment);
     await page.reload();
     await settled(page);

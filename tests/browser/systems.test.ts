@@ -222,7 +222,7 @@ describe('the list', () => {
     await page.getByText('Nothing is called “unobtainium”').waitFor();
     await page.getByRole('link', { name: 'Type your own constants in Curves' }).tap();
     await fragmentIs(page, 'charge=0&pKa=7&pH=7.40');
-    await title(page, 'Your constants: change the system');
+    await title(page, 'Your constants: change the system or its conditions');
   });
 
   test('offline says so, keeps what is there, and goes on afterwards', async () => {

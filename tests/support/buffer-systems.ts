@@ -1,6 +1,5 @@
-import { waterAt } from '../../server/chem';
 import thermodynamics from '../../server/database/handbook/sources/buffer-thermodynamics.json';
-import type { Component, Step } from './solutions';
+import { type Component, type Step, waterOf } from './solutions';
 
 /** Charge of the fully protonated species, and names under which the tables know the ions. */
 interface Protolyte {
@@ -37,7 +36,7 @@ const pairing = 1.3;
  * Ca²⁺ as the acid of its ion pair: Ca²⁺ + H₂O = CaOH⁺ + H⁺, pK = pKw − lg K.
  */
 const calcium = (c: number, temperature: number): Component => ({
-  pKa: [(Number(waterAt(String(temperature)).pKw) - pairing).toFixed(6)],
+  pKa: [(Number(waterOf(String(temperature)).pKw) - pairing).toFixed(6)],
   z0: 2,
   c,
   names: ['Ca^2+', 'CaOH^+'],

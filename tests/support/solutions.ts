@@ -46,14 +46,28 @@ function chargeOf(name: string): number {
   return Number(`${sign}${size || 1}`);
 }
 
+/** What a function gave for an argument, kept: a table asks for the same temperatures again and again. */
+function remembered<T>(of: (key: string) => T): (key: string) => T {
+  const known = new Map<string, T>();
+  return (key) => {
+    const found = known.get(key) ?? of(key);
+    known.set(key, found);
+    return found;
+  };
+}
+
+/** Water as the service prints it, by °C. */
+export const waterOf = remembered(waterAt);
+
+const moved = remembered((key) => {
+  const [celsius = '', pK = '', deltaH = '', deltaCp = ''] = key.split(' ');
+  return pKAt(celsius, { pK, deltaH, deltaCp });
+});
+
 const movedTo = (celsius: string, step: Step) =>
   typeof step === 'string'
     ? step
-    : pKAt(celsius, {
-        pK: step.pK,
-        deltaH: step.deltaH ?? '0',
-        deltaCp: step.deltaCp ?? '0',
-      });
+    : moved([celsius, step.pK, step.deltaH ?? '0', step.deltaCp ?? '0'].join(' '));
 
 /**
  * The charge balance of a solution, with thermodynamic constants at its temperature. Water’s pKw, A
@@ -68,7 +82,7 @@ export function balanceOf({
   ...given
 }: Description): Balance {
   const celsius = String(temperature);
-  const water = waterAt(celsius);
+  const water = waterOf(celsius);
   return {
     acids: acids.map(({ pKa, z0, c, names, form = 0, held = false }) => ({
       pKa: pKa.map((step) => movedTo(celsius, step)),
@@ -105,4 +119,4 @@ export function solved(description: Description, digits = 12): BalanceNumbers {
 }
 
 /** The pH of a solution. */
-export const pHOf = (description: Description): number => Number(solved(description).pH);
+export const pHOf = (description: Description): number => Number(solved(description, 8).pH);

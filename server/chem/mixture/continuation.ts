@@ -48,6 +48,51 @@ function between(excess: (I: number) => number, from: number, to: number): numbe
   return (low + high) / 2;
 }
 
+interface Point {
+  readonly I: number;
+  /** G(I) − I. */
+  readonly over: number;
+}
+
+/** Whether G/I − 1 keeps its sign from point to point, and is nearest to 0 in the middle. */
+function turns(before: Point, middle: Point, after: Point): boolean {
+  const [left, here, right] = [before, middle, after].map(({ I, over }) => over / I);
+  if (left === undefined || here === undefined || right === undefined) return false;
+  const sameSign = left > 0 === here > 0 && here > 0 === right > 0;
+  return sameSign && Math.abs(here) < Math.abs(left) && Math.abs(here) < Math.abs(right);
+}
+
+const golden = (Math.sqrt(5) - 1) / 2;
+/** Golden sections of a turn: its place is known to a millionth then, its height far better. */
+const mostSections = 30;
+
+/**
+ * A strength between two others at which G(I) − I has the other sign, where G/I turns between them:
+ * two roots close together are no change of sign from one point of a scan to the next.
+ */
+function across(excess: (I: number) => number, from: number, to: number): number | undefined {
+  const positive = excess(from) > 0;
+  const [start, span] = [Math.log(from), Math.log(to / from)];
+  const probe = (x: number) => {
+    const I = Math.exp(start + x * span);
+    return { I, distance: ((positive ? 1 : -1) * excess(I)) / I };
+  };
+  let [low, high] = [0, 1];
+  let [left, right] = [probe(1 - golden), probe(golden)];
+  for (let i = 0; i < mostSections; i++) {
+    if (left.distance < 0) return left.I;
+    if (right.distance < 0) return right.I;
+    if (left.distance < right.distance) {
+      [high, right] = [low + golden * (high - low), left];
+      left = probe(high - golden * (high - low));
+    } else {
+      [low, left] = [high - golden * (high - low), right];
+      right = probe(low + golden * (high - low));
+    }
+  }
+  return undefined;
+}
+
 /**
  * All ionic strengths I = G(I), where G is that of the composition whose activity coefficients
  * belong to I. Continued from I = 0, where G ≥ I, upwards: the first change of sign is the smallest
@@ -69,14 +114,21 @@ export function fittingStrengths(balance: Balance, doubles: DoubleBalance): Fitt
   const points = scanPoints + pointsPerProton * protons;
   const ratio = depth ** (-1 / points);
   const values: number[] = [];
-  let [last, atLast] = [0, excess(0)];
-  if (atLast <= 0) values.push(0);
+  let before: Point | undefined;
+  let last: Point = { I: 0, over: excess(0) };
+  if (last.over <= 0) values.push(0);
   for (let i = 0; i <= points; i++) {
     const I = end * depth * ratio ** i;
-    const here = excess(I);
-    if (!Number.isFinite(here)) return { ok: false, reason: 'no-ionic-strength' };
-    if (here > 0 !== atLast > 0) values.push(between(excess, last, I));
-    [last, atLast] = [I, here];
+    const here: Point = { I, over: excess(I) };
+    if (!Number.isFinite(here.over)) return { ok: false, reason: 'no-ionic-strength' };
+    if (before && before.I > 0 && turns(before, last, here)) {
+      const middle = across(excess, before.I, I);
+      if (middle !== undefined) {
+        values.push(between(excess, before.I, middle), between(excess, middle, I));
+      }
+    }
+    if (here.over > 0 !== last.over > 0) values.push(between(excess, last.I, I));
+    [before, last] = [last, here];
   }
   return values.length === 0 ? { ok: false, reason: 'no-ionic-strength' } : { ok: true, values };
 }

@@ -91,7 +91,10 @@ function valuesOf(problem: Balance, { balance, u, at, state }: SolvedBalance) {
     ...acids.flatMap(({ acid, fractions, gammas, total }) => [
       { value: total, exact: !acid.held },
       ...fractions.flatMap((one, j) => [
-        solved(one.times(total)),
+        // A gas holds this very concentration.
+        acid.held && j === acid.reference
+          ? given(new context(acid.amount))
+          : solved(one.times(total)),
         solved(one),
         solved(nth(gammas, j)),
       ]),
@@ -162,7 +165,3 @@ export function stateNumbers(root: Root, digits: number): { pH: string; ionicStr
   });
   return { pH, ionicStrength: ionic };
 }
-
-/** pH alone, for differences. */
-export const pHOf = (root: Root, precision: number): Decimal =>
-  root.solvedTo(precision + root.loss).u.log(10);

@@ -21,12 +21,12 @@ const pointer = '/conditions/activityModel';
  * range, unless the caller says compute.
  */
 export function rangeWarnings(
-  { activityModel, outOfRange, basis }: ConditionsUsed,
+  { activityModel, outOfRange, basis, ionicStrength: asked }: ConditionsUsed,
   ionicStrength: number,
 ): Warning[] {
   const end = usableTo(activityModel);
   if (end === undefined || ionicStrength <= Number(end)) return [];
-  const shown = Number(ionicStrength.toPrecision(3));
+  const shown = asked === 'self-consistent' ? Number(ionicStrength.toPrecision(3)) : asked;
   const message = `${names[activityModel]} is good to I = ${end} ${basis}; here I = ${shown} ${basis}.`;
   if (ionicStrength > 2 * Number(end) && outOfRange === 'refuse') {
     const help = 'Choose a model that reaches further, or "outOfRange": "compute".';
@@ -35,7 +35,10 @@ export function rangeWarnings(
   return [{ code: 'outside-model-range', message, pointer }];
 }
 
-/** The same of charges: |z| ≤ 6 in any model but the ideal one. */
+/**
+ * The same of charges: |z| ≤ 6 in any model but the ideal one. Pitzer’s model is not asked beyond at
+ * all: its mixing terms grow with z⁴, and with them the work.
+ */
 export function chargeWarnings(
   { activityModel, outOfRange }: ConditionsUsed,
   species: readonly SizedIon[],
@@ -44,8 +47,9 @@ export function chargeWarnings(
   const highest = Math.max(...species.map(({ charge }) => Math.abs(charge)));
   if (activityModel === 'ideal' || highest <= largestCharge) return [];
   const message = `A charge of ${highest} is beyond any activity model here: they are trusted to ${largestCharge}.`;
-  if (outOfRange === 'refuse') {
-    const help = 'Ask for "activityModel": "ideal", or "outOfRange": "compute".';
+  const isPitzer = activityModel === 'pitzer';
+  if (outOfRange === 'refuse' || isPitzer) {
+    const help = `Ask for "activityModel": "ideal"${isPitzer ? '' : ', or "outOfRange": "compute"'}.`;
     throw noAnswer('charge-beyond-model', place, `${message} ${help}`);
   }
   return [{ code: 'charge-beyond-model', message, pointer: place }];

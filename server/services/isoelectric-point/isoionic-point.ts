@@ -1,7 +1,12 @@
 import type { IsoelectricPointAnswer } from '../../../shared/isoelectric-point';
 import type { Warning } from '../../../shared/model';
-import { rangeWarnings } from '../chemistry/ranges';
-import { equilibriumOf, settledMixture, withoutAnswer } from '../mixtures/settled';
+import {
+  equilibriumOf,
+  settledMixture,
+  type SettledMixture,
+  strengthFound,
+  withoutAnswer,
+} from '../mixtures/settled';
 import type { ResolvedIsoelectric } from './resolved';
 
 interface Isoionic {
@@ -10,18 +15,15 @@ interface Isoionic {
   readonly warnings: readonly Warning[];
 }
 
-/**
- * The isoionic point: pH of the pure ampholyte in water at a concentration, by Davies and at the
- * solution’s own ionic strength unless the caller says otherwise. Undefined without a concentration.
- */
-export function isoionicPoint({
+/** The pure ampholyte in water at its concentration; undefined where none is given. */
+export function isoionicSolution({
   system,
   concentration,
   conditions,
   digits,
-}: ResolvedIsoelectric): Isoionic | undefined {
+}: ResolvedIsoelectric): SettledMixture | undefined {
   if (concentration === undefined) return undefined;
-  const mixture = settledMixture({
+  const mixture = {
     components: [
       { system, concentration, form: system.fullyProtonatedCharge, counterIon: undefined },
     ],
@@ -29,18 +31,25 @@ export function isoionicPoint({
     ionPairs: [],
     conditions,
     digits,
-  });
-  const found = equilibriumOf(mixture.balance);
+  };
+  // The component is the request’s own system: what is said of it points there.
+  return settledMixture(mixture, () => '');
+}
+
+/**
+ * The isoionic point: pH of the pure ampholyte in water at a concentration, by Davies and at the
+ * solution’s own ionic strength unless the caller says otherwise.
+ */
+export function isoionicPoint(solution: SettledMixture, digits: number): Isoionic {
+  const found = equilibriumOf(solution.balance);
   const made = found.inDigits(digits);
   if (!made.ok) throw withoutAnswer(made.reason);
-  const given = mixture.balance.activity.ionicStrength;
-  const used = given === 'self-consistent' ? found.ionicStrength : Number(given);
   return {
     pH: made.numbers.pH,
     conditions: {
       ionicStrength: made.numbers.ionicStrengthUsed,
-      activityModel: mixture.conditions.activityModel,
+      activityModel: solution.conditions.activityModel,
     },
-    warnings: [...mixture.warnings, ...rangeWarnings(mixture.conditions, used)],
+    warnings: strengthFound(solution, found),
   };
 }

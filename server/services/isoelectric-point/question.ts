@@ -3,6 +3,7 @@ import type {
   IsoelectricPointAnswer,
   IsoelectricPointRequest,
 } from '../../../shared/isoelectric-point';
+import type { Warning } from '../../../shared/model';
 import { computeUnitsOf, costOf, pointsWorth } from '../../../shared/limits';
 import { effectiveSystem, isoelectricPoint } from '../../chem';
 import { conditionsUsed, idealDefaults } from '../chemistry/conditions-used';
@@ -11,16 +12,19 @@ import { rangeWarnings, withoutComposition } from '../chemistry/ranges';
 import { noAnswer } from '../chemistry/refuse';
 import { resolvedSystem } from '../chemistry/resolved-system';
 import { systemUsed } from '../chemistry/system-used';
+import { solutionCost } from '../mixtures/cost';
 import type { Question } from '../compute/question';
-import { isoionicPoint } from './isoionic-point';
+import { isoionicPoint, isoionicSolution } from './isoionic-point';
 import type { ResolvedIsoelectric } from './resolved';
 
 /** Whoever asks without a key has no dry run. */
 type Asked = Omit<IsoelectricPointRequest, 'dryRun'> & { readonly dryRun?: boolean };
 
 const cost = ({ system, concentration, digits }: ResolvedIsoelectric): number => {
-  const points = pointsWorth.root + (concentration === undefined ? 0 : pointsWorth.mixture);
-  return costOf(points, system.pKa.length + 1, digits);
+  const isoelectric = costOf(pointsWorth.root, system.pKa.length + 1, digits);
+  if (concentration === undefined) return isoelectric;
+  const isoionic = { systems: [system], ions: 0, activityModel: undefined, digits };
+  return isoelectric + solutionCost(isoionic);
 };
 
 const signs = {
@@ -28,22 +32,29 @@ const signs = {
   'charge-stays-negative': 'No isoelectric point: the charge stays negative at every pH.',
 } as const;
 
+/** Warnings told before, and others that are not told yet. */
+const withOthers = (told: readonly Warning[], others: readonly Warning[] = []): Warning[] => {
+  const messages = new Set(told.map(({ message }) => message));
+  return [...told, ...others.filter(({ message }) => !messages.has(message))];
+};
+
 function answer(request: ResolvedIsoelectric): IsoelectricPointAnswer | DryRunAnswer {
   const { digits, system } = request;
   const conditions = conditionsUsed(request.conditions, idealDefaults);
   withoutComposition(conditions);
   const range = rangeWarnings(conditions, Number(conditions.ionicStrength));
   const used = systemUsed(system, conditions, '/system');
-  const warnings = [...range, ...used.warnings];
+  const { fullyProtonatedCharge: highest, pKa } = system;
+  const hasNeutralForm = highest > 0 && highest < pKa.length;
+  const solution = hasNeutralForm ? isoionicSolution(request) : undefined;
+  const warnings = withOthers([...range, ...used.warnings], solution?.warnings);
   if (request.dryRun) {
     const all = cost(request);
     return { dryRun: true, cost: all, computeUnits: computeUnitsOf(all), warnings };
   }
   const found = isoelectricPoint(effectiveSystem(used.inMedium, conditions.activity), digits);
   if (!found.ok) throw noAnswer(found.reason, '/system', signs[found.reason]);
-  const isoionic = isoionicPoint(request);
-  const told = new Set(warnings.map(({ message }) => message));
-  const more = isoionic?.warnings.filter(({ message }) => !told.has(message)) ?? [];
+  const isoionic = solution && isoionicPoint(solution, digits);
   return {
     isoelectricPoint: found.pH,
     slope: found.slope,
@@ -60,7 +71,7 @@ function answer(request: ResolvedIsoelectric): IsoelectricPointAnswer | DryRunAn
       conditions,
       systems: [used],
       withWater: isoionic !== undefined,
-      warnings: [...warnings, ...more],
+      warnings: withOthers(warnings, isoionic?.warnings),
     }),
   };
 }

@@ -42,6 +42,8 @@ export interface PairContent {
   readonly ion: string;
   readonly charge: number;
   readonly lgK: string;
+  /** Whether it is ours, of 25 °C, and not the caller’s. */
+  readonly isRecalled: boolean;
   readonly concentration: string;
 }
 
@@ -179,16 +181,18 @@ function pairs({ ionPairs }: ResolvedMixture, inert: readonly InertContent[]): P
       const detail = 'Give lg K: it is known here of Ca^2+ alone.';
       throw misfit('missing', `${pointer}/lgK`, detail);
     }
-    return { ion, charge: present.charge, lgK: constant, concentration: present.concentration };
+    const { charge, concentration } = present;
+    return { ion, charge, lgK: constant, isRecalled: lgK === undefined, concentration };
   });
 }
 
 /** What is in the flask. Refused with `invalid-request` where its parts do not fit each other. */
-export function contentsOf(request: ResolvedMixture): Contents {
+export function contentsOf(
+  request: ResolvedMixture,
+  placeOf = (index: number) => `/components/${index}`,
+): Contents {
   const components = request.components.map((component, i) =>
-    'heldBy' in component
-      ? held(component, `/components/${i}`)
-      : weighed(component, `/components/${i}`),
+    'heldBy' in component ? held(component, placeOf(i)) : weighed(component, placeOf(i)),
   );
   const inert = together([
     ...components.flatMap((one) =>

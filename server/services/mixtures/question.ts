@@ -1,30 +1,28 @@
 import type { DryRunAnswer } from '../../../shared/dry-run';
-import { computeUnitsOf, costOf, pointsWorth } from '../../../shared/limits';
+import { computeUnitsOf } from '../../../shared/limits';
 import type { MixtureAnswer, MixtureRequest } from '../../../shared/mixtures';
 import type { Warning } from '../../../shared/model';
 import type { BalanceNumbers } from '../../chem';
 import { modelOf } from '../chemistry/model';
-import { rangeWarnings } from '../chemistry/ranges';
 import { resolvedSystem } from '../chemistry/resolved-system';
 import type { Question } from '../compute/question';
 import { pairName } from './balance-of';
 import type { Content, ResolvedMixture } from './contents';
+import { mixtureCost } from './cost';
 import { written } from './exact';
 import { interactionsUsed, missingInteractions } from './interactions';
-import { equilibriumOf, settledMixture, type SettledMixture, withoutAnswer } from './settled';
+import {
+  equilibriumOf,
+  settledMixture,
+  type SettledMixture,
+  strengthFound,
+  withoutAnswer,
+} from './settled';
 import { shortcutsOf } from './shortcuts';
 import { temperatureCoefficient } from './temperature-coefficient';
 
 /** Whoever asks without a key has no dry run. */
 type Asked = Omit<MixtureRequest, 'dryRun'> & { readonly dryRun?: boolean };
-
-/** Species of the water: H⁺ and OH⁻, each with what it costs to find it. */
-const waterSpecies = 4;
-
-const cost = ({ components, ionPairs, digits }: ResolvedMixture): number => {
-  const species = components.reduce((sum, { system }) => sum + system.pKa.length + 1, waterSpecies);
-  return costOf(pointsWorth.mixture, species + 2 * ionPairs.length, digits);
-};
 
 type Component = MixtureAnswer['components'][number];
 
@@ -120,14 +118,12 @@ function answer(request: ResolvedMixture): MixtureAnswer | DryRunAnswer {
   const { conditions, balance, contents, systems, at } = mixture;
   const { digits } = request;
   if (request.dryRun) {
-    const all = cost(request);
+    const all = mixtureCost(request);
     const computeUnits = computeUnitsOf(all);
     return { dryRun: true, cost: all, computeUnits, warnings: [...mixture.warnings] };
   }
   const found = equilibriumOf(balance);
-  const given = balance.activity.ionicStrength;
-  const used = given === 'self-consistent' ? found.ionicStrength : Number(given);
-  const range = rangeWarnings(conditions, used);
+  const range = strengthFound(mixture, found);
   const missing = missingInteractions(balance, found, conditions);
   const made = found.inDigits(digits);
   if (!made.ok) throw withoutAnswer(made.reason);
@@ -172,6 +168,6 @@ export const mixtureQuestion: Question<Asked, ResolvedMixture> = {
       system: resolvedSystem(component.system, `/components/${i}/system`, found),
     })),
   }),
-  cost,
+  cost: mixtureCost,
   answer,
 };

@@ -35,7 +35,8 @@ function answer(request: Resolved): PHForFractionAnswer | DryRunAnswer {
   const system = effectiveSystem(used.inMedium, conditions.activity);
   const found = pHForFraction({ system, species, fraction, digits });
   if (!found.ok) {
-    const detail = `Species ${species} never reaches a fraction of ${fraction}: the most is ${found.most}, at pH ${found.pH}.`;
+    const most = asked.greaterThan(found.most) ? found.most : 'just less than that';
+    const detail = `Species ${species} never reaches a fraction of ${fraction}: the most is ${most}, at pH ${found.pH}.`;
     throw noAnswer('fraction-not-reached', '/fraction', detail);
   }
   return {

@@ -1,4 +1,9 @@
-import { decimalsOf, labelsOf, type PHPoints, valuesOf } from '../../../server/chem/forms/ph-points';
+import {
+  decimalsOf,
+  labelsOf,
+  type PHPoints,
+  valuesOf,
+} from '../../../server/chem/forms/ph-points';
 
 const grid = (from: string, step: string, count: number): PHPoints => ({
   kind: 'grid',

@@ -1,6 +1,10 @@
 import Decimal from 'decimal.js';
 import { contextOf, Exact } from '../../../server/chem/decimals/contexts';
-import { powerOfTen, powerOfTenError, tenthRoot } from '../../../server/chem/decimals/powers-of-ten';
+import {
+  powerOfTen,
+  powerOfTenError,
+  tenthRoot,
+} from '../../../server/chem/decimals/powers-of-ten';
 
 const Wide = Decimal.clone({ defaults: true, precision: 150, rounding: Decimal.ROUND_HALF_EVEN });
 /** Relative difference in rounding units u = 5·10^−precision. */

@@ -1,6 +1,7 @@
 import { spawnSync } from 'node:child_process';
 import fc from 'fast-check';
 import ts from 'typescript';
+import { jsonText } from '../../../components/request/json-text';
 import { languages, requestCode } from '../../../components/request/request-code';
 import { curveRequest } from '../../../components/curves/curve-request';
 import { firstConditions, type CurveConditions } from '../../../components/curves/curve-conditions';
@@ -187,4 +188,20 @@ describe('the requests of a screen', () => {
     expect(isoelectricPointRequest.safeParse(point).success).toBe(true);
     for (const body of [fractions, capacity, point]) expect(body).toMatchObject({ conditions });
   });
+});
+
+test('a list of objects has a line for each', () => {
+  const component = (id: string) => ({ system: { id }, concentration: '0.025' });
+  const body = { components: [component('tris'), component('glycine')], pH: ['7', '8'] };
+  expect(jsonText(body)).toBe(
+    [
+      '{',
+      '  "components": [',
+      '    { "system": { "id": "tris" }, "concentration": "0.025" },',
+      '    { "system": { "id": "glycine" }, "concentration": "0.025" }',
+      '  ],',
+      '  "pH": ["7", "8"]',
+      '}',
+    ].join('\n'),
+  );
 });

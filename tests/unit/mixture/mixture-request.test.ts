@@ -1,9 +1,8 @@
 import type { KnownSystem } from '../../../components/mixture/known-system';
 import { placeFaults } from '../../../components/mixture/faults';
 import {
-  bufferingIn,
-  capacityAsked,
   mixtureAsked,
+  systemsIn,
   withTrialAcid,
   type SystemOf,
 } from '../../../components/mixture/mixture-request';
@@ -12,7 +11,6 @@ import {
   firstState,
   type MixtureState,
 } from '../../../components/mixture/mixture-state';
-import { publicBufferCapacityRequest } from '../../../shared/buffer-capacity';
 import { ProblemError } from '../../../shared/client';
 import { publicMixtureRequest } from '../../../shared/mixtures';
 
@@ -70,6 +68,17 @@ describe('the call of a mixture', () => {
     expect(asked?.components).toEqual([0, 0]);
   });
 
+  test.each([0, 1])(
+    'leaves out chloride with form %i of an acid, which has no use for it',
+    (form) => {
+      const part = { choice: stored('phosphoric-acid'), form, concentration: '0.05' };
+      const asked = mixtureAsked(flask({ parts: [{ ...part, counterIon: 'Cl^-' }] }), known);
+      expect(asked?.body.components).toEqual([
+        { system: { id: 'phosphoric-acid' }, concentration: '0.05', form },
+      ]);
+    },
+  );
+
   test('names the ions of salts, the pairs of calcium, the air over the flask', () => {
     const asked = mixtureAsked(
       flask({
@@ -116,15 +125,9 @@ describe('the call of a mixture', () => {
     expect(withTrialAcid({ components: [], strongAcid: '0.01' }).strongAcid).toBe('0.015');
   });
 
-  test('asks for the capacity of each system once, at the ionic strength of the answer', () => {
+  test('knows a system that was weighed in as several forms for one', () => {
     const { body } = mixtureAsked({ ...firstState, air: '42.5565' }, known) ?? {};
-    if (!body) throw new Error('There is no call.');
-    expect(bufferingIn(body)).toEqual([
-      { system: { id: 'phosphoric-acid' }, concentration: '0.05', components: [0, 1] },
-    ]);
-    const asked = capacityAsked(body, '0.1', { from: '1', to: '13', step: '0.05' });
-    expect(asked.conditions).toEqual({ ...conditions, ionicStrength: '0.1' });
-    expect(publicBufferCapacityRequest.safeParse(asked).error).toBeUndefined();
+    expect(body && systemsIn(body)).toEqual([[0, 1]]);
   });
 });
 
