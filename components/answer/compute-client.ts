@@ -4,7 +4,8 @@ import { createClient, ProblemError } from '../../shared/client';
 export const computeClient = createClient({ baseUrl: '' });
 
 const retriesAtMost = 3;
-const isPassing = ({ problem }: ProblemError) =>
+/** What may go by itself: no connection, too many calls, a fault or a rest of the service. */
+export const isPassing = ({ problem }: ProblemError) =>
   problem.status === 429 || problem.status === 0 || problem.status >= 500;
 
 /** What passes by itself is tried again, when the service says so where it does. */

@@ -1,5 +1,6 @@
 import { ProblemError } from '../../shared/client';
-import { conditionFaults, type ConditionFaults } from '../conditions/condition-faults';
+import type { Fault } from '../../shared/problem';
+import { conditionFaults, saidHere, type ConditionFaults } from '../conditions/condition-faults';
 import type { MixtureAsked } from './mixture-request';
 
 /** What the service said, by the place on the screen that it is about. */
@@ -10,14 +11,15 @@ export interface PlacedFaults {
   readonly strongBase: string | undefined;
   readonly air: string | undefined;
   readonly conditions: ConditionFaults;
+  /** Every fault stands beside what it is about. */
+  readonly allPlaced: boolean;
 }
 
-/** The refusal with the faults alone that are of the conditions: others stand beside their rows. */
-function ofConditions(error: Error | null): Error | null {
-  if (!(error instanceof ProblemError)) return null;
-  const errors = error.problem.errors?.filter(({ pointer }) => pointer.startsWith('/conditions'));
-  return new ProblemError({ ...error.problem, errors: errors ?? [] });
-}
+/** What is said of a component whose system nobody has. */
+export const unknownSystem = 'No system has this id. Take it out, and find yours by name.';
+
+const said = ({ code, detail }: Fault) =>
+  code === 'unknown-system' ? unknownSystem : saidHere(detail);
 
 /** Puts each fault of a refused call beside what it is about. */
 export function placeFaults(error: Error | null, asked: MixtureAsked | undefined): PlacedFaults {
@@ -25,24 +27,29 @@ export function placeFaults(error: Error | null, asked: MixtureAsked | undefined
   const electrolytes = new Map<number, string>();
   const flask = new Map<string, string>();
   const faults = (error instanceof ProblemError && error.problem.errors) || [];
-  for (const { pointer, detail } of faults) {
-    const [, list = '', index = ''] = pointer.split('/');
+  const unplaced = faults.filter((fault) => {
+    const [, list = '', index = ''] = fault.pointer.split('/');
     const component = list === 'components' ? asked?.components[Number(index)] : undefined;
     const ion = list === 'ions' ? asked?.ions[Number(index)] : undefined;
-    if (component === 'air') flask.set('air', detail);
-    else if (component !== undefined) parts.set(component, detail);
-    else if (ion !== undefined) electrolytes.set(ion, detail);
-    else flask.set(list, detail);
-  }
+    if (component === 'air') flask.set('air', said(fault));
+    else if (component !== undefined) parts.set(component, said(fault));
+    else if (ion !== undefined) electrolytes.set(ion, said(fault));
+    else flask.set(list, said(fault));
+    return component === undefined && ion === undefined && !ownFields.has(list);
+  });
+  const conditions = conditionFaults(withOnly(error, unplaced));
   return {
     parts,
     electrolytes,
     strongAcid: flask.get('strongAcid'),
     strongBase: flask.get('strongBase'),
     air: flask.get('air'),
-    conditions: {
-      ...conditionFaults(ofConditions(error)),
-      passable: conditionFaults(error).passable,
-    },
+    conditions: { ...conditions, passable: conditionFaults(error).passable },
+    allPlaced: faults.length > 0 && conditions.elsewhere.length === 0,
   };
 }
+
+const ownFields = new Set(['strongAcid', 'strongBase']);
+
+const withOnly = (error: Error | null, errors: Fault[]) =>
+  error instanceof ProblemError ? new ProblemError({ ...error.problem, errors }) : null;

@@ -8,6 +8,7 @@ import { Words } from '../ui/words';
 import { AddComponent } from './add-component';
 import { concentrationAsked, pressureAsked } from './asked-quantities';
 import { ElectrolyteRow } from './electrolyte-row';
+import { unknownSystem } from './faults';
 import { electrolytesAtMost } from './fragment';
 import { MixtureConditions } from './mixture-conditions';
 import { airOfToday, firstConcentration } from './mixture-state';
@@ -16,7 +17,7 @@ import { WeighedPart } from './weighed-part';
 
 /** What is in the flask, and what it is like there. */
 export function FlaskInputs({ mixture }: { readonly mixture: Mixture }) {
-  const { state, systemOf, faults, flask, change } = mixture;
+  const { state, systemOf, isMissing, faults, flask, change } = mixture;
   const { parts, electrolytes, air } = state;
   const { colours } = useTheme();
   return (
@@ -37,7 +38,7 @@ export function FlaskInputs({ mixture }: { readonly mixture: Mixture }) {
           key={`${flask.generation} ${index}`}
           part={part}
           system={systemOf(part.choice)}
-          error={faults.parts.get(index)}
+          error={isMissing(part.choice) ? unknownSystem : faults.parts.get(index)}
           onChange={(next) => flask.setPart(index, next)}
           onRemove={() => flask.removePart(index, systemOf(part.choice)?.title ?? 'The component')}
         />

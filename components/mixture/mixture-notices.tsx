@@ -1,4 +1,6 @@
 import { StyleSheet, View } from 'react-native';
+import { ProblemError } from '../../shared/client';
+import { isPassing } from '../answer/compute-client';
 import { Button } from '../ui/button';
 import { Failure } from '../ui/failure';
 import { Notice } from '../ui/notice';
@@ -9,11 +11,9 @@ import type { Mixture } from './use-mixture';
 
 /** What stands between the reader and the answer asked for. The last answer stays. */
 export function MixtureNotices({ mixture }: { readonly mixture: Mixture }) {
-  const { faulty, unread, call, faults, change } = mixture;
-  const { passable } = faults.conditions;
+  const { faulty, unread, call } = mixture;
   const online = useOnline();
-  const failure = unread ?? call.error ?? call.failureReason;
-  if (!faulty && online && !failure) return null;
+  if (!faulty && online && !unread && !call.error && !call.failureReason) return null;
   return (
     <View style={styles.notices}>
       {faulty && (
@@ -26,22 +26,46 @@ export function MixtureNotices({ mixture }: { readonly mixture: Mixture }) {
           The last answer stays. A new one comes when the connection is back.
         </Notice>
       )}
-      {online && failure && passable && (
-        <Notice tone="warn" title="Beyond what is trusted">
-          <Words>The reason stands beside what it is about.</Words>
-          <View style={styles.all}>
-            <Button label="Compute all the same" onPress={() => change({ beyond: true })} />
-          </View>
-        </Notice>
-      )}
-      {online && failure && !passable && (
-        <Failure
-          error={failure}
-          {...(!call.isFetching && { onRetry: () => void call.refetch() })}
-        />
-      )}
+      {online && (unread ? <Unread failure={unread} /> : <Refused mixture={mixture} />)}
     </View>
   );
+}
+
+const besideIt = 'The reason stands beside what it is about.';
+
+/** A stored system whose forms must be known, and could not be read. */
+const Unread = ({ failure }: { readonly failure: ProblemError }) =>
+  failure.problem.status === 404 ? (
+    <Notice tone="bad" title="Not computed">
+      {besideIt}
+    </Notice>
+  ) : (
+    <Failure error={failure} />
+  );
+
+/** A call that was refused, or did not get through. */
+function Refused({ mixture: { call, faults, change } }: { readonly mixture: Mixture }) {
+  const failure = call.error ?? call.failureReason;
+  if (!failure) return null;
+  if (faults.conditions.passable) {
+    return (
+      <Notice tone="warn" title="Beyond what is trusted">
+        <Words>{besideIt}</Words>
+        <View style={styles.all}>
+          <Button label="Compute all the same" onPress={() => change({ beyond: true })} />
+        </View>
+      </Notice>
+    );
+  }
+  if (faults.allPlaced) {
+    return (
+      <Notice tone="bad" title="Not computed">
+        {besideIt}
+      </Notice>
+    );
+  }
+  const mayPass = failure instanceof ProblemError && isPassing(failure) && !call.isFetching;
+  return <Failure error={failure} {...(mayPass && { onRetry: () => void call.refetch() })} />;
 }
 
 const styles = StyleSheet.create({

@@ -26,8 +26,10 @@ export function useKnownSystems(choices: readonly Choice[]) {
   });
   const systemOf: SystemOf = (choice) =>
     choice.kind === 'typed' ? typedSystem(choice) : known.get(choice.id);
-  const failure = results.find(({ error }) => error)?.error;
-  return { systemOf, failure };
+  const failure = results.find(({ error }) => error)?.error ?? undefined;
+  const isMissing = (choice: Choice) =>
+    choice.kind === 'stored' && results[ids.indexOf(choice.id)]?.error?.problem.status === 404;
+  return { systemOf, isMissing, failure };
 }
 
 /** The last value that was there. */

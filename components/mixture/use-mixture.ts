@@ -10,7 +10,7 @@ import { useAddress } from './use-address';
 /** Everything the Mixture screen shows and does, whichever way it is laid out. */
 export function useMixture() {
   const { state, faulty, change } = useAddress();
-  const { systemOf, failure } = useKnownSystems(state.parts.map(({ choice }) => choice));
+  const { systemOf, isMissing, failure } = useKnownSystems(state.parts.map(({ choice }) => choice));
   const asked = mixtureAsked(state, systemOf);
   const call = useMixtureAnswer(asked);
   const trialPH = useTrialAcid(call.answered);
@@ -19,6 +19,8 @@ export function useMixture() {
     faulty,
     asked,
     systemOf,
+    /** No system has the id of a choice. */
+    isMissing,
     /** A stored system that could not be read, while nothing can be asked without it. */
     unread: asked ? undefined : failure,
     call,

@@ -176,6 +176,13 @@ const refused: RefusedCall[] = [
     /needed/,
   ],
   [
+    'a formula of another charge',
+    asked({}, { ...given, formulas: ['HA', 'SO4^2-'] }),
+    400,
+    '/system/formulas/1 formula-charge',
+    /Species 1 has a charge of -1, and SO4\^2- another/,
+  ],
+  [
     'mixed constants of no medium',
     asked({}, { ...given, constants: { kind: 'mixed' } }),
     400,

@@ -4,7 +4,7 @@ import { promisify } from 'node:util';
 import type { Page } from 'playwright-core';
 import { mixtureAnswer } from '../../shared/mixtures';
 import { startTestServer, type TestServer } from '../support/server';
-import { fragmentIs, phone, sidewaysScroll, wide } from './curves-page';
+import { fragmentIs, open, phone, sidewaysScroll, wide } from './curves-page';
 import { add, answers, choose, openMixture, row } from './mixture-page';
 
 jest.setTimeout(120_000);
@@ -140,6 +140,16 @@ describe('what cannot be computed', () => {
     await page.getByRole('button', { name: 'Compute all the same' }).click();
     await page.getByText('pH of this mixture').waitFor();
     await page.waitForFunction(() => window.location.hash.endsWith('&beyond=compute'));
+  });
+
+  test('a system that nobody has is told beside it, and the others come once it is out', async () => {
+    const { page } = await open(wide);
+    await page.goto(`${server.url}/mixture#system=no-such-thing&c=0.1&system=tris&c=0.1&T=25`);
+    await row(page, 'no-such-thing').getByText('No system has this id.').waitFor();
+    await row(page, 'no-such-thing')
+      .getByRole('button', { name: /^Take out/ })
+      .click();
+    await page.getByText('pH of this mixture').waitFor();
   });
 
   test('offline, the answer stays', async () => {

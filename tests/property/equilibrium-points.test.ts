@@ -164,6 +164,28 @@ describe('buffer capacity', () => {
     const expected = new Far(10).ln().times(new Far('0.25').plus('2e-7'));
     expect(peak?.total).toBe(expected.toPrecision(30));
   });
+
+  // β of two equal systems, pK′ d apart, is level to third order where d = 2 lg(2 + √3) = 1.143895….
+  test.each([
+    ['7.1438', 1],
+    ['7.1439', 2],
+    ['7.14391', 2],
+    ['7.144', 2],
+    ['7.2', 2],
+  ])('two equal systems with pK′ 6 and %s peak %i times', (other, peaks) => {
+    const components = ['6', other].map((pKa) => ({
+      system: { fullyProtonatedCharge: 0, pKa: [pKa] },
+      concentration: '1',
+    }));
+    const maxima = capacityMaxima(
+      { components, water: { hydrogen: '-200', hydroxide: '300' } },
+      20,
+    );
+    expect(maxima).toHaveLength(peaks);
+    const middle = new Far(other).plus(6);
+    const ends = new Far(maxima[0]?.pH ?? NaN).plus(maxima.at(-1)?.pH ?? NaN);
+    expect(ends.minus(middle).abs().lessThan('1e-18')).toBe(true);
+  });
 });
 
 describe('isoelectric point', () => {

@@ -19,6 +19,9 @@ export interface CapacityMaximum {
 
 /** Steps of the search, pH: a sixth of the width of the narrowest peak that 64 protons can make. */
 const searchStep = 0.01;
+/** Where the derivative is this small a part of what it is made of, two peaks may be about to part. */
+const nearlyLevel = 3e-3;
+const finerSteps = 25;
 /** Beyond the constants by this much, pH, the capacity of a system only falls. */
 const beyond = 3;
 const searched = { from: -20, to: 40 };
@@ -89,17 +92,24 @@ function turns(solution: BufferSolution): number[] {
   const to = Math.min(searched.to, Math.max(...constants) + beyond);
   const at = doubleDerivative(solution);
   const h = 1e-5;
+  const slope = (x: number) => (at(x + h).value - at(x - h).value) / (2 * h);
+  const falling = (x: number) => ({ value: at(x).value, slope: slope(x) });
+  const pointAt = (pH: number) => ({ pH, ...at(pH * lnOfTen) });
+  const level = ({ value, scale }: { value: number; scale: number }) =>
+    Math.abs(value) < nearlyLevel * scale;
   const found: number[] = [];
-  let last = at(from * lnOfTen).value;
+  let last = pointAt(from);
   for (let i = 1; from + i * searchStep <= to; i++) {
-    const lnU = (from + i * searchStep) * lnOfTen;
-    const here = at(lnU).value;
-    if (last > 0 && here <= 0) {
-      const slope = (x: number) => (at(x + h).value - at(x - h).value) / (2 * h);
-      const falling = (x: number) => ({ value: at(x).value, slope: slope(x) });
-      found.push(fallingRoot(falling, lnU - searchStep * lnOfTen, lnU));
+    const end = pointAt(from + i * searchStep);
+    const start = last.pH;
+    const pieces = level(last) || level(end) ? finerSteps : 1;
+    for (let k = 1; k <= pieces; k++) {
+      const here = k === pieces ? end : pointAt(start + (k / pieces) * searchStep);
+      if (last.value > 0 && here.value <= 0) {
+        found.push(fallingRoot(falling, last.pH * lnOfTen, here.pH * lnOfTen));
+      }
+      last = here;
     }
-    last = here;
   }
   return found;
 }

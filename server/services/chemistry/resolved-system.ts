@@ -4,6 +4,7 @@ import type { SystemInFull, SystemInput } from '../../../shared/system';
 import { type AcidBaseSystem, canonicalIon, type ConstantKind } from '../../chem';
 import { Refusal } from '../../refusal';
 import { preferredConstants } from '../systems/stored-system';
+import { misfit } from './refuse';
 
 /** What is known of one constant beside its value. */
 export interface Step {
@@ -65,6 +66,22 @@ function ofStored(system: StoredSystem): ResolvedSystem {
 /** Temperature at which constants hold where nobody says another, °C. */
 const ordinaryTemperature = '25';
 
+/** Charge that a formula is written with, behind `^`; undefined where it is written with none. */
+function writtenCharge(formula: string): number | undefined {
+  const [, size, sign] = /\^(\d*)([+-])$/.exec(formula) ?? [];
+  return sign === undefined ? undefined : Number(`${sign}${size || 1}`);
+}
+
+/** Refused where a formula has another charge than its species: parameters are found by it. */
+function checkFormulas({ formulas = [], fullyProtonatedCharge }: SystemInFull, pointer: string) {
+  formulas.forEach((formula, j) => {
+    const charge = fullyProtonatedCharge - j;
+    if ((writtenCharge(formula) ?? charge) === charge) return;
+    const detail = `Species ${j} has a charge of ${charge}, and ${formula} another.`;
+    throw misfit('formula-charge', `${pointer}/formulas/${j}`, detail);
+  });
+}
+
 function ofFull(system: SystemInFull): ResolvedSystem {
   const { name, fullyProtonatedCharge, pKa, constants, thermo, ionSizes, formulas } = system;
   return {
@@ -93,13 +110,16 @@ const unknownSystem = (id: string, pointer: string) => {
 /** Stored systems by the reference that a request has them under. */
 export type FoundSystems = ReadonlyMap<string, StoredSystem>;
 
-/** A system in full. Refused with the fault `unknown-system` where its id names none. */
+/** A system in full. Refused with `unknown-system` where its id names none, or `formula-charge`. */
 export function resolvedSystem(
   system: SystemInput,
   pointer: string,
   found: FoundSystems,
 ): ResolvedSystem {
-  if (!('id' in system)) return ofFull(system);
+  if (!('id' in system)) {
+    checkFormulas(system, pointer);
+    return ofFull(system);
+  }
   const stored = found.get(system.id);
   if (!stored) throw unknownSystem(system.id, `${pointer}/id`);
   return ofStored(stored);

@@ -161,4 +161,5 @@ test('a fault that the service found stands beside what it is about', () => {
   expect(faults.strongBase).toBe('/strongBase');
   expect(faults.strongAcid).toBeUndefined();
   expect(faults.conditions.at.temperature).toBe('/conditions/temperature');
+  expect(faults.allPlaced).toBe(true);
 });
