@@ -1,6 +1,8 @@
 /** One project in plain Node: the app is tested where people meet it, in a real browser. */
 module.exports = {
   testEnvironment: 'node',
+  // Math belongs to the realm of the tests otherwise, and each call of it crosses over: twice the time.
+  sandboxInjectedGlobals: ['Math'],
   roots: ['<rootDir>/tests'],
   testMatch: ['**/*.test.ts'],
   // Browsers and servers start inside tests; two cores are shared by all of them.
