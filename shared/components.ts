@@ -15,16 +15,19 @@ export const concentration = quantity('concentration', limits.concentration).met
 
 /** The species that was weighed in: protons lost from the fully protonated one, or its charge. */
 export const form = z
-  .union([
-    z.int().min(0).max(limits.protons),
-    z.strictObject({
-      charge: z.int().min(-200).max(200).meta({
-        description: 'Charge number of the species weighed in.',
-        example: -1,
-        'x-unit': 'e',
+  .union(
+    [
+      z.int().min(0).max(limits.protons),
+      z.strictObject({
+        charge: z.int().min(-200).max(200).meta({
+          description: 'Charge number of the species weighed in.',
+          example: -1,
+          'x-unit': 'e',
+        }),
       }),
-    }),
-  ])
+    ],
+    { error: 'Write the protons lost as a whole number, such as 1, or { "charge": -1 }.' },
+  )
   .meta({
     id: 'Form',
     description:

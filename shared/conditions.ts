@@ -83,7 +83,7 @@ const conditionsShape = {
 export const conditions = z.strictObject(conditionsShape).meta({
   id: 'Conditions',
   description:
-    'What the solution is like. Without them fractions, capacity and the isoelectric point are ideal at I = 0 and 25 °C; mixtures and the isoionic point are by Davies, self-consistent, at 25 °C.',
+    'What the solution is like. An ionic strength without a model means Davies. Without them fractions, capacity and the isoelectric point are ideal at I = 0 and 25 °C; mixtures and the isoionic point are by Davies, self-consistent, at 25 °C.',
   example: { temperature: '37', ionicStrength: '0.15', activityModel: 'davies' },
 });
 

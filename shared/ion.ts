@@ -57,7 +57,7 @@ function canonicalName(ion: string): string | undefined {
   return isFormula(formula) ? written(formula, size, sign) : undefined;
 }
 
-const words = `Write a formula of elements and its charge, such as "K+", "Ca2+", "NH4+" or "SO4^2-", at most ${longest} characters: what follows ^ is the charge (up to ${highestCharge}), and it is needed where a count stands before a charge.`;
+const words = `Write a formula of elements and its charge, such as "K+", "Ca2+", "NO3-" or "S2O3^2-", at most ${longest} characters: what follows ^ is the charge (up to ${highestCharge}), and it is needed where a count stands before a charge.`;
 
 /** An ion as callers write it; the output is its canonical name. Code: `not-an-ion`. */
 export const ionInput = z

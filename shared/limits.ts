@@ -19,7 +19,7 @@ export const limits = {
   ionSize: { from: '50', to: '5000', decimals: 10 },
   cost: 12_000_000,
   costOfOneUnit: 10_000,
-  publicCost: 800_000,
+  publicCost: 1_200_000,
   publicCallsPerMinute: 240,
   keyedCallsPerMinute: 1_200,
 } as const;

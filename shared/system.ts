@@ -179,7 +179,9 @@ export const systemById = z.strictObject({ id: systemReference }).meta({
 
 /** A system in full or by id. */
 export const systemInput = z
-  .union([systemInFull, systemById])
+  .union([systemInFull, systemById], {
+    error: 'Write { "id": "acetic-acid" }, or the system in full with its charge and constants.',
+  })
   .meta({ id: 'SystemInput', description: 'A system: in full, or by the id of a stored one.' });
 
 export type SystemInFull = z.infer<typeof systemInFull>;

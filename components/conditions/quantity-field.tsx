@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import type { DimensionValue } from 'react-native';
 import { Field } from '../ui/field';
+import { useFaulty } from './faulty-fields';
 import { inUnit, typedQuantity, type AskedQuantity } from './typed-quantity';
 
 interface QuantityFieldProps {
@@ -30,6 +31,8 @@ export function QuantityField(props: QuantityFieldProps) {
   const result = own && typedQuantity(own.text, asked);
   const waits = own && !own.left && unfinished.test(own.text);
   const fault = result && !result.ok && !waits ? result.error : error;
+
+  useFaulty(result !== undefined && !result.ok);
 
   const type = (text: string) => {
     const next = typedQuantity(text, asked);

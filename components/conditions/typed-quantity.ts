@@ -19,6 +19,9 @@ type TypedQuantity =
 /** Wide enough that no digit of what is typed is lost. */
 const shownPlaces = 60;
 
+/** A comma before three digits: thousands to some, the decimal sign to others. */
+const ambiguous = /^[-\u2212]?[1-9]\d{0,2},\d{3}$/;
+
 const signed = (text: string) => text.replace('-', '\u2212');
 
 /** A value of the own unit, in the unit of the field. */
@@ -43,6 +46,11 @@ export function inUnit(value: string, { dimension, unit }: AskedQuantity): strin
 export function typedQuantity(text: string, asked: AskedQuantity): TypedQuantity {
   const { dimension, unit, range, fault } = asked;
   const [, number = '', typedUnit = ''] = /^([^\s\p{L}°]*)\s*(.*)$/u.exec(text.trim()) ?? [];
+  if (ambiguous.test(number)) {
+    const [whole = '', rest = ''] = number.split(',');
+    const error = `Write ${signed(whole)}${rest} or ${signed(whole)}.${rest}: the comma could mean either.`;
+    return { ok: false, error };
+  }
   const plain = plainDecimal(number);
   const toOwn = conversionOf(dimension, typedUnit.trim() || unit);
   if (!/^-?(0|[1-9]\d*)(\.\d+)?$/.test(plain) || toOwn === undefined) {

@@ -1,3 +1,4 @@
+import { useHasFaultyField } from '../conditions/faulty-fields';
 import type { ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { Numerals } from '../ui/numerals';
@@ -20,14 +21,16 @@ export function AnswerHead({
   const { colours } = useTheme();
   const { rail, readOutAside } = useLayout();
   const isLate = useLong(call.isFetching);
+  const isUnread = useHasFaultyField();
+  const isOld = call.error !== null || isUnread;
   if (!answered) return null;
   const { answer } = answered;
   const concentrationPH = shownPH(answer.pHOfConcentration);
   return (
     <View style={[styles.head, rail && styles.wide, { borderBottomColor: colours.edge }]}>
       <View>
-        <Words kind="label" tone={call.error ? 'warn' : 'ink'}>
-          {call.error
+        <Words kind="label" tone={isOld ? 'warn' : 'ink'}>
+          {isOld
             ? 'pH of the mixture before'
             : isLate
               ? 'pH of this mixture is coming'

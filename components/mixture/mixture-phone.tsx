@@ -1,3 +1,4 @@
+import { useHasFaultyField } from '../conditions/faulty-fields';
 import { useState } from 'react';
 import { StyleSheet, useWindowDimensions, View } from 'react-native';
 import { clamp } from '../chart/geometry';
@@ -38,7 +39,7 @@ export function MixturePhone({ mixture }: { readonly mixture: Mixture }) {
       dock={
         answered && (
           <Dock>
-            <DockedAnswer answered={answered} isOld={mixture.call.error !== null} />
+            <DockedAnswer answered={answered} isRefused={mixture.call.error !== null} />
           </Dock>
         )
       }
@@ -68,11 +69,13 @@ export function MixturePhone({ mixture }: { readonly mixture: Mixture }) {
 interface DockedAnswerProps {
   readonly answered: Answered;
   /** Of the mixture before: the present one was refused. */
-  readonly isOld: boolean;
+  readonly isRefused: boolean;
 }
 
 /** The answer in one line. It is said where it stands in full. */
-function DockedAnswer({ answered: { answer }, isOld }: DockedAnswerProps) {
+function DockedAnswer({ answered: { answer }, isRefused }: DockedAnswerProps) {
+  const isUnread = useHasFaultyField();
+  const isOld = isRefused || isUnread;
   return (
     <View aria-hidden style={styles.answer}>
       <Words kind="section">

@@ -1,4 +1,5 @@
 import '../curves/no-eval';
+import { FaultyFields } from '../conditions/faulty-fields';
 import { useLayout } from '../ui/use-layout';
 import { MixturePhone } from './mixture-phone';
 import { MixtureWide } from './mixture-wide';
@@ -8,5 +9,9 @@ import { useMixture } from './use-mixture';
 export function MixtureScreen() {
   const mixture = useMixture();
   const { rail } = useLayout();
-  return rail ? <MixtureWide mixture={mixture} /> : <MixturePhone mixture={mixture} />;
+  return (
+    <FaultyFields>
+      {rail ? <MixtureWide mixture={mixture} /> : <MixturePhone mixture={mixture} />}
+    </FaultyFields>
+  );
 }

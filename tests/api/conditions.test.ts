@@ -24,6 +24,12 @@ const ask = async (conditions: object, system: object = stored) => {
 const warned = async (conditions: object, system?: object) =>
   (await ask(conditions, system)).model.warnings.map(({ code, pointer }) => `${pointer} ${code}`);
 
+test('a model without an ionic strength is said to be the ideal one', async () => {
+  const said = ['/conditions/ionicStrength no-ionic-strength-given'];
+  expect(await warned({ activityModel: 'davies' })).toEqual(said);
+  expect(await warned({ temperature: '25' })).toEqual([]);
+});
+
 describe('what nobody says is filled in', () => {
   const filledIn: [string, object, object][] = [
     ['nothing: ideal', {}, { temperature: '25', ionicStrength: '0', activityModel: 'ideal' }],

@@ -35,7 +35,7 @@ const parts: RefusedCall[] = [
     /charges 0 to -3/,
   ],
   ['no form', phosphate({ form: undefined }), 400, `${place}/form missing`, /needed/],
-  ['a form in words', phosphate({ form: '1' }), 400, `${place}/form invalid-value`, /./],
+  ['a form in words', phosphate({ form: '1' }), 400, `${place}/form invalid-value`, /protons lost/],
   [
     'a counter-ion of the same sign',
     phosphate({ counterIon: 'Cl-' }),
@@ -51,11 +51,37 @@ const parts: RefusedCall[] = [
     /neutral/,
   ],
   [
+    'the ion of water as a counter-ion',
+    phosphate({ counterIon: 'H+', form: 1 }),
+    400,
+    `${place}/counterIon ion-of-water`,
+    /strongAcid/,
+  ],
+  [
+    'hydroxide as an inert ion',
+    { ions: [{ charge: -1, concentration: '0.1', ion: 'OH-' }] },
+    400,
+    '/ions/0/ion ion-of-water',
+    /strongBase/,
+  ],
+  [
+    'one system held by two gases',
+    {
+      components: ['40', '50'].map((partialPressure) => ({
+        system: { id: 'carbonic-acid' },
+        heldBy: { partialPressure },
+      })),
+    },
+    400,
+    '/components/1 given-twice',
+    /One gas phase/,
+  ],
+  [
     'a charge run into a count',
     phosphate({ counterIon: 'SO42-' }),
     400,
     `${place}/counterIon not-an-ion`,
-    /SO4\^2-/,
+    /what follows \^ is the charge/,
   ],
   [
     'no such element',

@@ -28,6 +28,21 @@ const model = '/conditions/activityModel';
 const rows: [string, object, string[]][] = [
   ['none', phosphate(), []],
   [
+    'an ion that takes part, as a counter-ion',
+    phosphate({ counterIon: 'NH4+' }),
+    ['/ions ion-takes-part'],
+  ],
+  [
+    'a system whose constants begin late',
+    phosphate({ system: { id: 'sulfuric-acid' }, form: 0, counterIon: 'Na+' }),
+    ['/components/0/system/id note-of-system'],
+  ],
+  [
+    'I as good as at the end of a range',
+    { strongAcid: '0.5', conditions: { ionicStrength: '0.5004' } },
+    [],
+  ],
+  [
     'I beyond Davies’s range',
     phosphate({ concentration: '0.8' }),
     [`${model} outside-model-range`],
@@ -82,4 +97,19 @@ const rows: [string, object, string[]][] = [
 ];
 test.each(rows)('%s: told beside the answer', async (_name, body, expected) => {
   expect(await warned(body)).toEqual(expected);
+});
+
+test('bicarbonate in a gas that holds carbon dioxide is its alkalinity alone', async () => {
+  const air = { system: { id: 'carbonic-acid' }, heldBy: { partialPressure: '0.00042 atm' } };
+  const soda = { system: { id: 'carbonic-acid' }, concentration: '0.01', form: 1 };
+  const [asWeighed, asBase] = await Promise.all(
+    [{ components: [soda, air] }, { components: [air], strongBase: '0.01' }].map(async (body) => {
+      const answer = await postWithKey(server, '/v1/mixtures').send({ ...body, digits: 8 });
+      return mixtureAnswer.parse(answer.body);
+    }),
+  );
+  expect(asWeighed?.pH).toBe(asBase?.pH);
+  // A caller’s own charge balance at 120 digits gave 9.0856378 for the second.
+  expect(asWeighed?.pH).toBe('9.0856378');
+  expect(asWeighed?.model.warnings.map(({ code }) => code)).toContain('held-by-gas');
 });

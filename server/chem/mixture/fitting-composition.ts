@@ -26,7 +26,12 @@ const apart = (one: readonly number[], other: readonly number[]) =>
  * then by Newton’s method.
  */
 export function fittingComposition(balance: Balance, doubles: DoubleBalance): FittingComposition {
-  const plain = { ...balance, activity: { ...balance.activity, model: 'guntelberg' } } as const;
+  const activity = {
+    ...balance.activity,
+    model: 'guntelberg',
+    ionicStrength: 'self-consistent',
+  } as const;
+  const plain = { ...balance, activity };
   const plainDoubles = new DoubleBalance(plain);
   const strengths = fittingStrengths(plain, plainDoubles);
   if (!strengths.ok) return strengths;

@@ -110,7 +110,10 @@ export function rootsOf(problem: Balance): Roots {
   const doubles = new DoubleBalance(problem);
   const fitting = fittingStates(problem, doubles);
   if (!fitting.ok) return fitting;
-  const [first, ...others] = fitting.states.map((state) => rootAt(problem, doubles, state));
+  const [first, ...others] = fitting.states
+    .map((state) => rootAt(problem, doubles, state))
+    // Where the charge does not change with pH at all, no double says where it vanishes.
+    .filter(({ loss }) => Number.isFinite(loss));
   return first ? { ok: true, roots: [first, ...others] } : { ok: false, reason: 'no-convergence' };
 }
 

@@ -28,7 +28,7 @@ interface Question {
 }
 
 /** Digits by which the greatest fraction is told from the one asked for. */
-const tieDigits = 60;
+const tieDigits = 80;
 /** Natural logarithm of the farthest 1/a(H⁺) that a search goes to. */
 const farthest = 5000;
 

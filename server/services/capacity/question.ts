@@ -12,7 +12,7 @@ import {
 import { conditionsUsed, idealDefaults } from '../chemistry/conditions-used';
 import { modelOf } from '../chemistry/model';
 import { pointsOf } from '../chemistry/points';
-import { rangeWarnings, withoutComposition } from '../chemistry/ranges';
+import { strengthWarnings, withoutComposition } from '../chemistry/ranges';
 import { type ResolvedSystem, resolvedSystem } from '../chemistry/resolved-system';
 import { systemUsed } from '../chemistry/system-used';
 import type { Question } from '../compute/question';
@@ -32,7 +32,7 @@ type Asked = Omit<BufferCapacityRequest, 'dryRun'> & { readonly dryRun?: boolean
 function settled(request: Resolved) {
   const conditions = conditionsUsed(request.conditions, idealDefaults);
   withoutComposition(conditions);
-  const range = rangeWarnings(conditions, Number(conditions.ionicStrength));
+  const range = strengthWarnings(conditions);
   const systems = request.components.map(({ system }, i) =>
     systemUsed(system, conditions, `/components/${i}/system`),
   );

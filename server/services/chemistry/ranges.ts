@@ -16,6 +16,9 @@ const names: Readonly<Record<ConditionsUsed['activityModel'], string>> = {
 
 const pointer = '/conditions/activityModel';
 
+/** As good as at the end of a range: the last ion of a 0.1 mol/L buffer is no reason to warn. */
+const hair = 1.001;
+
 /**
  * What to say of an ionic strength by a model. Refused with `outside-model-range` beyond twice the
  * range, unless the caller says compute.
@@ -25,7 +28,7 @@ export function rangeWarnings(
   ionicStrength: number,
 ): Warning[] {
   const end = usableTo(activityModel);
-  if (end === undefined || ionicStrength <= Number(end)) return [];
+  if (end === undefined || ionicStrength <= Number(end) * hair) return [];
   const shown = asked === 'self-consistent' ? Number(ionicStrength.toPrecision(3)) : asked;
   const message = `${names[activityModel]} is good to I = ${end} ${basis}; here I = ${shown} ${basis}.`;
   if (ionicStrength > 2 * Number(end) && outOfRange === 'refuse') {
@@ -66,4 +69,14 @@ export function withoutComposition({ activityModel, ionicStrength }: ConditionsU
       'A self-consistent ionic strength needs a composition: give a value here, or ask /v1/mixtures.';
     throw noAnswer('model-needs-composition', '/conditions/ionicStrength', detail);
   }
+}
+
+/** What to say of a given ionic strength: beyond a range, or none at all, which is the ideal solution. */
+export function strengthWarnings(conditions: ConditionsUsed): Warning[] {
+  const { activityModel, ionicStrength } = conditions;
+  if (activityModel === 'ideal' || Number(ionicStrength) !== 0) {
+    return rangeWarnings(conditions, Number(ionicStrength));
+  }
+  const message = `${names[activityModel]} at I = 0 is the ideal solution: give the ionic strength that you mean.`;
+  return [{ code: 'no-ionic-strength-given', message, pointer: '/conditions/ionicStrength' }];
 }

@@ -2,7 +2,7 @@ import type { Model } from '../../../shared/model';
 import { type AcidBaseSystem, effectiveSystem } from '../../chem';
 import { type ConditionsUsed, conditionsUsed, idealDefaults } from '../chemistry/conditions-used';
 import { modelOf } from '../chemistry/model';
-import { rangeWarnings, withoutComposition } from '../chemistry/ranges';
+import { strengthWarnings, withoutComposition } from '../chemistry/ranges';
 import { type SystemUsed, systemUsed } from '../chemistry/system-used';
 import { systemsOf } from './cost';
 import type { ResolvedRequest } from './resolve';
@@ -18,7 +18,7 @@ interface Settled {
 export function settled(request: ResolvedRequest): Settled {
   const conditions = conditionsUsed(request.conditions, idealDefaults);
   withoutComposition(conditions);
-  const range = rangeWarnings(conditions, Number(conditions.ionicStrength));
+  const range = strengthWarnings(conditions);
   const systems = systemsOf(request).map((system, i) => {
     const place = request.system === undefined ? `/systems/${i}` : '/system';
     const used = systemUsed(system, conditions, place);

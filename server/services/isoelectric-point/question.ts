@@ -8,7 +8,7 @@ import { computeUnitsOf, costOf, pointsWorth } from '../../../shared/limits';
 import { effectiveSystem, isoelectricPoint } from '../../chem';
 import { conditionsUsed, idealDefaults } from '../chemistry/conditions-used';
 import { modelOf } from '../chemistry/model';
-import { rangeWarnings, withoutComposition } from '../chemistry/ranges';
+import { strengthWarnings, withoutComposition } from '../chemistry/ranges';
 import { noAnswer } from '../chemistry/refuse';
 import { resolvedSystem } from '../chemistry/resolved-system';
 import { systemUsed } from '../chemistry/system-used';
@@ -42,7 +42,7 @@ function answer(request: ResolvedIsoelectric): IsoelectricPointAnswer | DryRunAn
   const { digits, system } = request;
   const conditions = conditionsUsed(request.conditions, idealDefaults);
   withoutComposition(conditions);
-  const range = rangeWarnings(conditions, Number(conditions.ionicStrength));
+  const range = strengthWarnings(conditions);
   const used = systemUsed(system, conditions, '/system');
   const { fullyProtonatedCharge: highest, pKa } = system;
   const hasNeutralForm = highest > 0 && highest < pKa.length;

@@ -37,7 +37,9 @@ function acidOf(content: Content, system: SystemInMedium, henry: AtTemperature['
   const { pKa, kinds, species } = system;
   const amount =
     content.kind === 'weighed'
-      ? content.concentration
+      ? content.isHeld
+        ? '0'
+        : content.concentration
       : quotient(times(henry(content), content.partialPressure), atmosphere);
   return {
     pKa,

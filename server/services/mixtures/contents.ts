@@ -2,14 +2,9 @@ import { chargeOfIon } from '../../../shared/ion';
 import type { MixtureRequest } from '../../../shared/mixtures';
 import { misfit } from '../chemistry/refuse';
 import type { ResolvedSystem } from '../chemistry/resolved-system';
-import { quotient, sumOf, times } from './exact';
-
-/** An ion that takes no part, with how it came here. */
-export interface InertContent {
-  readonly name: string | undefined;
-  readonly charge: number;
-  readonly concentration: string;
-}
+import { quotient, times } from './exact';
+import { type InertContent, together } from './inert-content';
+import { type PairContent, pairsOf } from './ion-pairs';
 
 /** A component as it was weighed in. */
 export interface WeighedContent {
@@ -20,6 +15,8 @@ export interface WeighedContent {
   /** Index of the form weighed in. */
   readonly form: number;
   readonly counterIon: (InertContent & { readonly name: string }) | null;
+  /** Whether a gas holds the same system: then of what was weighed in only the counter-ion stays. */
+  readonly isHeld: boolean;
 }
 
 /** A component that a gas phase holds. */
@@ -36,16 +33,6 @@ export interface HeldContent {
 }
 
 export type Content = WeighedContent | HeldContent;
-
-/** A cation that pairs with hydroxide. */
-export interface PairContent {
-  readonly ion: string;
-  readonly charge: number;
-  readonly lgK: string;
-  /** Whether it is ours, of 25 °C, and not the caller’s. */
-  readonly isRecalled: boolean;
-  readonly concentration: string;
-}
 
 /** Everything in the flask, its parts checked against each other. */
 export interface Contents {
@@ -78,6 +65,14 @@ function formIndex({ system, form }: Weighed, place: string): number {
   throw misfit('no-such-form', `${place}/form`, detail);
 }
 
+/** H⁺ and OH⁻ are what the answer is about. Refused with `ion-of-water`. */
+function notOfWater(name: string, pointer: string): void {
+  const field = { 'H^+': 'strongAcid', 'H3O^+': 'strongAcid', 'OH^-': 'strongBase' }[name];
+  if (field === undefined) return;
+  const detail = `${name} does not stand by as an inert ion: give what brings it under \`${field}\`, or the form that was weighed in.`;
+  throw misfit('ion-of-water', pointer, detail);
+}
+
 const ordinaryCounterIon = (charge: number) => (charge > 0 ? 'Cl^-' : 'Na^+');
 
 function counterIon(component: Weighed, charge: number, place: string) {
@@ -88,6 +83,7 @@ function counterIon(component: Weighed, charge: number, place: string) {
     throw misfit('counter-ion-not-needed', `${place}/counterIon`, detail);
   }
   const name = given ?? ordinaryCounterIon(charge);
+  notOfWater(name, `${place}/counterIon`);
   const own = chargeOfIon(name);
   if (Math.sign(own) === Math.sign(charge)) {
     const detail = `The form weighed in has a charge of ${charge}: its counter-ion must have the other sign.`;
@@ -97,7 +93,7 @@ function counterIon(component: Weighed, charge: number, place: string) {
   return { name, charge: own, concentration: brought };
 }
 
-function weighed(component: Weighed, place: string): WeighedContent {
+function weighed(component: Weighed, place: string, isHeld: boolean): WeighedContent {
   const { system, concentration } = component;
   const form = formIndex(component, place);
   const charge = system.fullyProtonatedCharge - form;
@@ -108,6 +104,7 @@ function weighed(component: Weighed, place: string): WeighedContent {
     concentration,
     form,
     counterIon: counterIon(component, charge, place),
+    isHeld,
   };
 }
 
@@ -142,58 +139,33 @@ function ions({ ions: given }: ResolvedMixture): InertContent[] {
       const detail = `The name ${ion} says a charge of ${chargeOfIon(ion)}.`;
       throw misfit('ion-charge', `${pointer}/charge`, detail);
     }
+    if (ion !== undefined) notOfWater(ion, `${pointer}/ion`);
     return { name: ion, charge, concentration };
   });
 }
 
-/** Ions of one name are one entry; unnamed ones stay apart. */
-function together(all: readonly InertContent[]): InertContent[] {
-  const named = new Map<string, InertContent>();
-  const unnamed: InertContent[] = [];
-  for (const ion of all) {
-    if (ion.name === undefined) unnamed.push(ion);
-    else {
-      const before = named.get(ion.name)?.concentration ?? '0';
-      named.set(ion.name, { ...ion, concentration: sumOf(before, ion.concentration) });
-    }
-  }
-  return [...named.values(), ...unnamed];
-}
-
-/** lg K of CaOH⁺ at 25 °C and I = 0: common practice, recalled from critical tables. */
-const knownPairs: ReadonlyMap<string, string> = new Map([['Ca^2+', '1.3']]);
-
-function pairs({ ionPairs }: ResolvedMixture, inert: readonly InertContent[]): PairContent[] {
-  return ionPairs.map(({ ion, lgK }, i) => {
-    const pointer = `/ionPairs/${i}`;
-    const present = inert.find(({ name }) => name === ion);
-    if (!present) {
-      throw misfit('no-such-ion', `${pointer}/ion`, `There is no ${ion} in the mixture.`);
-    }
-    if (present.charge < 0) {
-      throw misfit('ion-charge', `${pointer}/ion`, 'An anion does not pair with hydroxide.');
-    }
-    if (ionPairs.findIndex((other) => other.ion === ion) !== i) {
-      throw misfit('given-twice', `${pointer}/ion`, `The pair of ${ion} is given twice.`);
-    }
-    const constant = lgK ?? knownPairs.get(ion);
-    if (constant === undefined) {
-      const detail = 'Give lg K: it is known here of Ca^2+ alone.';
-      throw misfit('missing', `${pointer}/lgK`, detail);
-    }
-    const { charge, concentration } = present;
-    return { ion, charge, lgK: constant, isRecalled: lgK === undefined, concentration };
-  });
-}
+/** By which a system is told from another: its constants and charge, whatever it is called. */
+const identityOf = ({ system }: ResolvedComponent) =>
+  `${system.fullyProtonatedCharge} ${system.pKa.map(Number).join()}`;
 
 /** What is in the flask. Refused with `invalid-request` where its parts do not fit each other. */
 export function contentsOf(
   request: ResolvedMixture,
   placeOf = (index: number) => `/components/${index}`,
 ): Contents {
-  const components = request.components.map((component, i) =>
-    'heldBy' in component ? held(component, placeOf(i)) : weighed(component, placeOf(i)),
-  );
+  const gases = request.components.flatMap((one) => ('heldBy' in one ? [identityOf(one)] : []));
+  const components = request.components.map((component, i) => {
+    const isHeld = gases.includes(identityOf(component));
+    if (!('heldBy' in component)) return weighed(component, placeOf(i), isHeld);
+    if (
+      request.components.findIndex(
+        (one) => 'heldBy' in one && identityOf(one) === identityOf(component),
+      ) < i
+    ) {
+      throw misfit('given-twice', placeOf(i), 'One gas phase holds a system, not two.');
+    }
+    return held(component, placeOf(i));
+  });
   const inert = together([
     ...components.flatMap((one) =>
       one.kind === 'weighed' && one.counterIon ? [one.counterIon] : [],
@@ -206,7 +178,7 @@ export function contentsOf(
       : [{ name: 'Na^+', charge: 1, concentration: request.strongBase }]),
     ...ions(request),
   ]);
-  const paired = pairs(request, inert);
+  const paired = pairsOf(request.ionPairs, inert);
   return {
     components,
     inert: inert.filter(({ name }) => !paired.some(({ ion }) => ion === name)),

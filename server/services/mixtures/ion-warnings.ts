@@ -3,6 +3,7 @@ import { shownAs, sizeAssumed, sizeOf } from '../../chem';
 import type { ConditionsUsed } from '../chemistry/conditions-used';
 import { pairName } from './balance-of';
 import type { Contents } from './contents';
+import { systemOfIon } from './protolytes';
 
 function sizes({ inert, pairs }: Contents): Warning[] {
   const ions = [
@@ -34,11 +35,44 @@ function pairConstants({ pairs }: Contents, { temperature }: ConditionsUsed): Wa
   return [{ code: 'pka-not-temperature-corrected', message, pointer: '/ionPairs' }];
 }
 
-/** What to know of ions that take no part, and of pairs, before anything is computed. */
+function protolytes({ inert }: Contents): Warning[] {
+  return inert.flatMap(({ name }) => {
+    const system = name === undefined ? undefined : systemOfIon(name);
+    if (name === undefined || system === undefined) return [];
+    const message = `${name} is taken as inert, and takes part in proton transfer: give it as a component of ${system}.`;
+    return [{ code: 'ion-takes-part', message, pointer: '/ions' }] as const;
+  });
+}
+
+/** What was weighed in of a system that a gas holds: it goes into the gas, or comes from it. */
+function held({ components }: Contents): Warning[] {
+  return components.flatMap((one) => {
+    if (one.kind === 'held' || !one.isHeld) return [];
+    const message = `${one.system.name ?? 'This system'} is held by the gas: of what was weighed in, only the counter-ion stays.`;
+    return [{ code: 'held-by-gas', message, pointer: one.place }] as const;
+  });
+}
+
+/** Notes of stored systems that were weighed in, each once. */
+function notes({ components }: Contents): Warning[] {
+  const told = new Set<string>();
+  return components.flatMap((one) => {
+    const { stored, name } = one.system;
+    if (one.kind === 'held' || !stored?.note || told.has(stored.id)) return [];
+    told.add(stored.id);
+    const message = `${name ?? stored.id}: ${stored.note}`;
+    return [{ code: 'note-of-system', message, pointer: `${one.place}/system/id` }] as const;
+  });
+}
+
+/** What to know of ions that take no part, of gases and of pairs, before anything is computed. */
 export function ionWarnings(contents: Contents, conditions: ConditionsUsed): Warning[] {
   const { activityModel } = conditions;
   const byName = activityModel === 'specific-ion-interaction' || activityModel === 'pitzer';
   return [
+    ...notes(contents),
+    ...held(contents),
+    ...protolytes(contents),
     ...(activityModel === 'extended-debye-huckel' ? sizes(contents) : []),
     ...(byName ? names(contents) : []),
     ...pairConstants(contents, conditions),

@@ -5,7 +5,7 @@ import type { PHForFractionAnswer, PHForFractionRequest } from '../../../shared/
 import { effectiveSystem, pHForFraction } from '../../chem';
 import { conditionsUsed, idealDefaults } from '../chemistry/conditions-used';
 import { modelOf } from '../chemistry/model';
-import { rangeWarnings, withoutComposition } from '../chemistry/ranges';
+import { strengthWarnings, withoutComposition } from '../chemistry/ranges';
 import { misfit, noAnswer } from '../chemistry/refuse';
 import { type ResolvedSystem, resolvedSystem } from '../chemistry/resolved-system';
 import { systemUsed } from '../chemistry/system-used';
@@ -20,7 +20,7 @@ function answer(request: Resolved): PHForFractionAnswer | DryRunAnswer {
   const { species, fraction, digits } = request;
   const conditions = conditionsUsed(request.conditions, idealDefaults);
   withoutComposition(conditions);
-  const range = rangeWarnings(conditions, Number(conditions.ionicStrength));
+  const range = strengthWarnings(conditions);
   const used = systemUsed(request.system, conditions, '/system');
   const warnings = [...range, ...used.warnings];
   if (request.dryRun) {

@@ -34,6 +34,14 @@ describe('a quantity as it is typed', () => {
     });
   });
 
+  test('a comma before three digits is asked about: a thousand to some, one to others', () => {
+    expect(typedQuantity('1,000 mmol/L', totalAsked)).toEqual({
+      ok: false,
+      error: 'Write 1000 or 1.000: the comma could mean either.',
+    });
+    expect(typedQuantity('0,025 mol/L', ionicStrengthAsked)).toEqual({ ok: true, value: '0.025' });
+  });
+
   test('beyond its range it is told the range, in the unit of the field', () => {
     expect(typedQuantity('\u22125', temperatureAsked)).toEqual({
       ok: false,

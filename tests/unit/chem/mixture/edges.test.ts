@@ -32,6 +32,26 @@ const half = new Far(pKw).dividedBy(2);
 const acetic = { charge: 0, pKa: ['4.756'], reference: 0 } as const;
 const carbonDioxide = { charge: 0, pKa: ['6.351', '10.329'], reference: 0, held: true } as const;
 
+test('a balance that no pH moves is refused for a reason, not thrown', () => {
+  // 50 mol/L of a +20 charge by Davies: a coefficient of 10^-thousands leaves no charge to a double.
+  const balance = mixtureOf(
+    [{ charge: 20, pKa: ['7'], reference: 0, amount: '50' }],
+    [inertOf(-1, '1000')],
+    activityOf('davies'),
+  );
+  expect(equilibrium(balance)).toEqual({ ok: false, reason: 'no-convergence' });
+});
+
+test('a model by interactions takes the ions present, whatever ionic strength is given', () => {
+  const salt = mixtureOf(
+    [],
+    [inertOf(1, '0.1'), inertOf(-1, '0.1')],
+    activityOf('pitzer', '1.631'),
+  );
+  const consistent = { ...salt, activity: activityOf('pitzer') };
+  expect(numbersOf(salt).pH).toBe(numbersOf(consistent).pH);
+});
+
 describe('mixtures at the edge of what can be mixed', () => {
   test.each(even)('pure water: the pH is pKw/2 to every digit, by %s', (model) => {
     const water = mixtureOf([], [], activityOf(model));
