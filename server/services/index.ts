@@ -10,6 +10,7 @@ import { KeyGuard } from './keys/key-guard';
 import { KeyNotices } from './keys/key-notices';
 import type { Outbox } from './mail/outbox';
 import { AccessTokens } from './sessions/access-token';
+import { RefreshTokens } from './sessions/refresh-token';
 import { SessionService } from './sessions/session-service';
 import { SignInThrottle } from './sessions/sign-in-throttle';
 import { SystemService } from './systems/system-service';
@@ -55,6 +56,7 @@ export function createServices({ database, config, publicUrl, outbox }: Parts): 
     sessions: new SessionService({
       database,
       tokens: new AccessTokens(config.sessionSecret, publicUrl),
+      refreshTokens: new RefreshTokens(config.sessionSecret),
       throttle: new SignInThrottle(database),
     }),
     systems,

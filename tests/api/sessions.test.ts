@@ -1,6 +1,7 @@
 import request from 'supertest';
 import { SessionService } from '../../server/services/sessions/session-service';
 import { AccessTokens } from '../../server/services/sessions/access-token';
+import { RefreshTokens } from '../../server/services/sessions/refresh-token';
 import { SignInThrottle } from '../../server/services/sessions/sign-in-throttle';
 import { hashPassword, passwordIs } from '../../server/services/sessions/passwords';
 import { demoOrganizations, demoPassword, demoPeople } from '../../server/services/demo/demo-data';
@@ -137,6 +138,7 @@ describe('tokens', () => {
     new SessionService({
       database: server.database,
       tokens: new AccessTokens(Buffer.alloc(32, 1), 'http://stepwell.test'),
+      refreshTokens: new RefreshTokens(Buffer.alloc(32, 1)),
       throttle: new SignInThrottle(server.database),
       now: () => now,
     });
@@ -148,6 +150,17 @@ describe('tokens', () => {
     const second = await sessions().refresh(first.refresh);
     expect(second.refresh).not.toBe(first.refresh);
     await expect(sessions().refresh(second.refresh ?? '')).resolves.toBeDefined();
+  });
+
+  test('made up for a session whose id is known end nothing', async () => {
+    const { refresh } = await open();
+    const [id = '', random = '', code = ''] = refresh.split('.');
+    const stranger = new RefreshTokens(Buffer.alloc(32, 2)).of(id);
+    const madeUp = [`${id}.${random}`, `${id}.x.${code}`, `${id}.${random}.x`, `${refresh}.x`];
+    for (const token of [stranger, id, '', ...madeUp]) {
+      await expect(sessions().refresh(token)).rejects.toMatchObject({ code: 'sign-in-needed' });
+    }
+    await expect(sessions().refresh(refresh)).resolves.toBeDefined();
   });
 
   test('raced within ten seconds stay good', async () => {

@@ -8,7 +8,7 @@ import { Refusal } from '../../refusal';
 import type { Actor, CallSource, Member, SessionCaller } from '../caller';
 import type { AccessTokens } from './access-token';
 import { passwordIs } from './passwords';
-import { digestOf, makeRefreshToken, sessionOfToken } from './refresh-token';
+import { digestOf, type RefreshTokens } from './refresh-token';
 import type { Attempt, SignInThrottle } from './sign-in-throttle';
 import {
   recordChoice,
@@ -39,6 +39,7 @@ type Renewed = Partial<Tokens> & Omit<SignedIn, 'refresh'>;
 interface Parts {
   readonly database: DataSource;
   readonly tokens: AccessTokens;
+  readonly refreshTokens: RefreshTokens;
   readonly throttle: SignInThrottle;
   readonly now?: () => Date;
 }
@@ -87,7 +88,7 @@ export class SessionService {
    * access token alone. Any other token that names the session is a stolen one: the session ends.
    */
   async refresh(token: string, source: Source = {}): Promise<Renewed> {
-    const id = sessionOfToken(token);
+    const id = this.parts.refreshTokens.sessionOf(token);
     if (id === undefined) throw notSignedIn();
     const answer = await this.parts.database.transaction(async (manager) => {
       const session = await manager.getRepository(Session).findOne({
@@ -105,7 +106,7 @@ export class SessionService {
       }
       const access = this.access(session);
       if (use === 'race') return { account, access };
-      const refresh = makeRefreshToken(id);
+      const refresh = this.parts.refreshTokens.of(id);
       await manager.update(Session, id, {
         refreshDigest: digestOf(refresh),
         previousDigest: session.refreshDigest,
@@ -180,7 +181,7 @@ export class SessionService {
   private async open({ personId, organizationId }: Place, source: Source) {
     const account = await this.account({ personId, organizationId });
     const id = randomUUID();
-    const refresh = makeRefreshToken(id);
+    const refresh = this.parts.refreshTokens.of(id);
     const now = this.now();
     const session = {
       id,
