@@ -3,6 +3,8 @@ import { Refusal } from '../refusal';
 interface Waiting {
   readonly cost: number;
   readonly start: () => void;
+  /** How many that came later went first. */
+  overtaken: number;
 }
 
 interface Bounds {
@@ -12,8 +14,12 @@ interface Bounds {
   readonly mostWaiting: number;
 }
 
+/** A call that so many overtook is the next. */
+const overtakenAtMost = 8;
+
 /**
- * Lets so many calls work at once, the others in the order they came. A call whose caller has gone
+ * Lets so many calls work at once. Of those that wait the cheapest goes first, so that a small call
+ * does not stand behind a few large ones; nobody is overtaken more than eight times. A call whose caller has gone
  * leaves the queue; one that would make it too long is refused with `unavailable`.
  */
 export class Queue {
@@ -27,10 +33,22 @@ export class Queue {
     try {
       return await work();
     } finally {
-      const next = this.waiting.shift();
+      const next = this.next();
       if (next) next.start();
       else this.working -= 1;
     }
+  }
+
+  private next(): Waiting | undefined {
+    const [first, ...others] = this.waiting;
+    if (!first) return undefined;
+    const chosen =
+      this.waiting.find(({ overtaken }) => overtaken >= overtakenAtMost) ??
+      others.reduce((cheapest, one) => (one.cost < cheapest.cost ? one : cheapest), first);
+    const place = this.waiting.indexOf(chosen);
+    this.waiting.splice(place, 1);
+    for (const one of this.waiting.slice(0, place)) one.overtaken += 1;
+    return chosen;
   }
 
   private async turn(cost: number, signal: AbortSignal): Promise<void> {
@@ -49,8 +67,9 @@ export class Queue {
         this.waiting.splice(this.waiting.indexOf(one), 1);
         reject(new Refusal('unavailable', 'The caller has gone.'));
       };
-      const one = {
+      const one: Waiting = {
         cost,
+        overtaken: 0,
         start: () => {
           signal.removeEventListener('abort', leave);
           resolve();

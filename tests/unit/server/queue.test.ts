@@ -13,7 +13,7 @@ const settled = () => new Promise((resolve) => setImmediate(resolve));
 const mostWaiting = 36_000_000;
 const here = () => new AbortController().signal;
 
-test('so many work at once, the others in the order they came', async () => {
+test('so many work at once, others of the same cost in the order they came', async () => {
   const queue = new Queue({ places: 2, mostWaiting });
   const started: number[] = [];
   const works = [0, 1, 2, 3].map(work);
@@ -32,6 +32,24 @@ test('so many work at once, the others in the order they came', async () => {
   for (const { end } of works) end();
   await Promise.all(runs);
   expect(started).toEqual([0, 1, 2, 3]);
+});
+
+test('a small call goes before large ones that came first, and a large one after eight such', async () => {
+  const queue = new Queue({ places: 1, mostWaiting: 1_000 });
+  const started: string[] = [];
+  const first = work();
+  const busy = queue.run(1, here(), first.run);
+  const enter = (name: string, cost: number) =>
+    queue.run(cost, here(), () => {
+      started.push(name);
+      return Promise.resolve();
+    });
+  const large = enter('large', 100);
+  const small = Array.from({ length: 10 }, (_, i) => enter(`small ${i}`, 1));
+  first.end();
+  await Promise.all([busy, large, ...small]);
+  const eight = Array.from({ length: 8 }, (_, i) => `small ${i}`);
+  expect(started).toEqual([...eight, 'large', 'small 8', 'small 9']);
 });
 
 test('work that fails gives its place to the next', async () => {
