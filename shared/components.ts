@@ -35,12 +35,10 @@ export const form = z
     example: 1,
   });
 
-const system = systemInput;
-
 /** A component weighed in: its total is fixed. */
 export const weighedComponent = z
   .strictObject({
-    system,
+    system: systemInput,
     concentration,
     form,
     counterIon: ionInput.optional().meta({
@@ -57,7 +55,7 @@ export const weighedComponent = z
 /** A component that a gas phase holds: its neutral species is fixed. */
 export const heldComponent = z
   .strictObject({
-    system,
+    system: systemInput,
     heldBy: z
       .strictObject({
         partialPressure: quantity('pressure', limits.pressure).meta({

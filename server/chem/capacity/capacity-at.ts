@@ -1,7 +1,7 @@
 import type Decimal from 'decimal.js';
 import { contextOf, Exact } from '../decimals/contexts';
 import { powerOfTen } from '../decimals/powers-of-ten';
-import { factorsOf, termsOfActivity } from '../forms/composition';
+import { allTermsOf, factorsOf } from '../forms/composition';
 import { spreadOf } from '../forms/spread';
 import { constantsOf } from '../forms/system';
 import type { BufferSolution } from './solution';
@@ -13,27 +13,34 @@ export interface Capacity {
   readonly components: readonly Decimal[];
 }
 
+/** What a solution contributes at one precision, whatever the pH. */
+export function preparedAt({ components, water }: BufferSolution, precision: number) {
+  const context = contextOf(precision);
+  return {
+    context,
+    /** [H⁺] at u = 1. */
+    hydrogen: powerOfTen(context, new Exact(water.hydrogen)),
+    /** [OH⁻] at u = 1. */
+    hydroxide: powerOfTen(context, new Exact(water.hydroxide).negated()),
+    parts: components.map(({ system, concentration }) => ({
+      factors: factorsOf(constantsOf(system), precision),
+      concentration: new context(concentration),
+    })),
+  };
+}
+
 /**
  * β = ln 10 ([H⁺] + [OH⁻] + Σ_k c_k v_k) at constant ionic strength, v_k the variance of the protons
  * lost (D. D. Van Slyke, J. Biol. Chem. 52, 525 (1922)), as a function of u = 1/a(H⁺), computed with
  * at least `precision` digits.
  */
-export function capacityAt(
-  { components, water }: BufferSolution,
-  precision: number,
-): (u: Decimal) => Capacity {
-  const parts = components.map(({ system, concentration }) => ({
-    factors: factorsOf(constantsOf(system), precision),
-    concentration: new Exact(concentration),
-  }));
-  const context = contextOf(precision);
-  const hydrogen = powerOfTen(context, new Exact(water.hydrogen));
-  const hydroxide = powerOfTen(context, new Exact(water.hydroxide).negated());
+export function capacityAt(solution: BufferSolution, precision: number): (u: Decimal) => Capacity {
+  const { context, hydrogen, hydroxide, parts } = preparedAt(solution, precision);
   const ln10 = new context(10).ln();
   return (u) => {
     const ofWater = hydrogen.dividedBy(u).plus(hydroxide.times(u)).times(ln10);
     const ofComponents = parts.map(({ factors, concentration }) => {
-      const terms = [factors.one, ...termsOfActivity(factors, u)];
+      const terms = allTermsOf(factors, u);
       const sum = terms.reduce((all, term) => all.plus(term));
       const fractions = terms.map((term) => term.dividedBy(sum));
       return spreadOf(fractions).times(concentration).times(ln10);

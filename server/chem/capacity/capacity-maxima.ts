@@ -1,13 +1,18 @@
 import type Decimal from 'decimal.js';
-import { contextOf, Exact } from '../decimals/contexts';
+import { contextOf } from '../decimals/contexts';
 import { nth } from '../decimals/nth';
-import { powerOfTen } from '../decimals/powers-of-ten';
 import { refineRoot } from '../decimals/refine-root';
 import { settleAll, significant } from '../decimals/settle-all';
-import { factorsOf, termsOfActivity } from '../forms/composition';
-import { doubleFractions, doubleSystem, fallingRoot, lnOfTen, moments } from '../forms/doubles';
-import { constantsOf } from '../forms/system';
-import { capacityAt, capacityLoss } from './capacity-at';
+import { allTermsOf } from '../forms/composition';
+import {
+  doubleFractions,
+  doubleSystem,
+  fallingRoot,
+  lnOfTen,
+  lostNearZero,
+  moments,
+} from '../forms/doubles';
+import { capacityAt, capacityLoss, preparedAt } from './capacity-at';
 import type { BufferSolution } from './solution';
 
 /** A local maximum of the buffer capacity. */
@@ -54,17 +59,11 @@ function doubleDerivative({ components, water }: BufferSolution) {
 
 /** The same in decimals. */
 function derivative(solution: BufferSolution, precision: number) {
-  const context = contextOf(precision);
-  const hydrogen = powerOfTen(context, new Exact(solution.water.hydrogen));
-  const hydroxide = powerOfTen(context, new Exact(solution.water.hydroxide).negated());
-  const parts = solution.components.map(({ system, concentration }) => ({
-    factors: factorsOf(constantsOf(system), precision),
-    concentration: new context(concentration),
-  }));
+  const { context, hydrogen, hydroxide, parts } = preparedAt(solution, precision);
   return (u: Decimal): Decimal =>
     parts.reduce(
       (all, { factors, concentration }) => {
-        const terms = [factors.one, ...termsOfActivity(factors, u)];
+        const terms = allTermsOf(factors, u);
         const sum = terms.reduce((total, term) => total.plus(term));
         const mode = terms.reduce(
           (most, one, j) => (one.greaterThan(nth(terms, most)) ? j : most),
@@ -127,8 +126,7 @@ export function capacityMaxima(solution: BufferSolution, digits: number): Capaci
     const cancelling = Math.log10(at(lnU).scale / Math.abs(slope));
     // Where the capacity is as good as level, its greatest value has no place of its own.
     if (!(slope < 0) || cancelling > 40) return [];
-    const nearZero = Math.max(0, Math.ceil(-Math.log10(Math.abs(lnU / lnOfTen) + 1e-40)));
-    const loss = capacityLoss(solution) + Math.max(0, Math.ceil(cancelling)) + nearZero;
+    const loss = capacityLoss(solution) + Math.max(0, Math.ceil(cancelling)) + lostNearZero(lnU);
     const [pH = '', total = ''] = settleAll({
       digits,
       loss,

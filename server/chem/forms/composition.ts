@@ -26,7 +26,7 @@ export function factorsOf(pKa: readonly Decimal[], precision: number): Factors {
 }
 
 /** Terms t_j = Π_{i≤j} u·10^−pKa_i of species 1…n against species 0, u = 10^pH = 1/a(H⁺). */
-export function termsOfActivity({ constants }: Factors, u: Decimal): Decimal[] {
+function termsOfActivity({ constants }: Factors, u: Decimal): Decimal[] {
   const terms: Decimal[] = [];
   for (const constant of constants) {
     const ratio = u.times(constant);
@@ -35,7 +35,13 @@ export function termsOfActivity({ constants }: Factors, u: Decimal): Decimal[] {
   return terms;
 }
 
-/** The same at a pH. */
+/** Terms of all species, species 0 with its 1 among them. */
+export const allTermsOf = (factors: Factors, u: Decimal): Decimal[] => [
+  factors.one,
+  ...termsOfActivity(factors, u),
+];
+
+/** Terms t_1…t_n at a pH. */
 export const termsAt = (factors: Factors, pH: Decimal): Decimal[] =>
   termsOfActivity(factors, powerOfTen(factors.context, pH));
 

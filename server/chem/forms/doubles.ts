@@ -20,14 +20,24 @@ export function doubleSystem(pKa: readonly number[]): DoubleSystem {
 export const lnTerms = ({ lnSums }: DoubleSystem, lnU: number): number[] =>
   lnSums.map((sum, j) => j * lnU - sum);
 
-/** Fractions of all species at ln u = pH·ln 10. */
-export function doubleFractions(system: DoubleSystem, lnU: number): number[] {
-  const terms = lnTerms(system, lnU);
+/**
+ * Digits that the zeros after the point of a pH near 0 take from its significant ones: its error is
+ * absolute. At most 40.
+ */
+export const lostNearZero = (lnU: number): number =>
+  Math.min(40, Math.max(0, Math.ceil(-Math.log10(Math.abs(lnU) / lnOfTen + 1e-40))));
+
+/** What part of their sum each of some terms is, from their natural logarithms. */
+export function sharesOfTerms(terms: readonly number[]): number[] {
   const most = Math.max(...terms);
   const weights = terms.map((term) => Math.exp(term - most));
   const total = weights.reduce((sum, weight) => sum + weight, 0);
   return weights.map((weight) => weight / total);
 }
+
+/** Fractions of all species at ln u = pH·ln 10. */
+export const doubleFractions = (system: DoubleSystem, lnU: number): number[] =>
+  sharesOfTerms(lnTerms(system, lnU));
 
 /** Moments Σ (j − about)^k α_j, k = 1, 2, 3, of the protons lost. */
 export function moments(fractions: readonly number[], about: number): [number, number, number] {

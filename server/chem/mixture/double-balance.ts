@@ -1,7 +1,7 @@
 import { type Coefficients, coefficientsOf } from '../activity/coefficients';
 import { doubles } from '../decimals/arithmetic';
 import { nth } from '../decimals/nth';
-import { fallingRoot, lnOfTen, lnTerms } from '../forms/doubles';
+import { fallingRoot, lnOfTen, lnTerms, sharesOfTerms } from '../forms/doubles';
 import { type Acid, type Balance, ionsOf, leftoverCharge } from './balance';
 
 /** Beyond these pH no double tells [H⁺] or [OH⁻] from nothing or everything. */
@@ -43,10 +43,7 @@ function lnSumsOf(acid: Acid, lgGamma: readonly number[], lgGammaH: number): num
 function sharesOf({ held, reference }: Acid, lnSums: readonly number[], lnU: number): number[] {
   const terms = lnTerms({ lnSums }, lnU);
   if (held) return terms.map((term) => Math.exp(term - nth(terms, reference)));
-  const most = Math.max(...terms);
-  const weights = terms.map((term) => Math.exp(term - most));
-  const total = weights.reduce((sum, weight) => sum + weight, 0);
-  return weights.map((weight) => weight / total);
+  return sharesOfTerms(terms);
 }
 
 /** A charge balance in double precision: where the digits of an answer are to be looked for. */

@@ -1,6 +1,7 @@
 import type Decimal from 'decimal.js';
 import { type Found, settleAll, significant } from '../decimals/settle-all';
 import { nth } from '../decimals/nth';
+import { lostNearZero } from '../forms/doubles';
 import type { Acid, Balance } from './balance';
 import { ionicStrength } from '../activity/ionic-strength';
 import { ionsOf } from './balance';
@@ -41,13 +42,9 @@ export interface BalanceNumbers {
   readonly residual: string;
 }
 
-/** pH digits that leading zeros after its point take: its error is absolute. */
-const lostNearZero = ({ lnU, molalities: [hydrogen = 1] }: DoubleSolution) =>
-  Math.max(
-    ...[lnU, Math.log(hydrogen)].map((ln) =>
-      Math.min(40, Math.max(0, Math.ceil(-Math.log10(Math.abs(ln) / Math.LN10 + 1e-40)))),
-    ),
-  );
+/** Digits that a pH near 0, of the activity or of the concentration, takes. */
+const lostOf = ({ lnU, molalities: [hydrogen = 1] }: DoubleSolution) =>
+  Math.max(lostNearZero(lnU), lostNearZero(Math.log(hydrogen)));
 
 /** All values of a solved balance in a fixed order; amounts and strengths as given are exact. */
 function valuesOf(problem: Balance, { balance, u, at, state }: SolvedBalance) {
@@ -138,7 +135,7 @@ function read(problem: Balance, written: readonly string[]) {
  * digits, rounded half-even.
  */
 export function numbersOf(problem: Balance, root: Root, digits: number): BalanceNumbers {
-  const loss = root.loss + 2 + lostNearZero(root.near);
+  const loss = root.loss + 2 + lostOf(root.near);
   let last: SolvedBalance | undefined;
   const at = (precision: number): Found[] => {
     last = root.solvedTo(precision);
@@ -154,7 +151,7 @@ export function numbersOf(problem: Balance, root: Root, digits: number): Balance
 
 /** pH and ionic strength alone, of a root beside the one that is answered. */
 export function stateNumbers(root: Root, digits: number): { pH: string; ionicStrength: string } {
-  const loss = root.loss + 2 + lostNearZero(root.near);
+  const loss = root.loss + 2 + lostOf(root.near);
   const [pH = '', ionic = ''] = settleAll({
     digits,
     loss,

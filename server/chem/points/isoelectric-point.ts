@@ -1,5 +1,6 @@
 import { afterPoint, settleAll, significant } from '../decimals/settle-all';
 import { nth } from '../decimals/nth';
+import { lostNearZero } from '../forms/doubles';
 import { spreadOf } from '../forms/spread';
 import type { AcidBaseSystem } from '../forms/system';
 import type { Balance } from '../mixture/balance';
@@ -49,10 +50,9 @@ export function isoelectricPoint(system: AcidBaseSystem, digits: number): Isoele
   const found = rootsOf(alone(system));
   if (!found.ok) throw new RangeError('A mean charge that changes sign has no root.');
   const [root] = found.roots;
-  const pH = Math.abs(root.near.lnU) / Math.LN10;
   const [point = '', slope = '', ...fractions] = settleAll({
     digits,
-    loss: root.loss + 3 + Math.min(40, Math.max(0, Math.ceil(-Math.log10(pH + 1e-40)))),
+    loss: root.loss + 3 + lostNearZero(root.near.lnU),
     at: (precision) => {
       const { balance, u, at } = root.solvedTo(precision);
       const shares = nth(balance.acidsAt(u, at), 0).fractions;

@@ -1,6 +1,6 @@
 import type Decimal from 'decimal.js';
 import { nth } from '../decimals/nth';
-import { type Factors, termsOfActivity } from '../forms/composition';
+import { type Factors, allTermsOf } from '../forms/composition';
 import { doubleSystem, lnTerms } from '../forms/doubles';
 import type { AcidBaseSystem } from '../forms/system';
 
@@ -46,7 +46,7 @@ export function doubleOdds(system: AcidBaseSystem, species: number) {
 
 /** The odds in decimals, at u = 1/a(H⁺). */
 export function oddsAt(factors: Factors, species: number, u: Decimal): Odds<Decimal> {
-  const terms = [factors.one, ...termsOfActivity(factors, u)];
+  const terms = allTermsOf(factors, u);
   const zero = u.times(0);
   const others = terms.map((term, j) => (j === species ? zero : term));
   const total = others.reduce((sum, term) => sum.plus(term));

@@ -3,7 +3,7 @@ import { contextOf, Exact } from '../decimals/contexts';
 import { refineRoot } from '../decimals/refine-root';
 import { settleAll, significant } from '../decimals/settle-all';
 import { factorsOf } from '../forms/composition';
-import { fallingRoot } from '../forms/doubles';
+import { fallingRoot, lostNearZero } from '../forms/doubles';
 import { type AcidBaseSystem, constantsOf } from '../forms/system';
 import { doubleOdds, oddsAt } from './odds';
 
@@ -37,10 +37,6 @@ function oddsAsked({ fraction }: Question, precision: number): Decimal {
   const context = contextOf(precision);
   return new context(fraction).dividedBy(new context(new Exact(1).minus(fraction)));
 }
-
-/** Digits of a pH that zeros after its point take. */
-const lostNearZero = (lnU: number) =>
-  Math.min(40, Math.max(0, Math.ceil(-Math.log10(Math.abs(lnU) / Math.LN10 + 1e-40))));
 
 type Side = FractionReached['side'];
 

@@ -1,6 +1,6 @@
 import type { BufferCapacityAnswer, BufferCapacityRequest } from '../../../shared/buffer-capacity';
 import type { DryRunAnswer } from '../../../shared/dry-run';
-import { computeUnitsOf, costOf, pointsWorth } from '../../../shared/limits';
+import { costOf, pointsWorth } from '../../../shared/limits';
 import { pointCount } from '../../../shared/ph';
 import {
   bufferCapacityPoints,
@@ -9,6 +9,7 @@ import {
   effectiveSystem,
   waterExponents,
 } from '../../chem';
+import { dryRunOf } from '../compute/dry-run';
 import { conditionsUsed, idealDefaults } from '../chemistry/conditions-used';
 import { modelOf } from '../chemistry/model';
 import { pointsOf } from '../chemistry/points';
@@ -58,11 +59,7 @@ const cost = ({ components, pH, digits }: Resolved): number =>
 
 function answer(request: Resolved): BufferCapacityAnswer | DryRunAnswer {
   const { solution, model } = settled(request);
-  if (request.dryRun) {
-    const all = cost(request);
-    const computeUnits = computeUnitsOf(all);
-    return { dryRun: true, cost: all, computeUnits, warnings: model.warnings };
-  }
+  if (request.dryRun) return dryRunOf(cost(request), model.warnings);
   return {
     points: bufferCapacityPoints(solution, pointsOf(request.pH), request.digits),
     maxima: capacityMaxima(solution, request.digits),

@@ -1,4 +1,3 @@
-import { computeUnitsOf } from '../../../shared/limits';
 import type { DryRunAnswer } from '../../../shared/dry-run';
 import type {
   FractionsAnswer,
@@ -13,6 +12,7 @@ import {
   predominanceRanges,
   speciesOf,
 } from '../../chem';
+import { dryRunOf } from '../compute/dry-run';
 import type { SystemUsed } from '../chemistry/system-used';
 import { fractionsCost } from './cost';
 import { pointsOf } from '../chemistry/points';
@@ -45,10 +45,7 @@ function ofOneSystem(
 /** Species fractions of one system or several, or what they would cost. */
 export function answerFractions(request: ResolvedRequest): Answer {
   const { systems, model } = settled(request);
-  if (request.dryRun) {
-    const cost = fractionsCost(request);
-    return { dryRun: true, cost, computeUnits: computeUnitsOf(cost), warnings: model.warnings };
-  }
+  if (request.dryRun) return dryRunOf(fractionsCost(request), model.warnings);
   const items = systems.map((used) => ofOneSystem(used, request));
   const [only] = items;
   return request.system !== undefined && only ? { ...only, model } : { items, model };

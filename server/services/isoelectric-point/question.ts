@@ -4,8 +4,9 @@ import type {
   IsoelectricPointRequest,
 } from '../../../shared/isoelectric-point';
 import type { Warning } from '../../../shared/model';
-import { computeUnitsOf, costOf, pointsWorth } from '../../../shared/limits';
+import { costOf, pointsWorth } from '../../../shared/limits';
 import { effectiveSystem, isoelectricPoint } from '../../chem';
+import { dryRunOf } from '../compute/dry-run';
 import { conditionsUsed, idealDefaults } from '../chemistry/conditions-used';
 import { modelOf } from '../chemistry/model';
 import { strengthWarnings, withoutComposition } from '../chemistry/ranges';
@@ -48,10 +49,7 @@ function answer(request: ResolvedIsoelectric): IsoelectricPointAnswer | DryRunAn
   const hasNeutralForm = highest > 0 && highest < pKa.length;
   const solution = hasNeutralForm ? isoionicSolution(request) : undefined;
   const warnings = withOthers([...range, ...used.warnings], solution?.warnings);
-  if (request.dryRun) {
-    const all = cost(request);
-    return { dryRun: true, cost: all, computeUnits: computeUnitsOf(all), warnings };
-  }
+  if (request.dryRun) return dryRunOf(cost(request), warnings);
   const found = isoelectricPoint(effectiveSystem(used.inMedium, conditions.activity), digits);
   if (!found.ok) throw noAnswer(found.reason, '/system', signs[found.reason]);
   const isoionic = solution && isoionicPoint(solution, digits);

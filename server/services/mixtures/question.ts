@@ -1,8 +1,8 @@
 import type { DryRunAnswer } from '../../../shared/dry-run';
-import { computeUnitsOf } from '../../../shared/limits';
 import type { MixtureAnswer, MixtureRequest } from '../../../shared/mixtures';
 import type { Warning } from '../../../shared/model';
 import type { BalanceNumbers } from '../../chem';
+import { dryRunOf } from '../compute/dry-run';
 import { modelOf } from '../chemistry/model';
 import { resolvedSystem } from '../chemistry/resolved-system';
 import type { Question } from '../compute/question';
@@ -117,11 +117,7 @@ function answer(request: ResolvedMixture): MixtureAnswer | DryRunAnswer {
   const mixture = settledMixture(request);
   const { conditions, balance, contents, systems, at } = mixture;
   const { digits } = request;
-  if (request.dryRun) {
-    const all = mixtureCost(request);
-    const computeUnits = computeUnitsOf(all);
-    return { dryRun: true, cost: all, computeUnits, warnings: [...mixture.warnings] };
-  }
+  if (request.dryRun) return dryRunOf(mixtureCost(request), mixture.warnings);
   const found = equilibriumOf(balance);
   const range = strengthFound(mixture, found);
   const missing = missingInteractions(balance, found, conditions);

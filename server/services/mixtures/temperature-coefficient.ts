@@ -68,6 +68,10 @@ function balanceAt({ contents, conditions, systems, at }: Asked, by: number): Ba
       );
     }),
   });
+  const [constantsHere, constantsThere] = [
+    debyeHuckel(precision, here),
+    debyeHuckel(precision, there),
+  ];
   return balanceOf(contents, {
     pKw: sumOf(
       at.pKw,
@@ -75,14 +79,8 @@ function balanceAt({ contents, conditions, systems, at }: Asked, by: number): Ba
     ),
     activity: {
       ...at.activity,
-      A: sumOf(
-        at.activity.A,
-        moved((kelvin) => debyeHuckel(precision, kelvin).A, here, there),
-      ),
-      B: sumOf(
-        at.activity.B,
-        moved((kelvin) => debyeHuckel(precision, kelvin).B, here, there),
-      ),
+      A: sumOf(at.activity.A, constantsThere.A.minus(constantsHere.A).toString()),
+      B: sumOf(at.activity.B, constantsThere.B.minus(constantsHere.B).toString()),
     },
     systems: systems.map(shifted),
     henry: () => decimalPower(henryExponent(precision, there).negated(), precision),

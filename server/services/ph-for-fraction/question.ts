@@ -1,8 +1,9 @@
 import { Exact } from '../../../shared/decimal';
 import type { DryRunAnswer } from '../../../shared/dry-run';
-import { computeUnitsOf, costOf, pointsWorth } from '../../../shared/limits';
+import { costOf, pointsWorth } from '../../../shared/limits';
 import type { PHForFractionAnswer, PHForFractionRequest } from '../../../shared/ph-for-fraction';
 import { effectiveSystem, pHForFraction } from '../../chem';
+import { dryRunOf } from '../compute/dry-run';
 import { conditionsUsed, idealDefaults } from '../chemistry/conditions-used';
 import { modelOf } from '../chemistry/model';
 import { strengthWarnings, withoutComposition } from '../chemistry/ranges';
@@ -23,10 +24,7 @@ function answer(request: Resolved): PHForFractionAnswer | DryRunAnswer {
   const range = strengthWarnings(conditions);
   const used = systemUsed(request.system, conditions, '/system');
   const warnings = [...range, ...used.warnings];
-  if (request.dryRun) {
-    const all = cost(request);
-    return { dryRun: true, cost: all, computeUnits: computeUnitsOf(all), warnings };
-  }
+  if (request.dryRun) return dryRunOf(cost(request), warnings);
   const asked = new Exact(fraction);
   if (!asked.greaterThan(0) || !asked.lessThan(1)) {
     const detail = 'A fraction is reached at a pH only between 0 and 1, both excluded.';
